@@ -1,0 +1,4 @@
+/** Texts of the frame: name, menu, banner, cautions, problems. */
+export const shellTexts = {
+  name: 'Toehold',
+} as const
