@@ -1,0 +1,52 @@
+import compression from 'compression'
+import express, { type Express } from 'express'
+import type { Logger } from 'pino'
+import type { Db } from './db/client'
+import type { Env } from './env'
+import { NotFoundError } from './errors'
+import { errorHandler } from './http/error-handler'
+import { receiveJsonText } from './http/json-body'
+import { securityHeaders } from './http/security-headers'
+import { site } from './http/site'
+import { requestLog } from './logger'
+import { catalogueModule } from './modules/catalogue/catalogue.routes'
+import { healthModule } from './modules/health/health.routes'
+import { openapiModule } from './modules/openapi/openapi.routes'
+import { sectionChecksModule } from './modules/section-checks/section-checks.routes'
+
+export interface AppParts {
+  readonly db: Db
+  readonly env: Env
+  readonly logger: Logger
+  readonly version: string
+  /** Folder of the built page. */
+  readonly siteFolder: string
+}
+
+/** Builds the server; it listens only where `main.ts` says so. */
+export function createApp({ db, env, logger, version, siteFolder }: AppParts): Express {
+  const app = express()
+  app.use(requestLog(logger))
+  app.use(securityHeaders(env.appUrl))
+  app.use(compression())
+  app.use('/api', (_req, res, next) => {
+    res.set('Cache-Control', 'no-store')
+    next()
+  })
+  app.use(receiveJsonText)
+
+  const modules = [
+    healthModule(db, { version, mode: env.mode }),
+    catalogueModule(db),
+    sectionChecksModule(),
+  ]
+  modules.push(openapiModule(version, modules))
+  for (const { router } of modules) app.use(router)
+
+  app.use(site(siteFolder))
+  app.use((req) => {
+    throw new NotFoundError(`${req.method} ${req.path}: there is nothing at this address`)
+  })
+  app.use(errorHandler)
+  return app
+}

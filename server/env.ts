@@ -1,0 +1,95 @@
+import { z } from 'zod'
+import type { Mode } from '../shared/schemas/health'
+
+/** The environment does not say what the server needs: each line names a variable. */
+export class EnvironmentError extends Error {
+  override readonly name = 'EnvironmentError'
+}
+
+const LOG_LEVELS = ['trace', 'debug', 'info', 'warn', 'error', 'fatal', 'silent'] as const
+const SHORTEST_SECRET = 32
+
+const portRule = 'must be a whole number from 0 to 65535'
+
+const environmentSchema = z.object({
+  NODE_ENV: z.enum(['development', 'test', 'production']).default('development'),
+  PORT: z
+    .string()
+    .regex(/^\d{1,5}$/, portRule)
+    .transform(Number)
+    .pipe(z.number().max(65_535, portRule))
+    .default(3000),
+  HOST: z.string().optional(),
+  DATABASE_FILE: z.string().default('data/toehold.sqlite'),
+  LOG_LEVEL: z.enum(LOG_LEVELS).optional(),
+  APP_URL: z.url({ protocol: /^https?$/, message: 'must be an http or https address' }).optional(),
+  SESSION_SECRET: z.string().optional(),
+})
+
+export interface Env {
+  readonly mode: Mode
+  readonly port: number
+  /** Interface to listen on; left out: all. */
+  readonly host: string | undefined
+  readonly databaseFile: string
+  readonly logLevel: (typeof LOG_LEVELS)[number]
+  /** Address at which people reach the program. */
+  readonly appUrl: string
+  /** Signs what must not be forged; only production insists on it. */
+  readonly sessionSecret: string | undefined
+}
+
+/**
+ * Reads the environment, once. An empty variable counts as absent, as in a copied `.env.example`.
+ *
+ * @throws EnvironmentError that names every variable at fault.
+ */
+export function readEnv(source: Record<string, string | undefined>): Env {
+  const given = Object.fromEntries(Object.entries(source).filter(([, value]) => value !== ''))
+  const parsed = environmentSchema.safeParse(given)
+  if (!parsed.success) throw new EnvironmentError(describeIssues(parsed.error, given))
+
+  const variables = parsed.data
+  const mode: Mode = variables.NODE_ENV === 'production' ? 'production' : 'demonstration'
+  if (mode === 'production') assertProduction(variables)
+  return {
+    mode,
+    port: variables.PORT,
+    host: variables.HOST,
+    databaseFile: variables.DATABASE_FILE,
+    logLevel: variables.LOG_LEVEL ?? quietEnough(variables.NODE_ENV),
+    appUrl: variables.APP_URL ?? `http://localhost:${variables.PORT}`,
+    sessionSecret: variables.SESSION_SECRET,
+  }
+}
+
+type Variables = z.output<typeof environmentSchema>
+
+function describeIssues(error: z.ZodError, given: Record<string, string | undefined>): string {
+  return error.issues
+    .map((issue) => {
+      const name = String(issue.path[0])
+      const rule =
+        issue.code === 'invalid_value' ? `must be one of ${issue.values.join(', ')}` : issue.message
+      return `${name}: "${given[name] ?? ''}" is not allowed; it ${rule}`
+    })
+    .join('\n')
+}
+
+function assertProduction({ APP_URL, SESSION_SECRET }: Variables): void {
+  const missing = []
+  if (!APP_URL) {
+    missing.push('APP_URL: production needs the address at which people reach the program')
+  }
+  if ((SESSION_SECRET?.length ?? 0) < SHORTEST_SECRET) {
+    missing.push(
+      `SESSION_SECRET: production needs a secret of ${SHORTEST_SECRET} characters or more`,
+    )
+  }
+  if (missing.length > 0) throw new EnvironmentError(missing.join('\n'))
+}
+
+/** Demonstration logs only what went wrong, so that the address stays in sight. */
+function quietEnough(nodeEnv: Variables['NODE_ENV']): Env['logLevel'] {
+  return nodeEnv === 'production' ? 'info' : nodeEnv === 'test' ? 'silent' : 'warn'
+}

@@ -1,0 +1,24 @@
+/** What was asked for does not exist (HTTP 404). */
+export class NotFoundError extends Error {
+  override readonly name = 'NotFoundError'
+}
+
+/** The account may not do this (HTTP 403). */
+export class ForbiddenError extends Error {
+  override readonly name = 'ForbiddenError'
+}
+
+/** It contradicts what is already there (HTTP 409). */
+export class ConflictError extends Error {
+  override readonly name = 'ConflictError'
+}
+
+/** Something that the server needs does not answer (HTTP 503). */
+export class UnavailableError extends Error {
+  override readonly name = 'UnavailableError'
+}
+
+/** A text is not JSON at all, so that no field of it can be named (HTTP 400). */
+export class InvalidJsonError extends Error {
+  override readonly name = 'InvalidJsonError'
+}

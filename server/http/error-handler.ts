@@ -1,0 +1,86 @@
+import type { ErrorRequestHandler } from 'express'
+import { type Fault, InvalidInputError, OutOfRangeError, showValue } from '../../shared/errors'
+import type { Problem, ProblemCode } from '../../shared/schemas/problem'
+import {
+  ConflictError,
+  ForbiddenError,
+  InvalidJsonError,
+  NotFoundError,
+  UnavailableError,
+} from '../errors'
+import { MethodNotAllowedError, UnsupportedMediaTypeError } from './http-errors'
+import { PROBLEMS } from './problems'
+
+/** More than a form or a list can have by honest mistake; keeps an answer shorter than its request. */
+const MOST_FIELDS = 100
+
+/** The only place that turns errors into answers. Express knows it by its four parameters. */
+export const errorHandler: ErrorRequestHandler = (error: unknown, req, res, next) => {
+  if (res.headersSent) {
+    next(error)
+    return
+  }
+  const problem = toProblem(error)
+  if (problem.code === 'internal') {
+    req.log.error({ err: error }, 'request failed')
+    problem.message += ` Reference: ${String(req.id)}`
+  }
+  if (error instanceof MethodNotAllowedError) res.set('Allow', error.allowed.join(', '))
+  res.status(PROBLEMS[problem.code].status).json(problem)
+}
+
+function toProblem(error: unknown): Problem {
+  if (error instanceof InvalidInputError) return refusal('invalid-input', error.faults)
+  if (error instanceof OutOfRangeError) return refusal('out-of-range', error.faults)
+  if (error instanceof InvalidJsonError) {
+    return problem('invalid-json', `The body is not JSON: ${error.message}`)
+  }
+  const code = codeOf(error) ?? codeOfStatus(error)
+  if (code && error instanceof Error) return problem(code, error.message)
+  return problem('internal', 'Something went wrong on the server; the fault is in its log.')
+}
+
+const CODES = [
+  [NotFoundError, 'not-found'],
+  [ForbiddenError, 'forbidden'],
+  [ConflictError, 'conflict'],
+  [UnavailableError, 'unavailable'],
+  [MethodNotAllowedError, 'method-not-allowed'],
+  [UnsupportedMediaTypeError, 'unsupported-media-type'],
+] as const
+
+function codeOf(error: unknown): ProblemCode | undefined {
+  return CODES.find(([type]) => error instanceof type)?.[1]
+}
+
+/** Errors that Express and its parsers throw carry a status; theirs below 500 are safe to show. */
+function codeOfStatus(error: unknown): ProblemCode | undefined {
+  const status = error instanceof Error && 'status' in error ? Number(error.status) : 500
+  if (status === 413) return 'too-large'
+  if (status === 415) return 'unsupported-media-type'
+  if (status === 404) return 'not-found'
+  return status >= 400 && status < 500 ? 'bad-request' : undefined
+}
+
+function problem(code: ProblemCode, message: string): Problem {
+  return { code, message, fields: [] }
+}
+
+function refusal(code: ProblemCode, faults: readonly Fault[]): Problem {
+  const shown = faults.slice(0, MOST_FIELDS)
+  const rest = faults.length - shown.length
+  const lines = shown.map((fault) => fault.message)
+  if (rest > 0) lines.push(`and ${rest} more`)
+  return {
+    code,
+    message: lines.join('\n'),
+    fields: shown.map((fault) => ({ ...fault, value: forJson(fault.value) })),
+  }
+}
+
+/** JSON has no Infinity, NaN or undefined; lists and objects are named, not sent back. */
+function forJson(value: unknown): unknown {
+  if (value === undefined || value === null) return null
+  if (typeof value === 'number') return Number.isFinite(value) ? value : String(value)
+  return typeof value === 'object' ? showValue(value) : value
+}

@@ -1,0 +1,33 @@
+import { extname, join } from 'node:path'
+import express, { type RequestHandler, Router } from 'express'
+
+const ONE_YEAR = '1y'
+
+/** The built page: its hashed files for ever, everything else asked for anew each time. */
+export function site(folder: string): Router {
+  const router = Router()
+  router.use(
+    '/assets',
+    express.static(join(folder, 'assets'), { immutable: true, maxAge: ONE_YEAR, index: false }),
+  )
+  router.use(express.static(folder, { setHeaders: (res) => res.set('Cache-Control', 'no-cache') }))
+  router.use(pageOfAnyPlace(folder))
+  return router
+}
+
+/** Places of the program are addresses of one page; a file that is missing is not a place. */
+function pageOfAnyPlace(folder: string): RequestHandler {
+  return (req, res, next) => {
+    const isPlace =
+      (req.method === 'GET' || req.method === 'HEAD') &&
+      !/^\/api(\/|$)/.test(req.path) &&
+      extname(req.path) === '' &&
+      req.accepts('html') === 'html'
+    if (!isPlace) {
+      next()
+      return
+    }
+    res.set('Cache-Control', 'no-cache')
+    res.sendFile(join(folder, 'index.html'))
+  }
+}
