@@ -52,7 +52,7 @@ export default tseslint.config(
       'import-x/no-mutable-exports': 'error',
       '@typescript-eslint/no-non-null-assertion': 'off',
       '@typescript-eslint/consistent-type-imports': 'error',
-      '@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_' }],
+      '@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_', varsIgnorePattern: '^_' }],
       eqeqeq: 'error',
       'no-undef': 'off',
       'max-lines': ['error', { max: 250, skipBlankLines: true, skipComments: true }],

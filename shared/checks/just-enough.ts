@@ -1,0 +1,76 @@
+import { findRoot } from '../calc/numerics/find-root'
+import { fieldRange } from '../schemas/section-ranges'
+import type { SectionCase } from '../schemas/section-case'
+import type { SectionResult } from '../schemas/section-result'
+import { globalPairs } from './global-checks'
+import { partialSliding } from './partial-checks'
+import { sectionState } from './section-state'
+
+export type JustEnough = SectionResult['justEnough']
+
+const NONE: JustEnough = { skirtLength: null, friction: null, edgeFactor: null }
+
+/**
+ * The value of skirt length, friction and edge factor at which sliding is just enough, all else as
+ * it is; null where no value in its range is enough.
+ *
+ * An edge factor of 1 or more means that any edge will do. Demand and resistance are linear in the
+ * edge factor and the friction, so two evaluations give these exactly; the skirt length is a root.
+ */
+export function justEnough(section: SectionCase): JustEnough {
+  if (section.water.dryDepth > section.water.depth) return NONE
+  return {
+    skirtLength: enoughSkirt(section),
+    friction: enoughFriction(section),
+    edgeFactor: enoughEdge(section),
+  }
+}
+
+/** Resistance less required demand of sliding [N/m], one figure per combination of the basis. */
+function slidingSpare(section: SectionCase): readonly number[] {
+  const state = sectionState(section)
+  const { format, sliding: required } = state.basis
+  const pairs =
+    format === 'partial'
+      ? [partialSliding(state, 1), partialSliding(state, 2)]
+      : [globalPairs(state).sliding]
+  return pairs.map(({ demand, resistance }) => resistance - required * demand)
+}
+
+function enoughSkirt(section: SectionCase): number | null {
+  const spare = (skirtLength: number): number =>
+    Math.min(...slidingSpare({ ...section, barrier: { ...section.barrier, skirtLength } }))
+  const low = 0
+  const high = fieldRange('barrier.skirtLength').max as number
+  const atLow = spare(low)
+  if (atLow >= 0) return 0
+  const atHigh = spare(high)
+  if (atHigh < 0) return null
+  return findRoot(spare, { low, high, atLow, atHigh })
+}
+
+function enoughFriction(section: SectionCase): number | null {
+  const spare = (friction: number): readonly number[] =>
+    slidingSpare({ ...section, ground: { ...section.ground, friction } })
+  const without = spare(0)
+  const perUnit = spare(1).map((value, i) => value - without[i]!)
+  const needed = without.map((value, i) => needAlong(value, perUnit[i]!))
+  const most = Math.max(...needed)
+  return most <= (fieldRange('ground.friction').max as number) ? most : null
+}
+
+/** Where a line that starts at `value` and rises by `slope` reaches zero: 0 if it starts there. */
+function needAlong(value: number, slope: number): number {
+  if (value >= 0) return 0
+  return slope > 0 ? -value / slope : Infinity
+}
+
+function enoughEdge(section: SectionCase): number | null {
+  const spare = (edgeFactor: number): readonly number[] =>
+    slidingSpare({ ...section, uplift: { ...section.uplift, edgeFactor } })
+  const sealed = spare(0)
+  const open = spare(1)
+  if (sealed.some((value) => value < 0)) return null
+  const limits = sealed.map((value, i) => (value > open[i]! ? value / (value - open[i]!) : 1))
+  return Math.min(...limits)
+}

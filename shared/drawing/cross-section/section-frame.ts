@@ -1,0 +1,174 @@
+import { niceAbove } from '../nice-ticks'
+import type { Point } from '../scene'
+import { cutAxis, wholeAxis, type CutAxis } from './cut-axis'
+import { layoutFor, type SectionLayout } from './layout'
+import type { CrossSectionInput, DrawnOutline } from './section-input'
+
+/** The greatest depth of a case, in diameters: the drawing keeps room for it. */
+export const GREATEST_DEPTH = 1.5
+
+/** How metres, heads of water and forces become pixels in one drawing. */
+export interface SectionFrame {
+  readonly layout: SectionLayout
+  readonly width: number
+  readonly height: number
+  /** px per metre, the same in both directions. */
+  readonly scale: number
+  /** Height of the ground at the weld line [px]. */
+  readonly groundY: number
+  readonly axis: CutAxis
+  readonly sin: number
+  readonly cos: number
+  /** Crossfall tan β. */
+  readonly fall: number
+  /** px per metre of head: all pressure arrows. */
+  readonly headScale: number
+  /** px per N/m: all force arrows. */
+  readonly forceScale: number
+}
+
+/** Below this share of the scale that the height allows, the skirt is cut rather than shrunk. */
+const LEAST_SHARE = 0.42
+
+/** Width of the gap at a cut [px]. */
+const CUT_GAP = 14
+
+/** Pressure arrows are drawn at less than this share of true head, below the thrust at a third. */
+const HEAD_SHARE = 0.27
+
+/** Extent of the drawing in metres around the weld line. */
+interface Extent {
+  readonly left: number
+  readonly right: number
+  readonly above: number
+  readonly below: number
+}
+
+/** Works out the frame. It does not depend on the depth, so nothing jumps while the water is dragged. */
+export function sectionFrame(input: CrossSectionInput): SectionFrame {
+  const { view } = input
+  const { fall } = input.case.ground
+  const layout = layoutFor(view)
+  const cos = 1 / Math.hypot(1, fall)
+  const sin = fall * cos
+  const extent = extentOf(input, sin, cos)
+  const usableWidth = view.width - layout.gutterLeft - layout.gutterRight
+  const usableHeight = view.height - layout.top - layout.strip
+  const byHeight = usableHeight / (extent.above + extent.below)
+  const byWidth = usableWidth / (extent.left + extent.right)
+  const scale =
+    byWidth >= LEAST_SHARE * byHeight
+      ? Math.min(byWidth, byHeight)
+      : Math.max(byWidth, Math.min(byHeight, (0.5 * usableWidth) / extent.right))
+  const spare = usableHeight - scale * (extent.above + extent.below)
+  return {
+    layout,
+    width: view.width,
+    height: view.height,
+    scale,
+    groundY: layout.top + scale * extent.above + spare * 0.6,
+    axis: axisOf(extent, scale, layout, usableWidth),
+    sin,
+    cos,
+    fall,
+    headScale: headScaleOf(input, layout, scale, sin),
+    forceScale: forceScaleOf(input, view.width),
+  }
+}
+
+function extentOf(input: CrossSectionInput, sin: number, cos: number): Extent {
+  const { diameter, skirtLength, contactWidth } = input.case.barrier
+  const nominal = contactWidth / 2 + diameter * (0.53 + Math.abs(sin) / 2)
+  const outline = input.outline ?? input.lastStanding?.outline
+  const right = Math.max(nominal, outline ? farthest(outline) : 0)
+  const left = skirtLength * cos
+  const wetRise = sin * (skirtLength + 0.4 * diameter)
+  const dryRise = -sin * (right + 0.6 * diameter)
+  return {
+    left,
+    right,
+    above: Math.max(GREATEST_DEPTH * diameter, wetRise + 0.1 * diameter, dryRise),
+    below: Math.max(0, -wetRise, -dryRise),
+  }
+}
+
+function farthest(outline: DrawnOutline): number {
+  let right = 0
+  for (const { x } of outline.drySkin) right = Math.max(right, x)
+  return right * 1.02
+}
+
+function axisOf(
+  extent: Extent,
+  scale: number,
+  layout: SectionLayout,
+  usableWidth: number,
+): CutAxis {
+  const spare = usableWidth - scale * (extent.left + extent.right)
+  if (spare >= 0) return wholeAxis(layout.gutterLeft + spare * 0.6 + scale * extent.left, scale)
+  const originPx = layout.gutterLeft + usableWidth - scale * extent.right
+  const skirtPx = originPx - layout.gutterLeft - CUT_GAP
+  const fromPx = layout.gutterLeft + 0.38 * skirtPx
+  const toPx = fromPx + CUT_GAP
+  return cutAxis(originPx, scale, {
+    fromX: -extent.left + (0.38 * skirtPx) / scale,
+    toX: (toPx - originPx) / scale,
+    fromPx,
+    toPx,
+  })
+}
+
+function headScaleOf(
+  input: CrossSectionInput,
+  layout: SectionLayout,
+  scale: number,
+  sin: number,
+): number {
+  const { diameter, skirtLength } = input.case.barrier
+  const greatest = GREATEST_DEPTH * diameter + Math.max(0, -sin * skirtLength)
+  return Math.min(layout.pressureMax / greatest, HEAD_SHARE * scale)
+}
+
+/**
+ * Thrust at the greatest depth and friction at a depth of one diameter fix the scale, so that it
+ * stays while the water moves; only unusual forces (debris, waves) make it smaller, by nice steps.
+ */
+function forceScaleOf(input: CrossSectionInput, width: number): number {
+  const { barrier, ground, water, gravity } = input.case
+  const { thrust, vertical } = input.evaluation
+  const weight = water.density * gravity
+  const { diameter, skirtLength, contactWidth } = barrier
+  const greatest = Math.max(
+    (weight * (GREATEST_DEPTH * diameter) ** 2) / 2,
+    0.6 * ground.friction * weight * (skirtLength + contactWidth) * diameter,
+  )
+  const present = Math.max(Math.abs(thrust.total), ground.friction * vertical.net)
+  const reference = present > greatest ? niceAbove(present) : greatest
+  return Math.min(330, Math.max(110, 0.32 * width)) / reference
+}
+
+/** From the axes of the section (along the ground and square to it) [m] to the scene [px]. */
+export function toScene(frame: SectionFrame, point: Point): Point {
+  const { sin, cos, axis, scale, groundY } = frame
+  return {
+    x: axis.toPx(point.x * cos + point.y * sin),
+    y: groundY - scale * (point.y * cos - point.x * sin),
+  }
+}
+
+/** Height above the ground at the weld line [m] as a height in the scene [px]. */
+export function levelY(frame: SectionFrame, height: number): number {
+  return frame.groundY - frame.scale * height
+}
+
+/** Height of the ground at a place [px] of the scene [px]. */
+export function groundYAt(frame: SectionFrame, px: number): number {
+  return frame.groundY + frame.scale * frame.fall * frame.axis.toMetres(px)
+}
+
+/** The ground from one place to another [px], with the corners at a cut. */
+export function groundPoints(frame: SectionFrame, fromPx: number, toPx: number): Point[] {
+  const { cut } = frame.axis
+  const corners = cut ? [cut.fromPx, cut.toPx].filter((px) => px > fromPx && px < toPx) : []
+  return [fromPx, ...corners, toPx].map((x) => ({ x, y: groundYAt(frame, x) }))
+}

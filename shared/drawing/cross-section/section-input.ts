@@ -1,0 +1,64 @@
+import type { SectionCase } from '../../schemas/section-case'
+import type { SectionResult } from '../../schemas/section-result'
+import type { Point, View } from '../scene'
+import type { MeasureText } from '../text-width'
+
+/** Answers of the engine that the drawing shows. */
+export type DrawnEvaluation = Pick<
+  SectionResult,
+  'thrust' | 'vertical' | 'sliding' | 'freeboard' | 'loadedShape' | 'verdict' | 'governs'
+>
+
+/**
+ * Tube and skirt as they stand: polylines in the axes of the section [m]. Wet edge to dry side:
+ * `freeSkirt` from the ground to the weld line, `wetSkin` from there to the water surface, `crown`
+ * over the top, `drySkin` down to the ground; `contact` on it and `underside` back to the weld line.
+ */
+export interface DrawnOutline {
+  readonly freeSkirt: readonly Point[]
+  readonly wetSkin: readonly Point[]
+  readonly crown: readonly Point[]
+  readonly drySkin: readonly Point[]
+  readonly contact: readonly Point[]
+  readonly underside: readonly Point[]
+}
+
+/** The last shape that stood as the water rose. */
+export interface LastStanding {
+  readonly outline: DrawnOutline
+  /** Depth of water at which it stood [m]. */
+  readonly depth: number
+  /** Its crest above the ground [m]. */
+  readonly crest: number
+}
+
+/** Where the ground lies, so that heights can be given as levels. */
+export interface GroundLevel {
+  /** Level of the ground at the weld line [m]. */
+  readonly ground: number
+  /** Name of the datum, as printed behind a level. */
+  readonly datum: string
+}
+
+/** Depths worth a mark at the edge of the drawing [m]; what is left out is not drawn. */
+export interface SectionMarks {
+  readonly low?: number | null | undefined
+  readonly expected?: number | null | undefined
+  readonly high?: number | null | undefined
+  readonly holdsTo?: number | null | undefined
+  readonly leave?: number | null | undefined
+}
+
+/** Everything that one drawing of a section needs. */
+export interface CrossSectionInput {
+  readonly case: SectionCase
+  readonly evaluation: DrawnEvaluation
+  /** Null where the tube does not stand. */
+  readonly outline: DrawnOutline | null
+  readonly lastStanding?: LastStanding | null | undefined
+  readonly level?: GroundLevel | null | undefined
+  readonly marks?: SectionMarks | undefined
+  readonly view: View
+  /** Width of the texts as they will be printed; metric English if left out. */
+  readonly measure?: MeasureText | undefined
+}

@@ -1,0 +1,62 @@
+import type { ArrowsItem, Arrow, ArrowStyle, Point } from './scene'
+
+/** A coordinate to a hundredth of a pixel, as SVG writes it. */
+function coordinate(value: number): string {
+  return String(Math.round(value * 100) / 100 || 0)
+}
+
+function pair(point: Point): string {
+  return `${coordinate(point.x)} ${coordinate(point.y)}`
+}
+
+/** Path data of an open line through the points. */
+export function linePath(points: readonly Point[]): string {
+  let d = ''
+  for (const point of points) d += (d === '' ? 'M' : 'L') + pair(point)
+  return d
+}
+
+/** Path data of the area inside the points. */
+export function areaPath(points: readonly Point[]): string {
+  return `${linePath(points)}Z`
+}
+
+/** Path data of separate straight lines, each from its first to its second point. */
+export function segmentsPath(segments: readonly (readonly [Point, Point])[]): string {
+  let d = ''
+  for (const [from, to] of segments) d += `M${pair(from)}L${pair(to)}`
+  return d
+}
+
+/** Outline of one arrow: shaft and head in one closed shape; a short arrow gets a smaller head. */
+function arrowOutline({ from, to }: Arrow, style: ArrowStyle): string {
+  const dx = to.x - from.x
+  const dy = to.y - from.y
+  const length = Math.hypot(dx, dy)
+  if (length < 0.5) return ''
+  const size = Math.min(1, (0.75 * length) / style.head)
+  const along = { x: dx / length, y: dy / length }
+  const neck = length - style.head * size
+  const at = (distance: number, side: number): Point => ({
+    x: from.x + along.x * distance - along.y * side,
+    y: from.y + along.y * distance + along.x * side,
+  })
+  const shaft = Math.min(style.shaft, style.spread * size) / 2
+  const spread = (style.spread * size) / 2
+  return areaPath([
+    at(0, -shaft),
+    at(neck, -shaft),
+    at(neck, -spread),
+    to,
+    at(neck, spread),
+    at(neck, shaft),
+    at(0, shaft),
+  ])
+}
+
+/** Path data of all arrows of an item, to be filled. */
+export function arrowsPath(item: ArrowsItem): string {
+  let d = ''
+  for (const arrow of item.arrows) d += arrowOutline(arrow, item.style)
+  return d
+}
