@@ -1,14 +1,35 @@
+import { relative } from 'node:path'
 import { fileURLToPath } from 'node:url'
 import vue from '@vitejs/plugin-vue'
 import elementPlus from 'unplugin-element-plus/vite'
+import type { Plugin } from 'vite'
 import { defineConfig } from 'vitest/config'
 
 const folder = (path: string) => fileURLToPath(new URL(path, import.meta.url))
 
+/** Notes the modules of every script, for check-bundle; dotfiles are not served. */
+function recordModules(): Plugin {
+  return {
+    name: 'toehold:record-modules',
+    apply: 'build',
+    generateBundle(_options, bundle) {
+      const chunks = Object.values(bundle).filter((output) => output.type === 'chunk')
+      const modules = chunks.map(({ fileName, moduleIds }) => [
+        fileName,
+        moduleIds.map((id) => relative(process.cwd(), id)),
+      ])
+      const source = JSON.stringify(Object.fromEntries(modules), null, 2)
+      this.emitFile({ type: 'asset', fileName: '.vite/modules.json', source })
+    },
+  }
+}
+
 export default defineConfig({
-  plugins: [vue(), elementPlus({})],
+  plugins: [vue(), elementPlus({}), recordModules()],
   resolve: { alias: { '@shared': folder('./shared'), '@': folder('./src') } },
   server: { proxy: { '/api': `http://localhost:${process.env.API_PORT ?? 3001}` } },
+  // check-bundle reads manifest and modules to learn what the first page loads.
+  build: { manifest: true },
   test: {
     include: ['tests/**/*.test.ts'],
     exclude: ['tests/e2e/**'],
