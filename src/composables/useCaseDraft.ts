@@ -1,0 +1,151 @@
+import { computed, inject, provide, shallowRef, watch, type InjectionKey, type Ref } from 'vue'
+import { BARRIERS, type CatalogueBarrier } from '@shared/catalogue/barriers'
+import { GROUNDS } from '@shared/catalogue/grounds'
+import type { UnitSystem } from '@shared/units'
+import type { AddressContent } from '@/quick-check/address'
+import {
+  changeForDepth,
+  changeForMode,
+  type CaseInput,
+  type FieldValues,
+} from '@/quick-check/case-input'
+import type { ChoiceId, Choices } from '@/quick-check/choices'
+import {
+  draftContent,
+  draftFields,
+  firstValid,
+  readGroup,
+  startState,
+  type DraftFields,
+} from '@/quick-check/draft-fields'
+import { fieldFaults, type FormInput } from '@/quick-check/field-faults'
+import { readTyped, shownText } from '@/quick-check/field-text'
+import { FIELD_IDS, FIELDS, type FieldId } from '@/quick-check/fields'
+import { TUBE_FIELDS } from '@/quick-check/tube'
+
+/** Every field and choice of one Quick check, what is wrong with them, and the last input without a fault. */
+export function useCaseDraft(start: AddressContent, units: Ref<UnitSystem>) {
+  const fields = draftFields(start)
+  const choices = shallowRef<Choices>(start.choices)
+
+  const section = computed<FormInput>(() => ({
+    values: readGroup(fields, 'section'),
+    choices: choices.value,
+  }))
+  const before = computed<FormInput>(() => ({
+    values: readGroup(fields, 'before'),
+    choices: start.choices,
+  }))
+  const sectionFaults = computed(() => fieldFaults(section.value, 'section'))
+  const beforeFaults = computed(() => fieldFaults(before.value, 'before'))
+
+  const valid = computed<CaseInput>((last) =>
+    sectionFaults.value.length === 0
+      ? (section.value as CaseInput)
+      : (last ?? firstValid(start, 'section')),
+  )
+  const validBefore = computed<FieldValues>((last) =>
+    beforeFaults.value.length === 0
+      ? (before.value.values as FieldValues)
+      : (last ?? firstValid(start, 'before').values),
+  )
+  const faults = computed(
+    () => new Map([...sectionFaults.value, ...beforeFaults.value].map((f) => [f.field, f])),
+  )
+  watch(units, () => forgetTyped(fields), { flush: 'sync' })
+
+  return {
+    choices,
+    valid,
+    validBefore,
+    sectionFaults,
+    beforeFaults,
+    faultOf: (id: FieldId) => faults.value.get(id) ?? null,
+    textOf: (id: FieldId) => shownText(fields[id].value, FIELDS[id].kind, units.value),
+    valueOf: (id: FieldId) => fields[id].value.value,
+    content: computed(() =>
+      draftContent(fields, choices.value, { section: valid.value, before: validBefore.value }),
+    ),
+    ...draftActions(fields, choices, { units, valid }),
+  }
+}
+
+export type CaseDraft = ReturnType<typeof useCaseDraft>
+
+interface DraftContext {
+  readonly units: Ref<UnitSystem>
+  readonly valid: Ref<CaseInput>
+}
+
+function draftActions(fields: DraftFields, choices: Ref<Choices>, context: DraftContext) {
+  const { units, valid } = context
+
+  function type(id: FieldId, text: string): void {
+    fields[id].value = readTyped(text, FIELDS[id].kind, units.value)
+  }
+
+  function setValues(values: Partial<FieldValues>): void {
+    for (const [id, value] of Object.entries(values) as [FieldId, number | null][])
+      fields[id].value = { typed: null, value }
+  }
+
+  function setDepth(depth: number): void {
+    setValues(changeForDepth(valid.value, depth))
+  }
+
+  /** Changes a choice; another way of entering the water keeps the water where it is. */
+  function choose<K extends ChoiceId>(id: K, option: Choices[K]): void {
+    const next = { ...choices.value, [id]: option }
+    if (id === 'waterMode') setValues(changeForMode(valid.value, next.waterMode))
+    choices.value = next
+    if (id === 'surface') layOn(option)
+  }
+
+  function layOn(surface: string): void {
+    const ground = GROUNDS.find(({ id }) => id === surface)
+    if (!ground) return
+    const { friction, permeability, layerThickness, isSuitable } = ground
+    setValues({ friction, permeability, layerThickness })
+    choices.value = { ...choices.value, suitable: isSuitable ? 'yes' : 'no' }
+  }
+
+  function takeTube(tube: string): void {
+    const barrier = BARRIERS.find(({ id }) => id === tube)
+    if (!barrier) return
+    setValues(figuresOf(barrier))
+  }
+
+  function load({ values, choices: chosen, refused }: AddressContent): void {
+    choices.value = chosen
+    for (const id of FIELD_IDS) fields[id].value = startState(values[id], refused[id])
+  }
+
+  return { type, setValues, setDepth, choose, takeTube, load }
+}
+
+/** In other units a typed figure would mean something else: it is shown converted. A text stays as it is. */
+function forgetTyped(fields: DraftFields): void {
+  for (const field of Object.values(fields)) {
+    const { typed, value } = field.value
+    if (typed !== null && typeof value === 'number' && Number.isFinite(value))
+      field.value = { typed: null, value }
+  }
+}
+
+/** Figures of a catalogue tube, by field. */
+function figuresOf(barrier: CatalogueBarrier): Partial<FieldValues> {
+  return Object.fromEntries(TUBE_FIELDS.map((id) => [id, barrier[id]]))
+}
+
+const KEY: InjectionKey<CaseDraft> = Symbol('case draft')
+
+export function provideCaseDraft(draft: CaseDraft): void {
+  provide(KEY, draft)
+}
+
+/** The draft that the view provides. */
+export function injectCaseDraft(): CaseDraft {
+  const draft = inject(KEY)
+  if (!draft) throw new Error('No case draft above this component')
+  return draft
+}

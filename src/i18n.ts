@@ -1,0 +1,24 @@
+import { createI18n, type MessageContext } from 'vue-i18n'
+import { texts } from '@shared/texts'
+
+/**
+ * Texts are plain with `{name}` placeholders, exactly as the files and PDFs read them, so the
+ * message compiler of the library stays out of the bundle.
+ */
+function compileMessage(message: unknown) {
+  const template = String(message)
+  if (!template.includes('{')) return () => template
+  return (context: MessageContext) =>
+    template.replace(/\{(\w+)\}/g, (_, name: string) => String(context.named(name)))
+}
+
+/** Texts in English; another language is one more entry of `texts`. */
+export function createTexts() {
+  return createI18n({
+    legacy: false,
+    locale: 'en',
+    fallbackLocale: 'en',
+    messages: texts,
+    messageCompiler: compileMessage,
+  })
+}

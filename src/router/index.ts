@@ -1,0 +1,32 @@
+import { createRouter, createWebHistory, type RouteRecordRaw } from 'vue-router'
+import QuickCheckView from '@/views/QuickCheckView.vue'
+
+declare module 'vue-router' {
+  interface RouteMeta {
+    /** Text key of the page's name in the title of the window. */
+    readonly titleKey: string
+  }
+}
+
+export const routes: RouteRecordRaw[] = [
+  {
+    path: '/',
+    name: 'quick-check',
+    component: QuickCheckView,
+    meta: { titleKey: 'quickCheck.title' },
+  },
+  {
+    path: '/:path(.*)*',
+    name: 'not-found',
+    component: () => import('@/views/NotFoundView.vue'),
+    meta: { titleKey: 'shell.notFound.title' },
+  },
+]
+
+export function createAppRouter(history = createWebHistory()) {
+  return createRouter({
+    history,
+    routes,
+    scrollBehavior: (_to, _from, saved) => saved ?? { top: 0 },
+  })
+}
