@@ -7,6 +7,7 @@ import {
   keptOutModules,
   type Manifest,
   type Modules,
+  namedByPage,
 } from './bundle/first-load'
 
 /** Script and style of `/`, gzipped; 1 kB is 1000 bytes. */
@@ -29,7 +30,8 @@ function kilobytes(bytes: number): string {
 function checkBundle(): boolean {
   const manifest = readJson<Manifest>('.vite/manifest.json')
   const modules = readJson<Modules>('.vite/modules.json')
-  const files = firstLoad(manifest, [PAGE, entryOf(VIEW, manifest, modules)])
+  const imported = firstLoad(manifest, [PAGE, entryOf(VIEW, manifest, modules)])
+  const files = [...new Set([...imported, ...namedByPage(readFileSync(inDist(PAGE), 'utf8'))])]
   const sizes = files.map((file) => ({ file, size: gzipSync(readFileSync(inDist(file))).length }))
   const sum = sizes.reduce((total, { size }) => total + size, 0)
   const keptOut = keptOutModules(modules, files)

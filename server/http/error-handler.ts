@@ -35,8 +35,10 @@ function toProblem(error: unknown): Problem {
   if (error instanceof InvalidJsonError) {
     return problem('invalid-json', `The body is not JSON: ${error.message}`)
   }
-  const code = codeOf(error) ?? codeOfStatus(error)
+  const code = codeOf(error)
   if (code && error instanceof Error) return problem(code, error.message)
+  const parserCode = codeOfStatus(error)
+  if (parserCode) return problem(parserCode, `${PROBLEMS[parserCode].meaning}.`)
   return problem('internal', 'Something went wrong on the server; the fault is in its log.')
 }
 
@@ -53,12 +55,11 @@ function codeOf(error: unknown): ProblemCode | undefined {
   return CODES.find(([type]) => error instanceof type)?.[1]
 }
 
-/** Errors that Express and its parsers throw carry a status; theirs below 500 are safe to show. */
+/** Errors that Express and its parsers throw carry a status; their words are not for readers. */
 function codeOfStatus(error: unknown): ProblemCode | undefined {
   const status = error instanceof Error && 'status' in error ? Number(error.status) : 500
   if (status === 413) return 'too-large'
   if (status === 415) return 'unsupported-media-type'
-  if (status === 404) return 'not-found'
   return status >= 400 && status < 500 ? 'bad-request' : undefined
 }
 

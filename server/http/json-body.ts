@@ -4,7 +4,7 @@ import { UnsupportedMediaTypeError } from './http-errors'
 
 const JSON_TYPES = ['application/json', 'application/*+json']
 
-/** 256 kB: some hundred cases, and far too little to keep the server busy. */
+/** 256 kB: more than the longest list that is answered needs. */
 const BODY_LIMIT = 256_000
 
 /** Takes the body in as text, so that the API reads JSON exactly as the batch command does. */

@@ -10,7 +10,10 @@ export const PROBLEMS: Readonly<Record<ProblemCode, { status: number; meaning: s
   'method-not-allowed': { status: 405, meaning: 'The address has no such method' },
   conflict: { status: 409, meaning: 'It contradicts what is already there' },
   'too-large': { status: 413, meaning: 'The body is larger than 256 kB' },
-  'unsupported-media-type': { status: 415, meaning: 'The body is not sent as JSON' },
+  'unsupported-media-type': {
+    status: 415,
+    meaning: 'The body is not sent as JSON in a known encoding',
+  },
   'out-of-range': { status: 422, meaning: 'A field lies outside its range' },
   internal: { status: 500, meaning: 'The server failed; the fault is in its log' },
   unavailable: { status: 503, meaning: 'The server cannot do its work at present' },

@@ -1,6 +1,8 @@
+import { existsSync } from 'node:fs'
 import { extname, join } from 'node:path'
 import express, { type RequestHandler, Router } from 'express'
 
+const PAGE = 'index.html'
 const ONE_YEAR = '1y'
 
 /** The built page: its hashed files for ever, everything else asked for anew each time. */
@@ -22,12 +24,14 @@ function pageOfAnyPlace(folder: string): RequestHandler {
       (req.method === 'GET' || req.method === 'HEAD') &&
       !/^\/api(\/|$)/.test(req.path) &&
       extname(req.path) === '' &&
-      req.accepts('html') === 'html'
+      req.accepts('html') === 'html' &&
+      existsSync(join(folder, PAGE))
     if (!isPlace) {
       next()
       return
     }
     res.set('Cache-Control', 'no-cache')
-    res.sendFile(join(folder, 'index.html'))
+    // With a root, a hidden folder above the project does not hide the page.
+    res.sendFile(PAGE, { root: folder })
   }
 }

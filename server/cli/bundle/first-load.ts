@@ -32,6 +32,14 @@ export function firstLoad(manifest: Manifest, entries: readonly string[]): strin
   return [...files]
 }
 
+/** Scripts and styles that the page itself names; a file of public/ is in no manifest. */
+export function namedByPage(html: string): string[] {
+  const tags = html.match(/<(?:script|link)\b[^>]*>/g) ?? []
+  return tags
+    .filter((tag) => tag.startsWith('<script') || /rel="stylesheet"/.test(tag))
+    .flatMap((tag) => /(?:src|href)="\/([^"]+)"/.exec(tag)?.[1] ?? [])
+}
+
 /** Entry of the manifest whose script holds the module, be it a chunk of its own or not. */
 export function entryOf(module: string, manifest: Manifest, modules: Modules): string {
   const entry = Object.keys(manifest).find((key) => modules[manifest[key]!.file]?.includes(module))
