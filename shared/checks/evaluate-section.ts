@@ -1,5 +1,5 @@
 import { groundSeepage } from '../calc/ground/ground-seepage'
-import { resultant } from '../calc/section/resultant'
+import { resultant, type Resultant } from '../calc/section/resultant'
 import type { SectionCase } from '../schemas/section-case'
 import {
   CHECK_IDS,
@@ -28,25 +28,13 @@ export function stabilityPairs(state: SectionState): StabilityPairs {
   return state.basis.format === 'partial' ? partialPairs(state) : globalPairs(state)
 }
 
-type StabilityResults = Pick<
-  SectionResult,
-  'sliding' | 'overturning' | 'flotation' | 'skirt' | 'fabric'
->
+type Checked = Pick<SectionResult, CheckId>
 
-function stabilityResults(state: SectionState, pairs: StabilityPairs): StabilityResults {
-  const { basis, isReversed, section } = state
-  const against = (pair: DemandAndResistance, required: number | null): CheckResult =>
-    isReversed ? notCovered(required) : compare(pair, required)
-  return {
-    sliding: against(pairs.sliding, basis.sliding),
-    overturning: against(pairs.overturning, basis.overturning),
-    flotation: compare(pairs.flotation, basis.flotation),
-    skirt: against(pairs.skirt, basis.sliding),
-    fabric:
-      section.barrier.fabricStrength === null
-        ? { factor: null, required: null, utilisation: null, verdict: 'notChecked' }
-        : compare(pairs.fabric, basis.fabric),
-  }
+const FABRIC_NOT_CHECKED: CheckResult = {
+  factor: null,
+  required: null,
+  utilisation: null,
+  verdict: 'notChecked',
 }
 
 const UNSUITABLE: CheckResult = {
@@ -56,7 +44,31 @@ const UNSUITABLE: CheckResult = {
   verdict: 'fails',
 }
 
-type Checked = Pick<SectionResult, CheckId>
+function checkResults(state: SectionState, pairs: StabilityPairs): Checked {
+  const { basis, isReversed, section } = state
+  const checks: Checked = {
+    sliding: against(isReversed, pairs.sliding, basis.sliding),
+    overturning: against(isReversed, pairs.overturning, basis.overturning),
+    flotation: compare(pairs.flotation, basis.flotation),
+    skirt: against(isReversed, pairs.skirt, basis.sliding),
+    freeboard: freeboardCheck(state),
+    fabric:
+      section.barrier.fabricStrength === null
+        ? FABRIC_NOT_CHECKED
+        : compare(pairs.fabric, basis.fabric),
+  }
+  if (!section.ground.suitable) checks.ground = UNSUITABLE
+  return checks
+}
+
+/** A thrust towards the water is not covered: then there is nothing to compare. */
+function against(
+  isReversed: boolean,
+  pair: DemandAndResistance,
+  required: number | null,
+): CheckResult {
+  return isReversed ? notCovered(required) : compare(pair, required)
+}
 
 /** The check that is used furthest; ties go to the earlier in the order of `CHECK_IDS`. */
 function governing(checks: Checked): CheckId {
@@ -85,55 +97,62 @@ function overallVerdict(checks: Checked): Verdict {
 }
 
 function shapeResult({ shape, grip }: SectionState): LoadedShapeResult {
-  return shape.solved ? { ...shape, skirtGrip: grip } : shape
+  if (!shape.solved) return shape
+  return {
+    solved: true,
+    crest: shape.crest,
+    contact: shape.contact,
+    skinTension: shape.skinTension,
+    skirtTension: shape.skirtTension,
+    weldHeight: shape.weldHeight,
+    freeSkirt: shape.freeSkirt,
+    skirtGrip: grip,
+  }
 }
 
-function seepageResult({ section, geometry }: SectionState): Pick<SectionResult, 'seepage'> {
+/** Seepage through the ground; null where permeability or layer are not known. */
+function seepageResult({ section, geometry }: SectionState): SectionResult['seepage'] | null {
   const { permeability, layerThickness } = section.ground
-  if (permeability === null || layerThickness === null) return {}
-  if (geometry.base === 0) return { seepage: { perMetre: null } }
+  if (permeability === null || layerThickness === null) return null
+  if (geometry.base === 0) return { perMetre: null }
   const head = Math.max(0, section.water.depth - section.water.dryDepth)
-  const perMetre = groundSeepage({
-    permeability,
-    head,
-    baseWidth: geometry.base,
-    layerThickness,
-  })
-  return { seepage: { perMetre } }
+  const baseWidth = geometry.base
+  return { perMetre: groundSeepage({ permeability, head, baseWidth, layerThickness }) }
 }
 
-function loadResults(state: SectionState) {
-  const { horizontal, vertical } = state
+function thrustResult({ horizontal }: SectionState): SectionResult['thrust'] {
   const { still, current, wave, debris, dry, total } = horizontal
   return {
-    thrust: {
-      still: still.force,
-      current: current.force,
-      wave: wave.force,
-      debris: debris.force,
-      dry: dry.force,
-      total: total.force,
-      arm: total.force === 0 ? null : total.moment / total.force,
-    },
-    vertical: {
-      waterOnSkirt: vertical.waterOnSkirt,
-      lift: vertical.lift,
-      dryLift: vertical.dryLift,
-      self: vertical.self,
-      uplift: vertical.uplift.force,
-      net: vertical.net,
-    },
+    still: still.force,
+    current: current.force,
+    wave: wave.force,
+    debris: debris.force,
+    dry: dry.force,
+    total: total.force,
+    arm: total.force === 0 ? null : total.moment / total.force,
   }
 }
 
-function momentResults({ vertical, horizontal, geometry }: SectionState) {
-  const { waterMoment, selfMoment, uplift, net } = vertical
-  const { moment } = horizontal.total
-  const against = moment + uplift.moment
+function verticalResult({ vertical }: SectionState): SectionResult['vertical'] {
   return {
-    overturningGross: against > 0 ? (waterMoment + selfMoment) / against : null,
-    resultant: resultant(waterMoment + selfMoment - uplift.moment - moment, net, geometry.base),
+    waterOnSkirt: vertical.waterOnSkirt,
+    lift: vertical.lift,
+    dryLift: vertical.dryLift,
+    self: vertical.self,
+    uplift: vertical.uplift.force,
+    net: vertical.net,
   }
+}
+
+/** Gross overturning ratio, as information: it stays near 1.5 under full uplift whatever the skirt. */
+function grossRatio({ vertical, horizontal }: SectionState): number | null {
+  const against = horizontal.total.moment + vertical.uplift.moment
+  return against > 0 ? (vertical.waterMoment + vertical.selfMoment) / against : null
+}
+
+function resultantOf({ vertical, horizontal, geometry }: SectionState): Resultant {
+  const holding = vertical.waterMoment + vertical.selfMoment - vertical.uplift.moment
+  return resultant(holding - horizontal.total.moment, vertical.net, geometry.base)
 }
 
 /**
@@ -145,21 +164,28 @@ function momentResults({ vertical, horizontal, geometry }: SectionState) {
 export function evaluateSection(section: SectionCase): SectionEvaluation {
   const state = sectionState(section)
   const pairs = stabilityPairs(state)
-  const checks: Checked = {
-    ...stabilityResults(state, pairs),
-    freeboard: freeboardCheck(state),
-    ...(section.ground.suitable ? {} : { ground: UNSUITABLE }),
-  }
-  return {
-    ...loadResults(state),
-    ...checks,
-    ...momentResults(state),
+  const checks = checkResults(state, pairs)
+  const seepage = seepageResult(state)
+  // Written out field by field: spreading would cost more than the engineering.
+  const evaluation: SectionEvaluation = {
+    thrust: thrustResult(state),
+    vertical: verticalResult(state),
+    sliding: checks.sliding,
+    overturning: checks.overturning,
+    flotation: checks.flotation,
+    skirt: checks.skirt,
+    fabric: checks.fabric,
+    freeboard: checks.freeboard,
+    overturningGross: grossRatio(state),
+    resultant: resultantOf(state),
     loadedShape: shapeResult(state),
     anchoringMassPerSection:
       (section.barrier.sectionLength * state.vertical.waterOnSkirt) / section.gravity,
-    ...seepageResult(state),
     verdict: overallVerdict(checks),
     governs: governing(checks),
     workings: pairs,
   }
+  if (checks.ground) evaluation.ground = checks.ground
+  if (seepage) evaluation.seepage = seepage
+  return evaluation
 }

@@ -13,9 +13,11 @@ interface Combination {
 const COMBINATION_1: Combination = { permanent: 1.35, variable: 1.5, friction: 1 }
 const COMBINATION_2: Combination = { permanent: 1, variable: 1.3, friction: 1.25 }
 
-/** EN 1997-1:2004, tables A.1 (EQU) and A.15 (UPL). */
+/** Loss of equilibrium. EN 1997-1:2004, table A.1. */
 const EQU = { permanent: 1.1, variable: 1.5, favourable: 0.9 }
-const UPL = { unfavourable: 1, favourable: 0.9 }
+
+/** Uplift by water pressure. EN 1997-1:2004, table A.15. */
+export const UPL = { unfavourable: 1, favourable: 0.9 }
 
 /** Partial factor on the strength of coated fabric. Common practice. */
 const FABRIC_FACTOR = 3

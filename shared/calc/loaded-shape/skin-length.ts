@@ -37,7 +37,7 @@ function wetSkin({ depth, kappa }: Membrane, radius: number, weldHeight: number)
 }
 
 /** ∫ (1 + cos β)/sin β dy along the wet skin [m]: its length plus its run towards the dry side. */
-function wetLengthPlusRun(membrane: Membrane, radius: number, weldHeight: number): number {
+export function wetLengthPlusRun(membrane: Membrane, radius: number, weldHeight: number): number {
   const { depth, kappa } = membrane
   const { epsilon, lead, from, span } = wetSkin(membrane, radius, weldHeight)
   let sum = 0

@@ -41,7 +41,12 @@ export function horizontalLoads(section: SectionCase, crest: number): Horizontal
     unitWeight,
     gravity,
   })
-  const driven = debrisThrust({ ...debris, sectionLength: barrier.sectionLength, depth })
+  const driven = debrisThrust({
+    force: debris.force,
+    draught: debris.draught,
+    sectionLength: barrier.sectionLength,
+    depth,
+  })
   const total = {
     force: still.force + current.force + wave.force + driven.force - dry.force,
     moment: still.moment + current.moment + wave.moment + driven.moment - dry.moment,

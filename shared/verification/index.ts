@@ -1,0 +1,20 @@
+import type { CheckRow, ReferenceRow } from './check-row'
+import { HYDROSTATICS_ROWS } from './hydrostatics'
+import { LOADED_TUBE_REFERENCES, LOADED_TUBE_ROWS } from './loaded-tube'
+import { MOVING_WATER_REFERENCES, MOVING_WATER_ROWS } from './moving-water'
+import { STABILITY_REFERENCES, STABILITY_ROWS } from './stability'
+
+/** Every check value that the product computes; tests and the Method page read this one list. */
+export const CHECK_ROWS: readonly CheckRow[] = [
+  ...HYDROSTATICS_ROWS,
+  ...STABILITY_ROWS,
+  ...MOVING_WATER_ROWS,
+  ...LOADED_TUBE_ROWS,
+]
+
+/** Values that stand for reference only and are not counted. */
+export const REFERENCE_ROWS: readonly ReferenceRow[] = [
+  ...STABILITY_REFERENCES,
+  ...MOVING_WATER_REFERENCES,
+  ...LOADED_TUBE_REFERENCES,
+]
