@@ -1,0 +1,68 @@
+import { describe, expect, it } from 'vitest'
+import { EnvironmentError, readEnv } from '../../server/env'
+import { SECRET } from '../support/server-app'
+
+const production = {
+  NODE_ENV: 'production',
+  APP_URL: 'https://toehold.example',
+  SESSION_SECRET: SECRET,
+}
+
+describe('the environment', () => {
+  it('needs nothing for a demonstration', () => {
+    expect(readEnv({})).toEqual({
+      mode: 'demonstration',
+      port: 3000,
+      host: undefined,
+      databaseFile: 'data/toehold.sqlite',
+      logLevel: 'warn',
+      appUrl: 'http://localhost:3000',
+      sessionSecret: undefined,
+    })
+  })
+
+  it('takes an empty variable for an absent one', () => {
+    expect(readEnv({ PORT: '', LOG_LEVEL: '', APP_URL: '', SESSION_SECRET: '' })).toEqual(
+      readEnv({}),
+    )
+  })
+
+  it('starts production with an address and a secret', () => {
+    const env = readEnv({ ...production, PORT: '8080' })
+    expect(env).toMatchObject({ mode: 'production', port: 8080, logLevel: 'info' })
+  })
+
+  it.each([
+    ['without an address', { APP_URL: '' }, /^APP_URL: production needs the address/],
+    ['without a secret', { SESSION_SECRET: '' }, /^SESSION_SECRET: production needs a secret/],
+    ['with a secret of 31 characters', { SESSION_SECRET: 'x'.repeat(31) }, /32 characters or more/],
+  ])('refuses production %s', (_what, change, message) => {
+    expect(() => readEnv({ ...production, ...change })).toThrow(EnvironmentError)
+    expect(() => readEnv({ ...production, ...change })).toThrow(message)
+  })
+
+  it('accepts a secret of exactly 32 characters', () => {
+    expect(readEnv({ ...production, SESSION_SECRET: 'x'.repeat(32) }).mode).toBe('production')
+  })
+
+  it('names both variables when both are missing', () => {
+    const refusal = () => readEnv({ NODE_ENV: 'production' })
+    expect(refusal).toThrow(/APP_URL[^]*\n[^]*SESSION_SECRET/)
+  })
+
+  it.each([
+    ['PORT', '65536', 'PORT: "65536" is not allowed; it must be a whole number from 0 to 65535'],
+    ['PORT', '3000x', 'PORT: "3000x" is not allowed; it must be a whole number from 0 to 65535'],
+    ['PORT', '-1', 'PORT: "-1" is not allowed; it must be a whole number from 0 to 65535'],
+    [
+      'APP_URL',
+      'toehold',
+      'APP_URL: "toehold" is not allowed; it must be an http or https address',
+    ],
+    ['APP_URL', 'ftp://a.example', 'APP_URL: "ftp://a.example" is not allowed'],
+    ['LOG_LEVEL', 'loud', 'LOG_LEVEL: "loud" is not allowed; it must be one of trace, debug'],
+    ['NODE_ENV', 'staging', 'NODE_ENV: "staging" is not allowed; it must be one of development'],
+  ])('refuses %s=%s and says what is allowed', (name, value, message) => {
+    expect(() => readEnv({ [name]: value })).toThrow(message)
+  })
+})

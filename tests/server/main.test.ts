@@ -1,0 +1,76 @@
+import { mkdtempSync, rmSync } from 'node:fs'
+import { createServer, type AddressInfo } from 'node:net'
+import { tmpdir } from 'node:os'
+import { join } from 'node:path'
+import { describe, expect, it, onTestFinished } from 'vitest'
+import { healthSchema } from '../../shared/schemas/health'
+import { SECRET } from '../support/server-app'
+import { startNode, startServerFile } from '../support/server-process'
+
+function temporaryDatabase(): string {
+  const folder = mkdtempSync(join(tmpdir(), 'toehold-main-'))
+  onTestFinished(() => {
+    rmSync(folder, { recursive: true })
+  })
+  return join(folder, 'toehold.sqlite')
+}
+
+function start(environment: Record<string, string> = {}) {
+  const defaults = { PORT: '0', HOST: '127.0.0.1', DATABASE_FILE: temporaryDatabase() }
+  return startServerFile('server/main.ts', [], { environment: { ...defaults, ...environment } })
+}
+
+/** A port that something else listens on until the test ends. */
+async function takenPort(): Promise<number> {
+  const other = createServer()
+  await new Promise<void>((resolve) => other.listen(0, resolve))
+  onTestFinished(() => void other.close())
+  return (other.address() as AddressInfo).port
+}
+
+describe('the server', { timeout: 30_000 }, () => {
+  it('prints its address once, answers there, and stops when it is told to', async () => {
+    const { child, ended, firstLine } = start()
+    const line = await firstLine
+    const address = /^Toehold \(demonstration\) is at (http:\/\/localhost:\d+)$/.exec(line)?.[1]
+    const answer = await fetch(`${address!.replace('localhost', '127.0.0.1')}/api/health`)
+    expect(healthSchema.parse(await answer.json()).mode).toBe('demonstration')
+    child.kill('SIGTERM')
+    const { status, stdout, stderr } = await ended
+    expect({ status, stdout, stderr }).toEqual({ status: 0, stdout: `${line}\n`, stderr: '' })
+  })
+
+  it('starts production with an address and a secret', async () => {
+    const { firstLine } = start({
+      NODE_ENV: 'production',
+      APP_URL: 'https://toehold.example',
+      SESSION_SECRET: SECRET,
+    })
+    expect(await firstLine).toMatch(/^Toehold \(production\) is at https:\/\/toehold\.example/)
+  })
+
+  it('refuses production without them, and names both', async () => {
+    const { status, stdout, stderr } = await start({ NODE_ENV: 'production' }).ended
+    expect({ status, stdout }).toEqual({ status: 1, stdout: '' })
+    expect(stderr).toMatch(/^APP_URL: /m)
+    expect(stderr).toMatch(/^SESSION_SECRET: /m)
+    expect(stderr).not.toContain('    at ')
+  })
+
+  it('says that its port is taken', async () => {
+    const port = String(await takenPort())
+    const { status, stderr } = await start({ PORT: port, HOST: '' }).ended
+    expect(status).toBe(1)
+    expect(stderr).toContain(`PORT: ${port} is in use`)
+  })
+})
+
+describe('npm start', () => {
+  it('says that the port is taken before it does anything else', async () => {
+    const PORT = String(await takenPort())
+    const { ended } = startNode(['server/cli/start.mjs'], { environment: { PORT } })
+    const { status, stdout, stderr } = await ended
+    expect({ status, stdout }).toEqual({ status: 1, stdout: '' })
+    expect(stderr).toContain(`PORT: ${PORT} is in use`)
+  })
+})
