@@ -19,13 +19,6 @@ function quarter(radius: number): number {
   return tubeOverhang(2 * radius, 0, radius).area
 }
 
-const figure = (
-  label: string,
-  printed: string,
-  unit: string,
-  compute: () => number,
-): CheckFigure => ({ label, printed, unit, compute })
-
 const BANSAL = 'Bansal, A Textbook of Fluid Mechanics, ch. 3'
 
 /** Vertical force under the quarter cylinder of Cengel & Cimbala [kN/m]. */

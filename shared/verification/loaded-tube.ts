@@ -5,13 +5,6 @@ import { figure, type CheckRow, type ReferenceRow } from './check-row'
 
 const UNIT_WEIGHT = 9810
 
-const figure = (
-  label: string,
-  printed: string,
-  unit: string,
-  compute: () => number,
-): CheckFigure => ({ label, printed, unit, compute })
-
 /** A standing shape with a skirt of three diameters; a check value that does not stand is a mistake. */
 function standing(diameter: number, airPressure: number, depth: number): StandingShape {
   const shape = loadedShape({

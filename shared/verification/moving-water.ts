@@ -2,13 +2,6 @@ import { stillWaterThrust } from '../calc/hydrostatics/still-water-thrust'
 import { dragCoefficientOf, dynamicDepth } from '../calc/moving-water/current-thrust'
 import { figure, type CheckRow, type ReferenceRow } from './check-row'
 
-const figure = (
-  label: string,
-  printed: string,
-  unit: string,
-  compute: () => number,
-): CheckFigure => ({ label, printed, unit, compute })
-
 /** Ratio of length to depth, and the printed coefficient up to it. */
 const DRAG_ROWS = [
   [12, '1.25'],

@@ -83,13 +83,6 @@ const sliding = (section: SectionCase): number => evaluateSection(section).slidi
 
 const anchoring = (section: SectionCase): number => evaluateSection(section).anchoringMassPerSection
 
-const figure = (
-  label: string,
-  printed: string,
-  unit: string,
-  compute: () => number,
-): CheckFigure => ({ label, printed, unit, compute })
-
 const IRRIGATION = 'irrigation-engineering worked examples, archive FOSSEE, book 2087'
 
 export const STABILITY_ROWS: readonly CheckRow[] = [
