@@ -24,9 +24,24 @@ function recordModules(): Plugin {
   }
 }
 
+/** Parts of vue-i18n that are not used: options API, global components, message compiler. */
+const WITHOUT_I18N_EXTRAS = {
+  __VUE_I18N_LEGACY_API__: false,
+  __VUE_I18N_FULL_INSTALL__: false,
+  __INTLIFY_DROP_MESSAGE_COMPILER__: true,
+  __INTLIFY_PROD_DEVTOOLS__: false,
+}
+
 export default defineConfig({
   plugins: [vue(), elementPlus({}), recordModules()],
-  resolve: { alias: { '@shared': folder('./shared'), '@': folder('./src') } },
+  resolve: {
+    alias: {
+      '@shared': folder('./shared'),
+      '@': folder('./src'),
+      'vue-i18n': 'vue-i18n/dist/vue-i18n.runtime.mjs',
+    },
+  },
+  define: WITHOUT_I18N_EXTRAS,
   server: { proxy: { '/api': `http://localhost:${process.env.API_PORT ?? 3001}` } },
   // check-bundle reads manifest and modules to learn what the first page loads.
   build: { manifest: true },

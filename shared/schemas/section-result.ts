@@ -1,20 +1,7 @@
 import { z } from 'zod'
+import { CHECK_IDS, type CheckId, type Verdict, VERDICTS } from './check-ids'
 
-/** Verdicts from best to worst; `notChecked` counts nowhere. */
-export const VERDICTS = ['holds', 'narrow', 'fails', 'notChecked'] as const
-export type Verdict = (typeof VERDICTS)[number]
-
-/** Checks in the order that breaks a tie. */
-export const CHECK_IDS = [
-  'sliding',
-  'overturning',
-  'flotation',
-  'skirt',
-  'freeboard',
-  'fabric',
-  'ground',
-] as const
-export type CheckId = (typeof CHECK_IDS)[number]
+export { CHECK_IDS, type CheckId, type Verdict, VERDICTS }
 
 const nullableNumber = z.number().nullable()
 
