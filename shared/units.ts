@@ -92,6 +92,11 @@ const DISPLAY_UNITS = {
     metric: { label: 'l/h per m', factor: 1e-3 / 3600, decimals: 1 },
     us: { label: 'gpm per ft', factor: GALLON / 60 / FOOT, decimals: 3 },
   },
+  /** Flow, shown by the minute. */
+  flow: {
+    metric: { label: 'l/min', factor: 1e-3 / 60, decimals: 2 },
+    us: { label: 'gpm', factor: GALLON / 60, decimals: 2 },
+  },
   permeability: {
     metric: { label: 'm/s', factor: 1, decimals: 7 },
     us: { label: 'ft/s', factor: FOOT, decimals: 7 },

@@ -73,7 +73,6 @@ export const quickCheckTexts = {
     seepage: 'Through the ground',
     perSection: 'per section of {length}',
     noSeepage: 'Enter permeability and layer under Ground to see what seeps through.',
-    margin: 'Leave {margin} below what it stands.',
   },
 
   verdict: {
@@ -144,6 +143,7 @@ export const quickCheckTexts = {
     question: '“But it says {stated} on the bag”',
     answer: 'It defends {depth} of water.',
     answerNone: 'With these figures no water can be relied on.',
+    rest: 'Of the rest, {parts}.',
     sag: 'the loaded crest sags {sag}',
     freeboard: '{freeboard} are freeboard',
     moving: '{allowance} are for waves and current',
@@ -154,7 +154,6 @@ export const quickCheckTexts = {
       skirt: 'above that it rolls up its skirt, {spare} earlier',
       fabric: 'above that its fabric is strained, {spare} earlier',
     },
-    label: 'Where the stated height goes',
   },
 
   chart: {
@@ -170,15 +169,12 @@ export const quickCheckTexts = {
       weighed: 'weighed, 50 %',
       sealed: 'sealed, 0 %',
       typed: '{share} open',
-      none: 'no water under it',
     },
     slippery: 'slippery, {friction}',
     friction: '{friction}',
     tube: 'tube {diameter}',
     chosen: 'chosen',
     nothing: 'none',
-    extremes:
-      'Open edge and sealed seat on the dry side: the full pressure stays under the whole skirt, and nothing can be relied on.',
     judgement: 'Weighed and sealed edges, and the slippery surface, are judgement, unverified.',
     noSkirt: 'Without a skirt none of this changes the answer: put the skirt on first.',
   },
@@ -247,7 +243,7 @@ export const quickCheckTexts = {
     range: '{field}: {typed} is not allowed. Allowed: {allowed}.',
     neededWithWaves: '{field}: nothing entered. Needed with waves: {allowed}.',
     neededWhileDeveloping: '{field}: nothing entered. Needed while the uplift grows: {allowed}.',
-    case: '{message}',
+    neededWithPermeability: '{field}: nothing entered. Needed with a permeability: {allowed}.',
     millimetres: 'Were millimetres typed? {typed} mm are {metres} m.',
     between: '{min} to {max}',
     aboveTo: 'above {min}, up to {max}',

@@ -19,7 +19,7 @@ import {
   type DraftFields,
 } from '@/quick-check/draft-fields'
 import { fieldFaults, type FormInput } from '@/quick-check/field-faults'
-import { readTyped, shownText } from '@/quick-check/field-text'
+import { readTyped, shownText, stepped } from '@/quick-check/field-text'
 import { FIELD_IDS, FIELDS, type FieldId } from '@/quick-check/fields'
 import { TUBE_FIELDS } from '@/quick-check/tube'
 
@@ -89,6 +89,12 @@ function draftActions(fields: DraftFields, choices: Ref<Choices>, context: Draft
       fields[id].value = { typed: null, value }
   }
 
+  /** Arrow keys in a field: one digit of what is shown; an unreadable entry stays as it is. */
+  function step(id: FieldId, direction: 1 | -1): void {
+    const next = stepped(fields[id].value, direction, FIELDS[id].kind, units.value)
+    if (next !== null) type(id, next)
+  }
+
   function setDepth(depth: number): void {
     setValues(changeForDepth(valid.value, depth))
   }
@@ -120,7 +126,7 @@ function draftActions(fields: DraftFields, choices: Ref<Choices>, context: Draft
     for (const id of FIELD_IDS) fields[id].value = startState(values[id], refused[id])
   }
 
-  return { type, setValues, setDepth, choose, takeTube, load }
+  return { type, step, setValues, setDepth, choose, takeTube, load }
 }
 
 /** In other units a typed figure would mean something else: it is shown converted. A text stays as it is. */

@@ -4,7 +4,13 @@ import { gaugeOffset, tidy, type CaseInput, type FieldValues } from './case-inpu
 import { FIELD_IDS, fieldOf, type FieldId } from './fields'
 
 /** Why a field is refused. */
-export type FaultReason = 'empty' | 'text' | 'range' | 'neededWithWaves' | 'neededWhileDeveloping'
+export type FaultReason =
+  | 'empty'
+  | 'text'
+  | 'range'
+  | 'neededWithWaves'
+  | 'neededWhileDeveloping'
+  | 'neededWithPermeability'
 
 /** A refused field with what it may hold, in SI. */
 export interface FieldFault {
@@ -62,6 +68,8 @@ function depthRangeFrom(input: FormInput, offset: number): AllowedRange | null {
 }
 
 function neededReason(id: FieldId, { values, choices }: FormInput): FaultReason | null {
+  if (id === 'layerThickness' && typeof values.permeability === 'number')
+    return 'neededWithPermeability'
   if (id === 'wavePeriod' && (values.waveHeight ?? 0) > 0) return 'neededWithWaves'
   if ((id === 'diffusivity' || id === 'upliftTime') && choices.upliftModel === 'developing')
     return 'neededWhileDeveloping'

@@ -59,3 +59,19 @@ export function shownBounds(range: AllowedRange, kind: QuantityKind, system: Uni
     max: inward(range.max, Math.floor, 1e-9),
   }
 }
+
+/** The text one step up or down: one hundredth for most, in the last digit that is shown for coarser figures; none for the tiny ones. */
+export function stepped(
+  state: FieldState,
+  direction: 1 | -1,
+  kind: QuantityKind,
+  system: UnitSystem,
+): string | null {
+  if (typeof state.value !== 'number' || !Number.isFinite(state.value)) return null
+  const decimals = Math.min(displayDecimals(kind, system), 2)
+  const now = toDisplay(state.value, kind, system)
+  const step = 10 ** -decimals
+  if (now !== 0 && Math.abs(now) < step) return null
+  const shown = now + direction * step
+  return String(Number(shown.toFixed(Math.max(decimals, 4))))
+}

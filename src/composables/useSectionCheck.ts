@@ -1,0 +1,82 @@
+import { computed, type Ref } from 'vue'
+import { evaluateSection, type SectionEvaluation } from '@shared/checks/evaluate-section'
+import { holdingProfile, holdsToAt } from '@shared/checks/holds-to'
+import { justEnough } from '@shared/checks/just-enough'
+import { leaveLevel } from '@shared/checks/leave-level'
+import { whatDecides } from '@shared/checks/what-decides'
+import type { SectionCase } from '@shared/schemas/section-case'
+import type { HoldsTo } from '@shared/schemas/section-result'
+import {
+  depthNow,
+  groundLevel,
+  sectionCase,
+  waterLevel,
+  type CaseInput,
+} from '@/quick-check/case-input'
+import { isSameButDepth } from '@/quick-check/same-section'
+import { statedHeight } from '@/quick-check/stated-height'
+import { nextTube } from '@/quick-check/tube'
+import { waterMarks } from '@/quick-check/water-marks'
+import { useDeferred } from './useDeferred'
+
+/**
+ * The answers for one valid input. What follows the water is computed for every change; what does
+ * not depend on it is kept while only the water moves, and deferred when anything else changes.
+ */
+export function useSectionCheck(input: Ref<CaseInput>) {
+  const section = computed(() => sectionCase(input.value))
+  const evaluation = computed<SectionEvaluation>(() => evaluateSection(section.value))
+  const still = computed<SectionCase>((last) =>
+    last && isSameButDepth(last, section.value) ? last : section.value,
+  )
+
+  const profile = useDeferred(() => still.value, holdingProfile, holdingProfile(still.value))
+  const decides = useDeferred(
+    () => still.value,
+    (of) => whatDecides(of, nextTube(of.barrier.diameter)),
+    null,
+  )
+  const enough = useDeferred(() => section.value, justEnough, null)
+
+  const holdsTo = computed<HoldsTo>((last) => {
+    const next = holdsToAt(profile.result.value, section.value.water.depth)
+    const isSame = last?.depth === next.depth && last.from === next.from
+    return isSame && last.check === next.check ? last : next
+  })
+  const leave = computed(() =>
+    leaveLevel({
+      holdsToDepth: holdsTo.value.depth,
+      depth: section.value.water.depth,
+      depthNow: depthNow(input.value),
+      rateOfRise: input.value.values.rateOfRise,
+      timeToClear: input.value.values.clearTime ?? 0,
+    }),
+  )
+  const stated = computed(() =>
+    statedHeight(input.value.values.statedHeight, still.value, holdsTo.value),
+  )
+  const water = computed(() => ({
+    depth: section.value.water.depth,
+    level: waterLevel(input.value),
+    ground: groundLevel(input.value),
+  }))
+  const marks = computed(() => waterMarks(section.value, input.value.values.uncertainty ?? 0))
+
+  return {
+    section,
+    still,
+    evaluation,
+    water,
+    marks,
+    holdsTo,
+    leave,
+    stated,
+    isUpdating: profile.isPending,
+    decides: decides.result,
+    isDeciding: decides.isPending,
+    enough: enough.result,
+    isSkirtless: computed(() => section.value.barrier.skirtLength === 0),
+  }
+}
+
+export type SectionCheck = ReturnType<typeof useSectionCheck>
