@@ -49,6 +49,7 @@ export default defineConfig({
     include: ['tests/**/*.test.ts'],
     exclude: ['tests/e2e/**'],
     environment: 'node',
+    setupFiles: ['tests/support/fixed-seed.ts'],
     server: { deps: { inline: ['element-plus'] } },
   },
 })

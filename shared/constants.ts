@@ -15,3 +15,6 @@ export const WIND_AIR_DENSITY = 1.25
 
 /** Force coefficient of a rough cylinder lying on the ground [–]. Common practice, after the form of EN 1991-1-4, 7.9. */
 export const WIND_FORCE_COEFFICIENT = 1.2
+
+/** Water or waves lower than this are not there [m]: a few atoms, and the edge of what doubles carry. */
+export const FILM = 1e-9

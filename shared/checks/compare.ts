@@ -28,7 +28,7 @@ export function compare(
   { demand, resistance }: DemandAndResistance,
   required: number | null,
 ): CheckResult {
-  const factor = demand > 0 ? resistance / demand : null
+  const factor = demand > 0 ? finiteOrNull(resistance / demand) : null
   if (required === null) return { factor, required, utilisation: null, verdict: 'notChecked' }
   const utilisation = utilisationOf(demand, resistance, required)
   return { factor, required, utilisation, verdict: verdictOf(utilisation) }
@@ -36,7 +36,12 @@ export function compare(
 
 function utilisationOf(demand: number, resistance: number, required: number): number | null {
   if (resistance < 0 || (resistance === 0 && demand > 0)) return null
-  return demand <= 0 ? 0 : (required * demand) / resistance
+  return demand <= 0 ? 0 : finiteOrNull((required * demand) / resistance)
+}
+
+/** A ratio too large for a number means that one side is as good as not there. */
+export function finiteOrNull(ratio: number): number | null {
+  return Number.isFinite(ratio) ? ratio : null
 }
 
 /** A check that the method does not cover for this case: it fails, and no figure is given. */

@@ -1,15 +1,9 @@
 import { groundSeepage } from '../calc/ground/ground-seepage'
 import { resultant, type Resultant } from '../calc/section/resultant'
 import type { SectionCase } from '../schemas/section-case'
-import {
-  CHECK_IDS,
-  type CheckId,
-  type CheckResult,
-  type LoadedShapeResult,
-  type SectionResult,
-  type Verdict,
-} from '../schemas/section-result'
-import { compare, isWorse, notCovered, type DemandAndResistance } from './compare'
+import { CHECK_IDS, type CheckId, type Verdict } from '../schemas/check-ids'
+import type { CheckResult, LoadedShapeResult, SectionResult } from '../schemas/section-result'
+import { compare, finiteOrNull, isWorse, notCovered, type DemandAndResistance } from './compare'
 import { freeboardCheck } from './freeboard-check'
 import { globalPairs, type StabilityPairs } from './global-checks'
 import { partialPairs } from './partial-checks'
@@ -147,7 +141,7 @@ function verticalResult({ vertical }: SectionState): SectionResult['vertical'] {
 /** Gross overturning ratio, as information: it stays near 1.5 under full uplift whatever the skirt. */
 function grossRatio({ vertical, horizontal }: SectionState): number | null {
   const against = horizontal.total.moment + vertical.uplift.moment
-  return against > 0 ? (vertical.waterMoment + vertical.selfMoment) / against : null
+  return against > 0 ? finiteOrNull((vertical.waterMoment + vertical.selfMoment) / against) : null
 }
 
 function resultantOf({ vertical, horizontal, geometry }: SectionState): Resultant {

@@ -30,8 +30,9 @@ const NEEDED_WITH = [
   isAsked: (section: SectionCase) => boolean
 }[]
 
-/** The value at a path of a case. */
+/** The value at a path of a case; the empty path is the case itself. */
 export function valueAt(section: object, path: string): unknown {
+  if (path === '') return section
   return path
     .split('.')
     .reduce<unknown>((node, key) => (node as Record<string, unknown> | undefined)?.[key], section)

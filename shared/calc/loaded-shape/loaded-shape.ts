@@ -1,3 +1,4 @@
+import { FILM } from '../../constants'
 import { findRoot } from '../numerics/find-root'
 import { freeSkirt } from './free-skirt'
 import { contactWidthOf, lengthResidual } from './skin-length'
@@ -70,7 +71,7 @@ const CONTACT_NOISE = 1e-12
 export function loadedShape(input: LoadedShapeInput): LoadedShape {
   const { diameter, airPressure, wettedSkirt, depth, unitWeight } = input
   if (wettedSkirt === 0 && depth > 0) return { solved: false, reason: 'no-skirt' }
-  if (depth === 0) return unloaded(diameter, airPressure)
+  if (depth < FILM) return unloaded(diameter, airPressure)
   if (depth >= diameter) return { solved: false, reason: 'overtopped' }
 
   const membrane: Membrane = {

@@ -1,3 +1,4 @@
+import { FILM } from '../../constants'
 import type { HorizontalLoad } from '../hydrostatics/still-water-thrust'
 import { waveNumber } from './wave-number'
 
@@ -65,9 +66,9 @@ export function depthLimitedHeight(height: number, depth: number, factor: number
  */
 export function waveThrust(waves: WaveAttack): WaveThrust {
   const { height, period, depth: h, crest, unitWeight, gravity } = waves
-  if (height === 0 || h === 0) return NO_WAVES
-
   const designHeight = depthLimitedHeight(height, h, 1.8)
+  if (designHeight < FILM) return NO_WAVES
+
   const kh = waveNumber(period, h, gravity) * h
   const alpha1 = 0.6 + 0.5 * (2 * kh < 700 ? (2 * kh) / Math.sinh(2 * kh) : 0) ** 2
   const p1 = alpha1 * unitWeight * designHeight

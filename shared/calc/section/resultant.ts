@@ -13,6 +13,7 @@ export interface Resultant {
 export function resultant(moment: number, net: number, base: number): Resultant {
   if (net <= 0 || base === 0) return { x: null, share: null }
   const x = moment / net
+  if (!Number.isFinite(x)) return { x: null, share: null }
   const share = Math.max(0, Math.min(1, (3 * Math.min(x, base - x)) / base))
   return { x, share }
 }

@@ -1,0 +1,46 @@
+import fc from 'fast-check'
+import { describe, expect, it } from 'vitest'
+import { findRoot } from '../../../shared/calc/numerics/find-root'
+import { gaussLegendre } from '../../../shared/calc/numerics/gauss-legendre'
+import { expectClose } from '../../support/close-to'
+
+describe('findRoot', () => {
+  const solve = (f: (x: number) => number, low: number, high: number): number =>
+    findRoot(f, { low, high, atLow: f(low), atHigh: f(high) })
+
+  it.each([
+    ['cos x − x', (x: number) => Math.cos(x) - x, 0, 1, 0.7390851332151607],
+    ['x³ − 2', (x: number) => x ** 3 - 2, 0, 2, Math.cbrt(2)],
+    ['a steep step', (x: number) => Math.atan(1e6 * (x - 0.3)), 0, 1, 0.3],
+    ['a flat triple root', (x: number) => (x - 0.4) ** 3, 0, 1, 0.4],
+    ['a falling line', (x: number) => 1 - 4 * x, 0, 1, 0.25],
+  ])('finds the root of %s', (_name, f, low, high, root) => {
+    expectClose(solve(f, low, high), root, 1e-5)
+    expect(Math.abs(f(solve(f, low, high)))).toBeLessThan(1e-9)
+  })
+
+  it('stays inside the bracket and ends, even at a jump', () => {
+    fc.assert(
+      fc.property(fc.double({ min: 0.001, max: 0.999, noNaN: true }), (jump) => {
+        const root = solve((x) => (x < jump ? -1 : 1), 0, 1)
+        expectClose(root, jump, 1e-12)
+      }),
+    )
+  })
+})
+
+describe('gaussLegendre', () => {
+  it('integrates polynomials up to degree 2n − 1 exactly', () => {
+    for (const points of [3, 8, 24]) {
+      const rule = gaussLegendre(points)
+      expectClose(
+        rule.reduce((sum, { weight }) => sum + weight, 0),
+        1,
+        1e-14,
+      )
+      const degree = 2 * points - 1
+      const integral = rule.reduce((sum, { at, weight }) => sum + weight * at ** degree, 0)
+      expectClose(integral, 1 / (degree + 1), 1e-13)
+    }
+  })
+})

@@ -1,0 +1,109 @@
+import { describe, expect, it } from 'vitest'
+import { BARRIERS } from '../../../shared/catalogue/barriers'
+import { compare, verdictOf } from '../../../shared/checks/compare'
+import { evaluateSection } from '../../../shared/checks/evaluate-section'
+import { holdingProfile, holdsToAt } from '../../../shared/checks/holds-to'
+import { leaveLevel } from '../../../shared/checks/leave-level'
+import { whatDecides } from '../../../shared/checks/what-decides'
+import { formatNumber } from '../../../shared/units'
+import { exampleSection } from '../../../shared/verification/example-section'
+
+describe('comparison of demand and resistance', () => {
+  it.each([
+    [{ demand: 10, resistance: 20 }, 1.5, { factor: 2, utilisation: 0.75, verdict: 'holds' }],
+    [{ demand: 10, resistance: 16 }, 1.5, { factor: 1.6, utilisation: 0.9375, verdict: 'narrow' }],
+    [{ demand: 10, resistance: 10 }, 1.5, { factor: 1, utilisation: 1.5, verdict: 'fails' }],
+    [{ demand: 10, resistance: -5 }, 1.5, { factor: -0.5, utilisation: null, verdict: 'fails' }],
+    [{ demand: 10, resistance: 0 }, 1.5, { factor: 0, utilisation: null, verdict: 'fails' }],
+    [{ demand: 0, resistance: 0 }, 1.5, { factor: null, utilisation: 0, verdict: 'holds' }],
+    [{ demand: -3, resistance: 5 }, 1.5, { factor: null, utilisation: 0, verdict: 'holds' }],
+    [{ demand: -3, resistance: -5 }, 1.5, { factor: null, utilisation: null, verdict: 'fails' }],
+    [{ demand: 10, resistance: 20 }, null, { factor: 2, utilisation: null, verdict: 'notChecked' }],
+  ] as const)('%o, required %s', (pair, required, expected) => {
+    expect(compare(pair, required)).toEqual({ ...expected, required })
+  })
+
+  it('is narrow above 90 % and up to 100 %', () => {
+    expect([0.9, 0.9000001, 1, 1.0000001].map(verdictOf)).toEqual([
+      'holds',
+      'narrow',
+      'narrow',
+      'fails',
+    ])
+  })
+})
+
+describe('leave level', () => {
+  const known = { holdsToDepth: 0.49, depth: 0.42, rateOfRise: null, timeToClear: 1200 }
+
+  it('lies at least 0.05 m below what holds', () => {
+    expect(leaveLevel(known)).toEqual({ depth: 0.44, margin: 0.05, state: 'leave-at' })
+    const slow = leaveLevel({ ...known, rateOfRise: 0.13 / 3600 })
+    expect(slow.margin).toBe(0.05)
+  })
+
+  it('lies lower where the water rises fast', () => {
+    const { depth, margin } = leaveLevel({ ...known, rateOfRise: 0.3 / 3600 })
+    expect(margin).toBeCloseTo(0.1, 12)
+    expect(depth).toBeCloseTo(0.39, 12)
+  })
+
+  it('says when the level checked holds but must be left before it', () => {
+    expect(leaveLevel({ ...known, depth: 0.46 }).state).toBe('leave-before-level')
+    expect(leaveLevel({ ...known, depth: 0.55 }).state).toBe('leave-at')
+  })
+
+  it('says leave now once the water stands above it', () => {
+    expect(leaveLevel({ ...known, depthNow: 0.45 }).state).toBe('leave-now')
+    expect(leaveLevel({ ...known, depthNow: 0.4 }).state).toBe('leave-at')
+  })
+
+  it('has no leave level where nothing holds, and none below the ground', () => {
+    expect(leaveLevel({ ...known, holdsToDepth: 0 })).toMatchObject({ depth: null, state: 'none' })
+    expect(leaveLevel({ ...known, holdsToDepth: 0.03, depth: 0.02 }).depth).toBe(0)
+  })
+})
+
+describe('what decides', () => {
+  const section = exampleSection()
+  const alternatives = whatDecides(section, BARRIERS[2]!)
+  const holdsTo = (id: string): number =>
+    alternatives.find((alternative) => alternative.id === id)!.holdsTo.depth
+
+  it('leaves out what is chosen', () => {
+    const ids = alternatives.map(({ id }) => id)
+    expect(ids).not.toContain('edge-open')
+    expect(ids).not.toContain('basis-global-1.5')
+    expect(ids).toContain('edge-sealed')
+    expect(ids).toContain('next-size')
+  })
+
+  it('gives each the depth to which it would hold', () => {
+    // Derived, two programs, rounded down: sealed 0.588, unusual 0.563, friction 0.25 0.285 m.
+    const shown = (id: string): string => formatNumber(holdsTo(id), 3, 'down')
+    expect(shown('edge-sealed')).toBe('0.588')
+    expect(shown('basis-unusual')).toBe('0.563')
+    expect(shown('friction-slippery')).toBe('0.285')
+    expect(holdsTo('next-size')).toBeGreaterThan(holdsToAt(holdingProfile(section), 0.55).depth)
+  })
+
+  it('does not ask for an edge where the base is sealed, nor for a slippery ground where it is', () => {
+    const sealed = exampleSection({ uplift: { model: 'none' }, ground: { friction: 0.2 } })
+    const ids = whatDecides(sealed, null).map(({ id }) => id)
+    expect(ids.every((id) => id.startsWith('basis-'))).toBe(true)
+  })
+})
+
+describe('ground that does not suit', () => {
+  it('fails whatever the figures say', () => {
+    const section = exampleSection({ water: { depth: 0.2 }, ground: { suitable: false } })
+    const { verdict, governs, ground } = evaluateSection(section)
+    expect({ verdict, governs }).toEqual({ verdict: 'fails', governs: 'ground' })
+    expect(ground?.verdict).toBe('fails')
+    expect(holdsToAt(holdingProfile(section), 0.2)).toEqual({
+      from: null,
+      depth: 0,
+      check: 'ground',
+    })
+  })
+})
