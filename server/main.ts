@@ -64,9 +64,12 @@ function addressOf(server: Server, env: Env): string {
   return env.mode === 'production' ? `${env.appUrl} (port ${port})` : `http://localhost:${port}`
 }
 
-/** Finishes what is under way, then closes the database; a second signal does not wait. */
+/** Finishes what is under way, then closes the database. Ctrl-C arrives twice through `npm start`. */
 function stopOnSignal(server: Server, closeDatabase: () => void): void {
+  let isStopping = false
   const stop = () => {
+    if (isStopping) return
+    isStopping = true
     server.close(() => {
       closeDatabase()
       process.exit(0)
@@ -76,8 +79,8 @@ function stopOnSignal(server: Server, closeDatabase: () => void): void {
       server.closeAllConnections()
     }, LAST_ANSWER).unref()
   }
-  process.once('SIGINT', stop)
-  process.once('SIGTERM', stop)
+  process.on('SIGINT', stop)
+  process.on('SIGTERM', stop)
 }
 
 start()

@@ -35,6 +35,7 @@ describe('the server', { timeout: 30_000 }, () => {
     const address = /^Toehold \(demonstration\) is at (http:\/\/localhost:\d+)$/.exec(line)?.[1]
     const answer = await fetch(`${address!.replace('localhost', '127.0.0.1')}/api/health`)
     expect(healthSchema.parse(await answer.json()).mode).toBe('demonstration')
+    child.kill('SIGINT')
     child.kill('SIGTERM')
     const { status, stdout, stderr } = await ended
     expect({ status, stdout, stderr }).toEqual({ status: 0, stdout: `${line}\n`, stderr: '' })
