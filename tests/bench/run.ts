@@ -1,0 +1,97 @@
+import { cpus } from 'node:os'
+import { loadedShape } from '../../shared/calc/loaded-shape/loaded-shape'
+import { horizontalLoads } from '../../shared/calc/section/horizontal-loads'
+import { sectionGeometry } from '../../shared/calc/section/section-geometry'
+import { verticalLoads } from '../../shared/calc/section/vertical-loads'
+import { compare } from '../../shared/checks/compare'
+import { evaluateSection } from '../../shared/checks/evaluate-section'
+import { globalPairs } from '../../shared/checks/global-checks'
+import { holdingProfile } from '../../shared/checks/holds-to'
+import { sectionState } from '../../shared/checks/section-state'
+import type { SectionCase } from '../../shared/schemas/section-case'
+import { exampleSection } from '../../shared/verification/example-section'
+
+interface Task {
+  readonly name: string
+  /** Upper bound of the median [µs]; null: printed only. */
+  readonly gate: number | null
+  readonly run: (i: number) => unknown
+}
+
+/** Depths a little apart, so that no call repeats the one before it. */
+const sections: readonly SectionCase[] = Array.from({ length: 97 }, (_, i) =>
+  exampleSection({ water: { depth: 0.2 + 0.004 * i } }),
+)
+const sectionAt = (i: number): SectionCase => sections[i % sections.length]!
+const first = sectionState(sectionAt(0))
+
+/** Everything but the loaded shape: loads, moments, ratios. */
+function rigidCheck(section: SectionCase): readonly unknown[] {
+  const geometry = sectionGeometry(section)
+  const state = {
+    ...first,
+    section,
+    geometry,
+    horizontal: horizontalLoads(section, section.barrier.diameter),
+    vertical: verticalLoads(section, geometry),
+  }
+  const { sliding, overturning, flotation } = globalPairs(state)
+  return [compare(sliding, 1.5), compare(overturning, 1.5), compare(flotation, 1.2)]
+}
+
+const TASKS: readonly Task[] = [
+  {
+    name: 'loaded shape alone',
+    gate: 21,
+    run: (i) =>
+      loadedShape({
+        diameter: 0.7,
+        airPressure: 15_000,
+        wettedSkirt: 2.2,
+        depth: sectionAt(i).water.depth,
+        unitWeight: 9810,
+      }),
+  },
+  { name: 'rigid check', gate: 5, run: (i) => rigidCheck(sectionAt(i)) },
+  { name: 'check with loaded shape', gate: 30, run: (i) => evaluateSection(sectionAt(i)) },
+  { name: 'holds-to, whole profile', gate: null, run: (i) => holdingProfile(sectionAt(i)) },
+]
+
+/** Keeps results alive, so that the compiler cannot drop the work. */
+let sink: unknown
+
+/** Median time of one call over 41 batches, after a warm-up [µs]. */
+function medianMicroseconds(run: (i: number) => unknown): number {
+  const batch = batchSize(run)
+  const times: number[] = []
+  for (let round = 0; round < 41; round += 1) {
+    const started = performance.now()
+    for (let i = 0; i < batch; i += 1) sink = run(round * batch + i)
+    times.push(((performance.now() - started) / batch) * 1000)
+  }
+  return times.sort((a, b) => a - b)[20]!
+}
+
+/** Calls that fill about 20 ms, found while warming up. */
+function batchSize(run: (i: number) => unknown): number {
+  let calls = 0
+  const started = performance.now()
+  while (performance.now() - started < 300) {
+    sink = run(calls)
+    calls += 1
+  }
+  return Math.max(1, Math.round(calls / 15))
+}
+
+console.log(
+  `${cpus().length} × ${cpus()[0]?.model ?? 'unknown processor'}, Node ${process.version}`,
+)
+let isOver = false
+for (const { name, gate, run } of TASKS) {
+  const median = medianMicroseconds(run)
+  const bound = gate === null ? '' : `, gate ${gate} µs`
+  const failed = gate !== null && median > gate
+  isOver ||= failed
+  console.log(`${failed ? 'OVER ' : 'ok   '}${name}: ${median.toFixed(2)} µs${bound}`)
+}
+if (sink === undefined || isOver) process.exitCode = 1
