@@ -46,7 +46,7 @@ export const checksTexts = {
     ground: 'May a barrier stand on this surface at all?',
   },
   basis: {
-    'global-1.5': 'Factor 1.5 throughout',
+    'global-1-5': 'Factor 1.5 throughout',
     usual: 'Usual load case, 1.5',
     unusual: 'Unusual load case, 1.3',
     extreme: 'Extreme load case, 1.1',

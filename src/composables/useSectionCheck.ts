@@ -2,7 +2,7 @@ import { computed, type Ref } from 'vue'
 import { evaluateSection, type SectionEvaluation } from '@shared/checks/evaluate-section'
 import { holdingProfile, holdsToAt } from '@shared/checks/holds-to'
 import { justEnough } from '@shared/checks/just-enough'
-import { leaveLevel } from '@shared/checks/leave-level'
+import { leaveLevel, type LeaveLevel } from '@shared/checks/leave-level'
 import { whatDecides } from '@shared/checks/what-decides'
 import type { SectionCase } from '@shared/schemas/section-case'
 import type { HoldsTo } from '@shared/schemas/section-result'
@@ -43,15 +43,7 @@ export function useSectionCheck(input: Ref<CaseInput>) {
     const isSame = last?.depth === next.depth && last.from === next.from
     return isSame && last.check === next.check ? last : next
   })
-  const leave = computed(() =>
-    leaveLevel({
-      holdsToDepth: holdsTo.value.depth,
-      depth: section.value.water.depth,
-      depthNow: depthNow(input.value),
-      rateOfRise: input.value.values.rateOfRise,
-      timeToClear: input.value.values.clearTime ?? 0,
-    }),
-  )
+  const leave = computed(() => leaveOf(input.value, section.value, holdsTo.value))
   const stated = computed(() =>
     statedHeight(input.value.values.statedHeight, still.value, holdsTo.value),
   )
@@ -77,6 +69,17 @@ export function useSectionCheck(input: Ref<CaseInput>) {
     enough: enough.result,
     isSkirtless: computed(() => section.value.barrier.skirtLength === 0),
   }
+}
+
+function leaveOf(input: CaseInput, section: SectionCase, holdsTo: HoldsTo): LeaveLevel {
+  const { rateOfRise, clearTime } = input.values
+  return leaveLevel({
+    holdsToDepth: holdsTo.depth,
+    depth: section.water.depth,
+    depthNow: depthNow(input),
+    rateOfRise,
+    timeToClear: clearTime ?? 0,
+  })
 }
 
 export type SectionCheck = ReturnType<typeof useSectionCheck>

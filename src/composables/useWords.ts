@@ -2,6 +2,7 @@ import { storeToRefs } from 'pinia'
 import { useI18n } from 'vue-i18n'
 import { showValues, type ResolveText, type TextValues } from '@shared/texts/format-text'
 import { formatQuantity, unitLabel, type Quantity, type QuantityKind } from '@shared/units'
+import { givenText } from '@/quick-check/field-text'
 import { usePreferences } from '@/stores/preferences'
 
 /** Texts and quantities in the chosen language and units. */
@@ -19,8 +20,10 @@ export function useWords() {
     return formatQuantity({ value, kind, ...how }, units.value)
   }
 
+  /** A figure as it was given. */
+  const given = (value: number, kind: QuantityKind) => givenText(value, kind, units.value)
   const say: ResolveText = ({ key, values }) => t(key, values)
   const unit = (kind: QuantityKind) => unitLabel(kind, units.value)
 
-  return { t, q, say, unit, units }
+  return { t, q, given, say, unit, units }
 }

@@ -2,6 +2,7 @@ import type { SectionCase } from '@shared/schemas/section-case'
 import type { CheckId, Verdict } from '@shared/schemas/section-result'
 import type { ResolveText } from '@shared/texts/format-text'
 import type { QuantityKind } from '@shared/units'
+import { basisKey } from './basis-key'
 
 /** What goes into a message. */
 export interface TextOfCase {
@@ -16,10 +17,13 @@ export interface TextOfCase {
 }
 
 /** Two lines for a message: the answer, and what it rests on with the link. */
-export function caseAsText(say: ResolveText, text: TextOfCase): string {
+export function caseAsText(
+  say: ResolveText,
+  given: (value: number, kind: QuantityKind) => string,
+  text: TextOfCase,
+): string {
   const { section, surface, verdict, governs, water, holdsTo, leave, link } = text
   const { barrier, ground, uplift, basis } = section
-  const quantity = (value: number, kind: QuantityKind) => ({ value, kind })
   const first = say({
     key: 'quickCheck.asText.first',
     values: {
@@ -33,13 +37,13 @@ export function caseAsText(say: ResolveText, text: TextOfCase): string {
   const second = say({
     key: 'quickCheck.asText.second',
     values: {
-      diameter: quantity(barrier.diameter, 'length'),
-      skirt: quantity(barrier.skirtLength, 'length'),
-      air: quantity(barrier.airPressure, 'pressure'),
+      diameter: given(barrier.diameter, 'length'),
+      skirt: given(barrier.skirtLength, 'length'),
+      air: given(barrier.airPressure, 'pressure'),
       surface: say({ key: `checks.ground.${surface}` }),
-      friction: quantity(ground.friction, 'ratio'),
-      edge: quantity(uplift.edgeFactor, 'percent'),
-      basis: say({ key: `checks.basis.${basis}` }),
+      friction: given(ground.friction, 'ratio'),
+      edge: given(uplift.edgeFactor, 'percent'),
+      basis: say({ key: basisKey(basis) }),
       link,
     },
   })

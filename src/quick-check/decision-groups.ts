@@ -1,7 +1,9 @@
 import { EDGE_FACTORS, SLIPPERY_FRICTION, type Alternative } from '@shared/checks/what-decides'
+import { basisKey } from './basis-key'
 import type { SectionCase } from '@shared/schemas/section-case'
 import type { HoldsTo } from '@shared/schemas/section-result'
 import type { Message } from '@shared/texts/format-text'
+import type { QuantityKind } from '@shared/units'
 
 export type DecisionGroupId = Alternative['group']
 
@@ -18,10 +20,14 @@ export interface DecisionGroup {
   readonly rows: readonly DecisionRow[]
 }
 
+/** Shows a figure as it was given. */
+type Given = (value: number, kind: QuantityKind) => string
+
 const GROUPS: readonly DecisionGroupId[] = ['edge', 'friction', 'basis', 'size']
 
 /** What decides, by group, the chosen option first; groups without an alternative are left out. */
 export function decisionGroups(
+  given: Given,
   section: SectionCase,
   holdsTo: HoldsTo,
   alternatives: readonly Alternative[],
@@ -29,10 +35,15 @@ export function decisionGroups(
   return GROUPS.flatMap((id) => {
     const others = alternatives.filter(({ group }) => group === id)
     if (others.length === 0) return []
-    const chosen = { id: `${id}-chosen`, name: chosenName(id, section), holdsTo, isChosen: true }
+    const chosen = {
+      id: `${id}-chosen`,
+      name: chosenName(id, section, given),
+      holdsTo,
+      isChosen: true,
+    }
     const rows = others.map((alternative) => ({
       id: alternative.id,
-      name: alternativeName(alternative),
+      name: alternativeName(alternative, given),
       holdsTo: alternative.holdsTo,
       isChosen: false,
     }))
@@ -40,37 +51,33 @@ export function decisionGroups(
   })
 }
 
-function chosenName(id: DecisionGroupId, section: SectionCase): Message {
-  if (id === 'edge') return edgeName(section.uplift.edgeFactor)
-  if (id === 'friction') return frictionName(section.ground.friction)
-  if (id === 'basis') return { key: `checks.basis.${section.basis}` }
-  return tubeName(section.barrier.diameter)
+function chosenName(id: DecisionGroupId, section: SectionCase, given: Given): Message {
+  if (id === 'edge') return edgeName(section.uplift.edgeFactor, given)
+  if (id === 'friction') {
+    const values = { friction: given(section.ground.friction, 'ratio') }
+    return { key: 'quickCheck.decides.friction', values }
+  }
+  if (id === 'basis') return { key: basisKey(section.basis) }
+  return {
+    key: 'quickCheck.decides.tube',
+    values: { diameter: given(section.barrier.diameter, 'length') },
+  }
 }
 
-function alternativeName({ group, section }: Alternative): Message {
+function alternativeName({ group, section }: Alternative, given: Given): Message {
   if (group === 'friction')
     return {
       key: 'quickCheck.decides.slippery',
-      values: { friction: { value: SLIPPERY_FRICTION, kind: 'ratio' } },
+      values: { friction: given(SLIPPERY_FRICTION, 'ratio') },
     }
-  return chosenName(group, section)
+  return chosenName(group, section, given)
 }
 
-function edgeName(edgeFactor: number): Message {
+function edgeName(edgeFactor: number, given: Given): Message {
   const named = Object.entries(EDGE_FACTORS).find(([, factor]) => factor === edgeFactor)
   if (named) return { key: `quickCheck.decides.edge.${named[0]}` }
   return {
     key: 'quickCheck.decides.edge.typed',
-    values: { share: { value: edgeFactor, kind: 'percent' } },
+    values: { share: given(edgeFactor, 'percent') },
   }
-}
-
-function frictionName(friction: number): Message {
-  const values = { friction: { value: friction, kind: 'ratio' as const } }
-  return { key: 'quickCheck.decides.friction', values }
-}
-
-function tubeName(diameter: number): Message {
-  const values = { diameter: { value: diameter, kind: 'length' as const } }
-  return { key: 'quickCheck.decides.tube', values }
 }

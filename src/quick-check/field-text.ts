@@ -3,6 +3,7 @@ import {
   displayDecimals,
   fromDisplay,
   toDisplay,
+  unitLabel,
   type QuantityKind,
   type UnitSystem,
 } from '@shared/units'
@@ -38,6 +39,15 @@ export function fieldText(value: number, kind: QuantityKind, system: UnitSystem)
       ? Number(shown.toPrecision(system === 'metric' ? 10 : 4))
       : Number(shown.toFixed(digits))
   return String(rounded)
+}
+
+/** A figure as it was given, with its unit: "0.70 m", "10 m", "15 kPa"; no digits that nobody entered. */
+export function givenText(value: number, kind: QuantityKind, system: UnitSystem): string {
+  const text = fieldText(value, kind, system)
+  const label = unitLabel(kind, system)
+  const isShort = kind === 'length' && Math.abs(Number(text)) < 10 && /^[^.]*(\.\d?)?$/.test(text)
+  const figure = (isShort ? Number(text).toFixed(2) : text).replace('-', '−')
+  return label === '' ? figure : `${figure}\u00a0${label}`
 }
 
 /** What the field shows. */
