@@ -113,6 +113,16 @@ export class LabelPlacer {
     return false
   }
 
+  /** As `place`, but across lines as well. */
+  placeOverLines(label: Label, spots: readonly Spot[]): boolean {
+    const width = this.width(label)
+    for (const spot of spots) {
+      const box = textBox(spot, width, label.size)
+      if (this.isFree(box)) return this.putOver(label, spot, box)
+    }
+    return false
+  }
+
   /** As `place`, but rather crosses a line or moves up and down than leave the label out. */
   placeSurely(label: Label, spots: readonly Spot[]): boolean {
     if (this.place(label, spots)) return true
@@ -124,7 +134,7 @@ export class LabelPlacer {
       for (const y of [first.y - distance, first.y + distance]) {
         const spot = { ...first, x, y }
         const box = textBox(spot, width, label.size)
-        if (this.isFree(box)) return this.put(label, spot, box)
+        if (this.isFree(box)) return this.putOver(label, spot, box)
       }
     }
     return false
@@ -135,6 +145,12 @@ export class LabelPlacer {
     const { id, role, message, size, weight = 400 } = label
     this.texts.push({ kind: 'text', id, role, message, size, weight, ...spot })
     this.taken.push(box)
+    return true
+  }
+
+  private putOver(label: Label, spot: Spot, box: Box): true {
+    this.put(label, spot, box)
+    if (this.crossesLine(box)) this.texts.push({ ...this.texts.pop()!, hasHalo: true })
     return true
   }
 

@@ -9,6 +9,11 @@ function pair(point: Point): string {
   return `${coordinate(point.x)} ${coordinate(point.y)}`
 }
 
+/** The same points backwards. */
+export function reversed(points: readonly Point[]): readonly Point[] {
+  return [...points].reverse()
+}
+
 /** Path data of an open line through the points. */
 export function linePath(points: readonly Point[]): string {
   let d = ''

@@ -41,6 +41,7 @@ export const SHAPE_ROLES = [
   'staffFrame',
   'forecast',
   'holdsTo',
+  'holdsToLine',
   'leave',
   'cutGap',
   'cutLine',
@@ -128,6 +129,8 @@ export interface TextItem {
   readonly size: number
   readonly weight: TextWeight
   readonly message: Message
+  /** The text crosses lines and is painted with an edge of the background. */
+  readonly hasHalo?: true
 }
 
 export type SceneItem = PathItem | CircleItem | ArrowsItem | TextItem

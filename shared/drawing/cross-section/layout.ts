@@ -28,7 +28,7 @@ const WIDE: SectionLayout = {
   gutterLeft: 168,
   gutterRight: 176,
   top: 38,
-  strip: 148,
+  strip: 138,
   pressureMax: 84,
   arrowStep: 44,
   grip: 12,
@@ -38,7 +38,7 @@ const MEDIUM: SectionLayout = {
   name: 'medium',
   font: 12.5,
   small: 11.5,
-  gutterLeft: 116,
+  gutterLeft: 150,
   gutterRight: 104,
   top: 32,
   strip: 128,
@@ -49,10 +49,10 @@ const MEDIUM: SectionLayout = {
 
 const NARROW: SectionLayout = {
   name: 'narrow',
-  font: 12.5,
+  font: 12,
   small: 11.5,
-  gutterLeft: 40,
-  gutterRight: 18,
+  gutterLeft: 32,
+  gutterRight: 14,
   top: 30,
   strip: 104,
   pressureMax: 44,
@@ -61,8 +61,8 @@ const NARROW: SectionLayout = {
 }
 
 /** Widths from which more is shown. */
-const WIDE_FROM = 700
-const MEDIUM_FROM = 480
+const WIDE_FROM = 860
+const MEDIUM_FROM = 520
 
 /** Share of the height that the ground may take. */
 const GROUND_SHARE = 0.36

@@ -1,8 +1,9 @@
+import type { LoadedOutline } from '../../calc/loaded-shape/loaded-outline'
 import { niceAbove } from '../nice-ticks'
 import type { Point } from '../scene'
 import { cutAxis, wholeAxis, type CutAxis } from './cut-axis'
 import { layoutFor, type SectionLayout } from './layout'
-import type { CrossSectionInput, DrawnOutline } from './section-input'
+import type { CrossSectionInput } from './section-input'
 
 /** The greatest depth of a case, in diameters: the drawing keeps room for it. */
 export const GREATEST_DEPTH = 1.5
@@ -28,13 +29,19 @@ export interface SectionFrame {
 }
 
 /** Below this share of the scale that the height allows, the skirt is cut rather than shrunk. */
-const LEAST_SHARE = 0.42
+const LEAST_SHARE = 0.36
 
 /** Width of the gap at a cut [px]. */
 const CUT_GAP = 14
 
 /** Pressure arrows are drawn at less than this share of true head, below the thrust at a third. */
-const HEAD_SHARE = 0.27
+const HEAD_SHARE = 0.28
+
+/** Share of the spare height that goes above the water. */
+const SPARE_ABOVE = 0.72
+
+/** How far to the dry side a firm tube reaches under load, in diameters from the weld line. */
+const ROLLED = 0.9
 
 /** Extent of the drawing in metres around the weld line. */
 interface Extent {
@@ -66,7 +73,7 @@ export function sectionFrame(input: CrossSectionInput): SectionFrame {
     width: view.width,
     height: view.height,
     scale,
-    groundY: layout.top + scale * extent.above + spare * 0.6,
+    groundY: layout.top + scale * extent.above + spare * SPARE_ABOVE,
     axis: axisOf(extent, scale, layout, usableWidth),
     sin,
     cos,
@@ -77,8 +84,8 @@ export function sectionFrame(input: CrossSectionInput): SectionFrame {
 }
 
 function extentOf(input: CrossSectionInput, sin: number, cos: number): Extent {
-  const { diameter, skirtLength, contactWidth } = input.case.barrier
-  const nominal = contactWidth / 2 + diameter * (0.53 + Math.abs(sin) / 2)
+  const { diameter, skirtLength } = input.case.barrier
+  const nominal = diameter * (ROLLED + Math.abs(sin) / 2)
   const outline = input.outline ?? input.lastStanding?.outline
   const right = Math.max(nominal, outline ? farthest(outline) : 0)
   const left = skirtLength * cos
@@ -92,7 +99,7 @@ function extentOf(input: CrossSectionInput, sin: number, cos: number): Extent {
   }
 }
 
-function farthest(outline: DrawnOutline): number {
+function farthest(outline: LoadedOutline): number {
   let right = 0
   for (const { x } of outline.drySkin) right = Math.max(right, x)
   return right * 1.02
@@ -108,10 +115,11 @@ function axisOf(
   if (spare >= 0) return wholeAxis(layout.gutterLeft + spare * 0.6 + scale * extent.left, scale)
   const originPx = layout.gutterLeft + usableWidth - scale * extent.right
   const skirtPx = originPx - layout.gutterLeft - CUT_GAP
-  const fromPx = layout.gutterLeft + 0.38 * skirtPx
+  const edgePart = (layout.name === 'narrow' ? 0.62 : 0.5) * skirtPx
+  const fromPx = layout.gutterLeft + edgePart
   const toPx = fromPx + CUT_GAP
   return cutAxis(originPx, scale, {
-    fromX: -extent.left + (0.38 * skirtPx) / scale,
+    fromX: -extent.left + edgePart / scale,
     toX: (toPx - originPx) / scale,
     fromPx,
     toPx,

@@ -1,6 +1,7 @@
+import type { LoadedOutline } from '../../calc/loaded-shape/loaded-outline'
 import type { SectionCase } from '../../schemas/section-case'
 import type { SectionResult } from '../../schemas/section-result'
-import type { Point, View } from '../scene'
+import type { View } from '../scene'
 import type { MeasureText } from '../text-width'
 
 /** Answers of the engine that the drawing shows. */
@@ -9,23 +10,9 @@ export type DrawnEvaluation = Pick<
   'thrust' | 'vertical' | 'sliding' | 'freeboard' | 'loadedShape' | 'verdict' | 'governs'
 >
 
-/**
- * Tube and skirt as they stand: polylines in the axes of the section [m]. Wet edge to dry side:
- * `freeSkirt` from the ground to the weld line, `wetSkin` from there to the water surface, `crown`
- * over the top, `drySkin` down to the ground; `contact` on it and `underside` back to the weld line.
- */
-export interface DrawnOutline {
-  readonly freeSkirt: readonly Point[]
-  readonly wetSkin: readonly Point[]
-  readonly crown: readonly Point[]
-  readonly drySkin: readonly Point[]
-  readonly contact: readonly Point[]
-  readonly underside: readonly Point[]
-}
-
 /** The last shape that stood as the water rose. */
 export interface LastStanding {
-  readonly outline: DrawnOutline
+  readonly outline: LoadedOutline
   /** Depth of water at which it stood [m]. */
   readonly depth: number
   /** Its crest above the ground [m]. */
@@ -54,7 +41,7 @@ export interface CrossSectionInput {
   readonly case: SectionCase
   readonly evaluation: DrawnEvaluation
   /** Null where the tube does not stand. */
-  readonly outline: DrawnOutline | null
+  readonly outline: LoadedOutline | null
   readonly lastStanding?: LastStanding | null | undefined
   readonly level?: GroundLevel | null | undefined
   readonly marks?: SectionMarks | undefined

@@ -1,0 +1,181 @@
+import { spreadColumn, type Label } from '../label-placer'
+import { areaPath, linePath, segmentsPath } from '../path-data'
+import { niceAbove } from '../nice-ticks'
+import type { Point, ShapeRole, TextRole } from '../scene'
+import { addPath, drawingText, quietLabel, valueLabel, type Composition } from './composition'
+import { faceX } from './forces'
+import { GREATEST_DEPTH, levelY } from './section-frame'
+import { levelMarkX } from './water'
+import type { Quantity } from '../../units'
+
+/** The staff at the wet edge: its place, its width and the least height of a block [px]. */
+const STAFF_X = 10
+const STAFF_WIDTH = 6
+const LEAST_BLOCK = 9
+
+/** A graduated staff on which marks can be read, from the ground to the greatest depth. */
+export function drawStaff(drawing: Composition): void {
+  const { frame, input } = drawing
+  const top = GREATEST_DEPTH * input.case.barrier.diameter
+  const block = niceAbove(LEAST_BLOCK / frame.scale)
+  const blocks: string[] = []
+  for (let index = 0; index * block < top - 1e-9; index += 2) {
+    const from = levelY(frame, index * block)
+    const to = levelY(frame, Math.min(top, (index + 1) * block))
+    blocks.push(areaPath(column(from, to)))
+  }
+  addPath(drawing, 'staff-frame', 'staffFrame', areaPath(column(frame.groundY, levelY(frame, top))))
+  addPath(drawing, 'staff', 'staff', blocks.join(''))
+  drawing.placer.reserve({
+    left: STAFF_X,
+    right: STAFF_X + STAFF_WIDTH,
+    top: levelY(frame, top),
+    bottom: frame.groundY,
+  })
+}
+
+function column(from: number, to: number): readonly Point[] {
+  return [
+    { x: STAFF_X, y: from },
+    { x: STAFF_X + STAFF_WIDTH, y: from },
+    { x: STAFF_X + STAFF_WIDTH, y: to },
+    { x: STAFF_X, y: to },
+  ]
+}
+
+interface Mark {
+  readonly name: 'low' | 'expected' | 'high' | 'holdsTo' | 'leave'
+  readonly depth: number
+  readonly line: ShapeRole
+  readonly text: TextRole
+}
+
+const KINDS: readonly Omit<Mark, 'depth'>[] = [
+  { name: 'holdsTo', line: 'holdsTo', text: 'label' },
+  { name: 'leave', line: 'leave', text: 'label' },
+  { name: 'high', line: 'forecast', text: 'label' },
+  { name: 'expected', line: 'forecast', text: 'label' },
+  { name: 'low', line: 'forecast', text: 'label' },
+]
+
+/** Marks that lie inside the drawing, from the highest to the lowest. */
+function marksOf({ input, frame }: Composition): readonly Mark[] {
+  const greatest = GREATEST_DEPTH * input.case.barrier.diameter
+  const isNarrow = frame.layout.name === 'narrow'
+  return KINDS.flatMap((kind): Mark[] => {
+    const depth = input.marks?.[kind.name]
+    if (depth === null || depth === undefined || depth < 0 || depth > greatest) return []
+    if (isNarrow && kind.line === 'forecast') return []
+    return [{ ...kind, depth }]
+  }).sort((a, b) => b.depth - a.depth)
+}
+
+/** Where the texts of the column begin, and the least distance of their base lines. */
+const TEXT_X = 32
+const LINE_GAP = 4
+
+/** Marks of the forecast, holds-to and leave level, and the level of the water now. */
+export function drawMarks(drawing: Composition): void {
+  labelLevel(drawing)
+  const marks = marksOf(drawing)
+  const heights = columnHeights(drawing, marks)
+  marks.forEach((mark, index) => drawMark(drawing, mark, heights[index]!))
+}
+
+/** The level of the water, where the level of the ground is known; on a phone the depth without it. */
+function labelLevel(drawing: Composition): void {
+  const { input, frame, placer } = drawing
+  const { depth } = input.case.water
+  const y = levelY(frame, depth) - 6
+  const spot = { x: levelMarkX(drawing) + 12, y, anchor: 'start' as const }
+  const isNarrow = frame.layout.name === 'narrow'
+  const values = heightValues(drawing, depth)
+  if (values.level) {
+    const name = isNarrow ? 'level' : 'levelNow'
+    placer.placeSurely(
+      valueLabel(drawing, 'level-value', 'labelWater', drawingText(name, values)),
+      [spot],
+    )
+  } else if (isNarrow) {
+    const label = valueLabel(drawing, 'depth-value', 'labelWater', drawingText('depth', values))
+    placer.placeSurely(label, [spot])
+  }
+}
+
+function heightValues(
+  { input }: Composition,
+  depth: number,
+  rounding?: 'down',
+): Record<string, Quantity | string> {
+  const round = rounding ? { rounding } : {}
+  const shown: Quantity = { value: depth, kind: 'length', ...round }
+  const { level } = input
+  if (!level) return { depth: shown }
+  return {
+    depth: shown,
+    level: { value: level.ground + depth, kind: 'length', ...round },
+    datum: level.datum,
+  }
+}
+
+/** Base lines of the texts: spread above the surface, and what has no room there below it. */
+function columnHeights(drawing: Composition, marks: readonly Mark[]): readonly number[] {
+  const { frame, input } = drawing
+  const gap = frame.layout.small + LINE_GAP
+  const surface = levelY(frame, input.case.water.depth)
+  const top = frame.layout.top + frame.layout.small
+  const lowest = surface - 5
+  const room = Math.max(0, Math.floor((lowest - top) / gap) + 1)
+  const aboveCount = Math.min(
+    room,
+    marks.filter(({ depth }) => levelY(frame, depth) < surface).length,
+  )
+  const baseline = ({ depth }: Mark) => levelY(frame, depth) + frame.layout.small * 0.35
+  const above = spreadColumn(marks.slice(0, aboveCount).map(baseline), gap, { top, bottom: lowest })
+  const below = spreadColumn(marks.slice(aboveCount).map(baseline), gap, {
+    top: surface + frame.layout.small + 4,
+    bottom: frame.height - 44,
+  })
+  return [...above, ...below]
+}
+
+/** Only downwards, so that the texts keep the order of their marks [px]. */
+const MOVES = [0, 6, 12, 18, 24, 30, 36, 42, 48] as const
+
+function drawMark(drawing: Composition, mark: Mark, baseline: number): void {
+  const { frame, placer } = drawing
+  const y = levelY(frame, mark.depth)
+  const middle = baseline - frame.layout.small * 0.35
+  const label = markLabel(drawing, mark)
+  const start = STAFF_X + STAFF_WIDTH
+  addPath(
+    drawing,
+    `mark-${mark.name}`,
+    mark.line,
+    linePath([
+      { x: start, y },
+      { x: start + 5, y },
+      { x: TEXT_X - 8, y: middle },
+      { x: TEXT_X - 4, y: middle },
+    ]),
+  )
+  const spots = MOVES.map((move) => ({ x: TEXT_X, y: baseline + move, anchor: 'start' as const }))
+  placer.placeOverLines(label, spots)
+  if (mark.name !== 'holdsTo' || frame.layout.name === 'narrow') return
+  const from = TEXT_X + placer.width(label) + 8
+  const to = faceX(drawing, y) - 6
+  if (to <= from) return
+  const line: [Point, Point] = [
+    { x: from, y },
+    { x: to, y },
+  ]
+  addPath(drawing, 'mark-line-holdsTo', 'holdsToLine', segmentsPath([line]))
+  placer.avoid({ left: from, right: to, top: y - 1, bottom: y + 1 })
+}
+
+function markLabel(drawing: Composition, { name, depth, text }: Mark): Label {
+  const rounding = name === 'holdsTo' || name === 'leave' ? 'down' : undefined
+  const values = heightValues(drawing, depth, rounding)
+  const message = drawingText(values.level ? `mark.${name}Level` : `mark.${name}`, values)
+  return quietLabel(drawing, `mark-${name}-value`, message, text)
+}
