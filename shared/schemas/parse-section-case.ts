@@ -1,8 +1,15 @@
-import type { z } from 'zod'
-import { InvalidInputError, OutOfRangeError, rangeFault, showValue, type Fault } from '../errors'
+import { z } from 'zod'
+import {
+  InvalidInputError,
+  isInRange,
+  OutOfRangeError,
+  rangeFault,
+  showValue,
+  type Fault,
+} from '../errors'
 import { sectionCaseSchema, type SectionCase } from './section-case'
 import { sectionFaults, valueAt } from './section-faults'
-import { resolveRange, SECTION_RANGES, type NumericPath } from './section-ranges'
+import { NUMERIC_PATHS, resolveRange, SECTION_RANGES, type NumericPath } from './section-ranges'
 
 /**
  * A case from unknown input, with every default filled in.
@@ -13,7 +20,10 @@ import { resolveRange, SECTION_RANGES, type NumericPath } from './section-ranges
  */
 export function parseSectionCase(input: unknown): SectionCase {
   const parsed = sectionCaseSchema.safeParse(input)
-  if (!parsed.success) throw new InvalidInputError(parsed.error.issues.flatMap(faultsOf(input)))
+  if (!parsed.success) {
+    const faults = parsed.error.issues.flatMap(faultsOf(input))
+    throw new InvalidInputError([...faults, ...numbersOutside(input)])
+  }
   const { command: _, ...section } = parsed.data
   const faults = sectionFaults(section)
   if (faults.length > 0) throw new OutOfRangeError(faults)
@@ -34,15 +44,33 @@ function faultsOf(input: unknown): (issue: z.core.$ZodIssue) => Fault[] {
   }
 }
 
+/** Numbers outside their range in a case that has a wrong shape as well: nothing is told in two goes. */
+function numbersOutside(input: unknown): Fault[] {
+  if (typeof input !== 'object' || input === null) return []
+  const read = (path: NumericPath): unknown => valueAt(input, path)
+  return NUMERIC_PATHS.flatMap((path) => {
+    const value = read(path)
+    if (typeof value !== 'number' || !Number.isFinite(value)) return []
+    const range = resolveRange(path, read)
+    return isInRange(value, range) ? [] : [rangeFault(path, value, range)]
+  })
+}
+
 function unknownKey(path: string, input: unknown): Fault {
   const value = valueAt(input as object, path)
-  return {
-    path,
-    value,
-    allowed: 'no such field',
-    unit: '–',
-    message: `${path}: there is no such field`,
-  }
+  const allowed = `one of ${fieldsBeside(path).join(', ')}`
+  const message = `${path}: ${showValue(value)} has no place here; the field must be ${allowed}`
+  return { path, value, allowed, unit: '–', message }
+}
+
+/** Names of the fields that may stand where an unknown one stands. */
+function fieldsBeside(path: string): readonly string[] {
+  const [part, inner] = path.split('.') as [string, string | undefined]
+  const shape = sectionCaseSchema.shape
+  if (inner === undefined) return Object.keys(shape)
+  const schema: unknown = shape[part as keyof typeof shape]
+  const object = schema instanceof z.ZodPrefault ? schema.unwrap() : schema
+  return object instanceof z.ZodObject ? Object.keys(object.shape) : []
 }
 
 function wrongNumber(path: NumericPath, input: unknown): Fault {

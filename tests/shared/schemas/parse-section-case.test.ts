@@ -69,7 +69,14 @@ describe('a case from outside', () => {
     ['an empty field', water({ depth: '' }), 'water.depth', 'nothing'],
     ['a missing field', { ...least, water: {} }, 'water.depth', 'nothing'],
     ['a missing part', { ...least, water: undefined }, 'water', 'nothing'],
-    ['an unknown key', barrier({ colour: 'red' }), 'barrier.colour', 'no such field'],
+    ['an unknown key', barrier({ colour: 'red' }), 'barrier.colour', '"red" has no place here'],
+    ['an unknown part', { ...least, wind: 3 }, 'wind', 'one of command, barrier, ground'],
+    [
+      'an unknown ground',
+      { ...least, uplift: { eta: 1 } },
+      'uplift.eta',
+      'one of model, edgeFactor',
+    ],
     ['an unknown model', { ...least, uplift: { model: 'guess' } }, 'uplift.model', '"guess"'],
     ['another command', { ...least, command: 'duty' }, 'command', '"duty"'],
     ['a list of nothing', [], 'case', 'a list'],
@@ -79,6 +86,12 @@ describe('a case from outside', () => {
     expect(kind).toBe('shape')
     expect(faults[0]!.path).toBe(path)
     expect(faults[0]!.message).toContain(shown)
+  })
+
+  it('is told of wrong shapes and wrong ranges together', () => {
+    const { kind, faults } = faultsOf({ ...barrier({ mass: '4.8' }), ground: { friction: 5 } })
+    expect(kind).toBe('shape')
+    expect(faults.map(({ path }) => path)).toEqual(['barrier.mass', 'ground.friction'])
   })
 
   it('is told of every fault at once', () => {
