@@ -50,7 +50,6 @@ export const quickCheckTexts = {
     unverifiedTip:
       'No test stands behind this friction. Pull a loaded piece of the skirt over the wet surface with a spring balance: pull over weight is the friction.',
     suitable: { label: 'Fit for a barrier', yes: 'Suitable', no: 'Unsuitable' },
-    unsuitableTip: 'Loose gravel and bare mud are unsuitable, whatever the figures say.',
     sealed: 'sealed',
     open: 'open',
     edge: 'Skirt edge: {share} of the pressure gets under it',
@@ -80,8 +79,8 @@ export const quickCheckTexts = {
     asDepth: '{depth} of water',
     asLevel: 'Level {level} ({depth} of water)',
     holdsTo: {
-      asDepth: 'holds to {depth}, then {then}',
-      asLevel: 'holds to {level} ({depth}), then {then}',
+      toAsDepth: 'holds to {depth}, then {then}',
+      toAsLevel: 'holds to {level} ({depth}), then {then}',
       onlyAsDepth: 'holds only to {depth}, then {then}',
       onlyAsLevel: 'holds only to {level} ({depth}), then {then}',
       fromAsDepth: 'holds from {from} to {depth}, then {then}',
@@ -90,16 +89,22 @@ export const quickCheckTexts = {
       noSkirt: 'Without a skirt no water can be relied on: nothing presses the barrier down',
     },
     leave: {
-      atAsDepth: 'Leave before {depth}.',
-      atAsLevel: 'Leave before {level} ({depth}).',
-      beforeAsDepth: 'Holds, but must be left before it: leave before {depth}.',
-      beforeAsLevel: 'Holds, but must be left before it: leave before {level} ({depth}).',
-      nowAsDepth: 'Leave now. The leave level of {depth} is reached.',
-      nowAsLevel: 'Leave now. The leave level of {level} ({depth}) is reached.',
+      'leave-at': {
+        AsDepth: 'Leave before {depth}.',
+        AsLevel: 'Leave before {level} ({depth}).',
+      },
+      'leave-before-level': {
+        AsDepth: 'Holds, but must be left before it: leave before {depth}.',
+        AsLevel: 'Holds, but must be left before it: leave before {level} ({depth}).',
+      },
+      'leave-now': {
+        AsDepth: 'Leave now. The leave level of {depth} is reached.',
+        AsLevel: 'Leave now. The leave level of {level} ({depth}) is reached.',
+      },
       none: 'Do not rely on it. There is no leave level.',
     },
     overtopped: 'Overtopped: the water stands {height} above the unloaded crest.',
-    overtoppedLoaded: 'The loaded tube sags below the water: it is overtopped.',
+    overtoppedLoaded: 'The loaded crest lies below the water: it is overtopped.',
     givesWay: 'The tube gives way: no shape carries this water.',
     governs: 'governs',
     needs: 'needs {required}',
@@ -157,6 +162,13 @@ export const quickCheckTexts = {
   },
 
   chart: {
+    series: {
+      open: 'open edge',
+      weighed: 'weighed edge',
+      sealed: 'sealed edge',
+      typed: 'edge {share} open',
+      none: 'no water under it',
+    },
     title: 'Sliding factor against depth',
     note: 'The factor falls as the water rises. Where the line meets what the basis needs, the barrier begins to slide.',
   },
@@ -235,7 +247,6 @@ export const quickCheckTexts = {
       'Rests on tube {diameter} (skirt {skirt}, air {air}), {surface}, friction {friction}, skirt edge {edge} open, basis “{basis}”. A design check, not a guarantee. {link}',
   },
   announce: '{verdict}. {water}, {holdsTo}. {leave} {governs} governs.',
-  announceStale: '{count} to correct. {first}',
 
   fault: {
     text: '{field}: “{typed}” is not a number. Allowed: {allowed}.',

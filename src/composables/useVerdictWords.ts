@@ -1,5 +1,11 @@
 import { computed, type Ref } from 'vue'
-import { holdsToWords, leaveWords, waterWords, type WaterPlace } from '@/quick-check/verdict-words'
+import {
+  holdsToWords,
+  leaveWords,
+  shapeWords,
+  waterWords,
+  type WaterPlace,
+} from '@/quick-check/verdict-words'
 import type { SectionCheck } from './useSectionCheck'
 import { useWords } from './useWords'
 
@@ -12,6 +18,10 @@ export function useVerdictWords(check: SectionCheck) {
     holdsToWords(say, check.holdsTo.value, place.value, check.isSkirtless.value),
   )
   const leave = computed(() => leaveWords(say, check.leave.value, place.value))
+  const shape = computed(() => {
+    const { barrier, water: wet } = check.section.value
+    return shapeWords(say, check.evaluation.value.loadedShape, wet.depth, barrier.diameter)
+  })
   const sentence = computed(() => {
     const { verdict, governs } = check.evaluation.value
     return t('quickCheck.announce', {
@@ -22,5 +32,5 @@ export function useVerdictWords(check: SectionCheck) {
       governs: t(`checks.name.${governs}`),
     })
   })
-  return { water, holdsTo, leave, sentence }
+  return { water, holdsTo, leave, shape, sentence }
 }

@@ -1,5 +1,5 @@
 import type { LeaveLevel } from '@shared/checks/leave-level'
-import type { HoldsTo } from '@shared/schemas/section-result'
+import type { HoldsTo, LoadedShapeResult } from '@shared/schemas/section-result'
 import type { ResolveText, TextValues } from '@shared/texts/format-text'
 import type { Quantity } from '@shared/units'
 
@@ -36,30 +36,40 @@ export function holdsToWords(
   place: WaterPlace,
   isSkirtless: boolean,
 ): string {
-  const key = 'quickCheck.verdict.holdsTo'
-  if (isSkirtless) return say({ key: `${key}.noSkirt` })
+  if (isSkirtless) return say({ key: 'quickCheck.verdict.holdsTo.noSkirt' })
   const then = say({ key: `checks.then.${holdsTo.check}` })
-  if (holdsTo.from === null) return say({ key: `${key}.none`, values: { then } })
+  if (holdsTo.from === null)
+    return say({ key: 'quickCheck.verdict.holdsTo.none', values: { then } })
   const { form, values } = limit(holdsTo.depth, place)
   if (holdsTo.from > 0) {
     const from = { ...length(holdsTo.from), rounding: 'up' as const }
-    return say({ key: `${key}.from${form}`, values: { ...values, from, then } })
+    return say({ key: `quickCheck.verdict.holdsTo.from${form}`, values: { ...values, from, then } })
   }
   const isPast = place.depth > holdsTo.depth
-  const name = isPast ? `only${form}` : form.replace(/^A/, 'a')
-  return say({ key: `${key}.${name}`, values: { ...values, then } })
+  const key = isPast
+    ? `quickCheck.verdict.holdsTo.only${form}`
+    : `quickCheck.verdict.holdsTo.to${form}`
+  return say({ key, values: { ...values, then } })
 }
 
 /** The leave level, in its sentence. */
 export function leaveWords(say: ResolveText, leave: LeaveLevel, place: WaterPlace): string {
-  const key = 'quickCheck.verdict.leave'
-  if (leave.depth === null) return say({ key: `${key}.none` })
+  if (leave.depth === null) return say({ key: 'quickCheck.verdict.leave.none' })
   const { form, values } = limit(leave.depth, place)
-  const name = {
-    'leave-at': 'at',
-    'leave-before-level': 'before',
-    'leave-now': 'now',
-    none: 'none',
-  }[leave.state]
-  return say({ key: `${key}.${name}${form}`, values })
+  return say({ key: `quickCheck.verdict.leave.${leave.state}.${form}`, values })
+}
+
+/** Why no shape stands, in words; null while one does, or where the missing skirt already says it. */
+export function shapeWords(
+  say: ResolveText,
+  shape: LoadedShapeResult,
+  depth: number,
+  diameter: number,
+): string | null {
+  if (shape.solved || shape.reason === 'no-skirt') return null
+  if (shape.reason === 'gives-way') return say({ key: 'quickCheck.verdict.givesWay' })
+  const height: Quantity = { value: depth - diameter, kind: 'length' }
+  return depth > diameter
+    ? say({ key: 'quickCheck.verdict.overtopped', values: { height } })
+    : say({ key: 'quickCheck.verdict.overtoppedLoaded' })
 }

@@ -27,6 +27,6 @@ export function createAppRouter(history = createWebHistory()) {
   return createRouter({
     history,
     routes,
-    scrollBehavior: (_to, _from, saved) => saved ?? { top: 0 },
+    scrollBehavior: (to, from, saved) => (to.path === from.path ? false : (saved ?? { top: 0 })),
   })
 }

@@ -1,0 +1,56 @@
+import { computed, type Ref } from 'vue'
+import {
+  crossSectionScene,
+  type DrawnEvaluation,
+  type GroundLevel,
+  type SectionMarks,
+} from '@shared/drawing/cross-section'
+import type { View } from '@shared/drawing/scene'
+import { lastStanding, standingOutline } from '@shared/drawing/standing-outline'
+import { measureWith } from '@shared/drawing/text-width'
+import type { SectionCase } from '@shared/schemas/section-case'
+import type { ResolveText } from '@shared/texts/format-text'
+import { isSameButDepth } from '@/quick-check/same-section'
+
+/** What the drawing of a section shows. */
+export interface DrawnSection {
+  readonly section: SectionCase
+  readonly evaluation: DrawnEvaluation
+  readonly marks?: SectionMarks | undefined
+  readonly level?: GroundLevel | null | undefined
+}
+
+/**
+ * The scene of a section, composed for a size. The last standing shape does not depend on the depth,
+ * so it is searched once and kept while only the water moves.
+ */
+export function useCrossSection(drawn: () => DrawnSection, say: ResolveText) {
+  const still = computed<SectionCase>((kept) => {
+    const { section } = drawn()
+    return kept && isSameButDepth(kept, section) ? kept : section
+  })
+  const last = computed(() => lastStanding(still.value))
+  const outline = computed(() => standingOutline(drawn().section))
+  const measure = computed(() => measureWith(say))
+
+  function compose(view: View) {
+    const { section, evaluation, marks, level } = drawn()
+    return crossSectionScene({
+      case: section,
+      evaluation,
+      outline: outline.value,
+      lastStanding: outline.value ? null : last.value,
+      marks,
+      level,
+      view,
+      measure: measure.value,
+    })
+  }
+
+  /** The scene for a size that may not be known yet. */
+  function sceneFor(view: Readonly<Ref<View | null>>) {
+    return computed(() => view.value && compose(view.value))
+  }
+
+  return { compose, sceneFor }
+}
