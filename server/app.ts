@@ -6,13 +6,14 @@ import type { Env } from './env'
 import { NotFoundError } from './errors'
 import { errorHandler } from './http/error-handler'
 import { receiveJsonText } from './http/json-body'
+import { mountOperations, type Access } from './http/mount-operations'
 import { securityHeaders } from './http/security-headers'
 import { site } from './http/site'
 import { requestLog } from './logger'
-import { catalogueModule } from './modules/catalogue/catalogue.routes'
-import { healthModule } from './modules/health/health.routes'
-import { openapiModule } from './modules/openapi/openapi.routes'
-import { sectionChecksModule } from './modules/section-checks/section-checks.routes'
+import { catalogueOperations } from './modules/catalogue/catalogue.routes'
+import { healthOperations } from './modules/health/health.routes'
+import { openapiOperations } from './modules/openapi/openapi.routes'
+import { sectionChecksOperations } from './modules/section-checks/section-checks.routes'
 
 export interface AppParts {
   readonly db: Db
@@ -22,6 +23,9 @@ export interface AppParts {
   /** Folder of the built page. */
   readonly siteFolder: string
 }
+
+/** Nobody can sign in yet: every route is open. */
+const NOBODY: Access = { signedIn: () => null, memberRole: () => null }
 
 /** Builds the server; it listens only where `main.ts` says so. */
 export function createApp({ db, env, logger, version, siteFolder }: AppParts): Express {
@@ -35,13 +39,13 @@ export function createApp({ db, env, logger, version, siteFolder }: AppParts): E
   })
   app.use(receiveJsonText)
 
-  const modules = [
-    healthModule(db, { version, mode: env.mode }),
-    catalogueModule(db),
-    sectionChecksModule(),
+  const operations = [
+    ...healthOperations(db, { version, mode: env.mode }),
+    ...catalogueOperations(db),
+    ...sectionChecksOperations(),
   ]
-  modules.push(openapiModule(version, modules))
-  for (const { router } of modules) app.use(router)
+  const all = [...operations, ...openapiOperations(version, operations)]
+  app.use(mountOperations(all, NOBODY))
 
   app.use(site(siteFolder))
   app.use((req) => {

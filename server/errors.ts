@@ -22,3 +22,21 @@ export class UnavailableError extends Error {
 export class InvalidJsonError extends Error {
   override readonly name = 'InvalidJsonError'
 }
+
+/** Nobody is signed in, or the session has ended (HTTP 401). */
+export class SignInRequiredError extends Error {
+  override readonly name = 'SignInRequiredError'
+}
+
+/** Too many attempts; the same request may succeed later (HTTP 429). */
+export class TooManyRequestsError extends Error {
+  override readonly name = 'TooManyRequestsError'
+
+  constructor(
+    message: string,
+    /** Seconds to wait. */
+    readonly retryAfter: number,
+  ) {
+    super(message)
+  }
+}

@@ -6,6 +6,8 @@ import {
   ForbiddenError,
   InvalidJsonError,
   NotFoundError,
+  SignInRequiredError,
+  TooManyRequestsError,
   UnavailableError,
 } from '../errors'
 import { MethodNotAllowedError, UnsupportedMediaTypeError } from './http-errors'
@@ -25,6 +27,7 @@ export const errorHandler: ErrorRequestHandler = (error: unknown, req, res, next
     req.log.error({ err: error }, 'request failed')
     problem.message += ` Reference: ${String(req.id)}`
   }
+  if (error instanceof TooManyRequestsError) res.set('Retry-After', String(error.retryAfter))
   if (error instanceof MethodNotAllowedError) res.set('Allow', error.allowed.join(', '))
   res.status(PROBLEMS[problem.code].status).json(problem)
 }
@@ -44,9 +47,11 @@ function toProblem(error: unknown): Problem {
 
 const CODES = [
   [NotFoundError, 'not-found'],
+  [SignInRequiredError, 'sign-in-required'],
   [ForbiddenError, 'forbidden'],
   [ConflictError, 'conflict'],
   [UnavailableError, 'unavailable'],
+  [TooManyRequestsError, 'too-many-requests'],
   [MethodNotAllowedError, 'method-not-allowed'],
   [UnsupportedMediaTypeError, 'unsupported-media-type'],
 ] as const

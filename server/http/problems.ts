@@ -5,6 +5,7 @@ export const PROBLEMS: Readonly<Record<ProblemCode, { status: number; meaning: s
   'invalid-json': { status: 400, meaning: 'The body is not JSON' },
   'invalid-input': { status: 400, meaning: 'A field has the wrong shape or type' },
   'bad-request': { status: 400, meaning: 'The request cannot be read' },
+  'sign-in-required': { status: 401, meaning: 'Nobody is signed in' },
   forbidden: { status: 403, meaning: 'The account may not do this' },
   'not-found': { status: 404, meaning: 'It does not exist' },
   'method-not-allowed': { status: 405, meaning: 'The address has no such method' },
@@ -15,6 +16,7 @@ export const PROBLEMS: Readonly<Record<ProblemCode, { status: number; meaning: s
     meaning: 'The body is not sent as JSON in a known encoding',
   },
   'out-of-range': { status: 422, meaning: 'A field lies outside its range' },
+  'too-many-requests': { status: 429, meaning: 'Too many attempts; try again later' },
   internal: { status: 500, meaning: 'The server failed; the fault is in its log' },
   unavailable: { status: 503, meaning: 'The server cannot do its work at present' },
 }

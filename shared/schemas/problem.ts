@@ -5,6 +5,7 @@ export const PROBLEM_CODES = [
   'invalid-json',
   'invalid-input',
   'bad-request',
+  'sign-in-required',
   'forbidden',
   'not-found',
   'method-not-allowed',
@@ -12,6 +13,7 @@ export const PROBLEM_CODES = [
   'too-large',
   'unsupported-media-type',
   'out-of-range',
+  'too-many-requests',
   'internal',
   'unavailable',
 ] as const

@@ -1,29 +1,22 @@
-import { Router } from 'express'
 import { z } from 'zod'
-import { allowOnly, type ApiModule, type Operation } from '../../http/api-module'
+import { defineOperation, type Operation } from '../../http/operation'
 import { describeApi } from './openapi.service'
 
-const PATH = '/api/openapi.json'
-
-/** Describes the modules that it is given, and itself. */
-export function openapiModule(version: string, modules: readonly ApiModule[]): ApiModule {
-  const own: Operation = {
+/** Describes the operations that it is given, and itself. */
+export function openapiOperations(
+  version: string,
+  operations: readonly Operation[],
+): readonly Operation[] {
+  const own: Operation = defineOperation({
     method: 'get',
-    path: PATH,
+    path: '/api/openapi.json',
     id: 'readOpenApi',
     summary: 'This document',
+    rule: 'open',
     response: z.looseObject({ openapi: z.string() }),
-    problems: ['method-not-allowed'],
-  }
-  const operations = [...modules.flatMap((module) => module.operations), own]
-  const document = describeApi(version, operations)
-
-  const router = Router()
-  router
-    .route(PATH)
-    .get((_req, res) => {
-      res.json(document)
-    })
-    .all(allowOnly('GET', 'HEAD'))
-  return { router, operations: [own] }
+    problems: [],
+    handle: (): unknown => document,
+  })
+  const document = describeApi(version, [...operations, own])
+  return [own]
 }

@@ -1,6 +1,7 @@
 import { z } from 'zod'
 import { type ProblemCode, problemSchema } from '../../../shared/schemas/problem'
-import type { Operation } from '../../http/api-module'
+import { ACCESS_RULES } from '../../../shared/access/rules'
+import { openapiPath, type Operation } from '../../http/operation'
 import { PROBLEMS } from '../../http/problems'
 
 const COMPONENTS = '#/components/schemas/'
@@ -11,8 +12,9 @@ type JsonObject = Record<string, unknown>
 export function describeApi(version: string, operations: readonly Operation[]): JsonObject {
   const paths: Record<string, JsonObject> = {}
   for (const operation of operations) {
-    paths[operation.path] = {
-      ...paths[operation.path],
+    const path = openapiPath(operation.path)
+    paths[path] = {
+      ...paths[path],
       [operation.method]: describeOperation(operation),
     }
   }
@@ -32,16 +34,50 @@ export function describeApi(version: string, operations: readonly Operation[]): 
   }
 }
 
-function describeOperation({ id, summary, request, response, problems }: Operation): JsonObject {
+function describeOperation(operation: Operation): JsonObject {
+  const { id, summary, rule, request, path } = operation
+  const parameters = [...path.matchAll(/:(\w+)/g)].map(([, name]) => ({
+    name,
+    in: 'path',
+    required: true,
+    schema: { type: 'string' },
+  }))
   return {
     operationId: id,
     summary,
+    description: `Access: ${ACCESS_RULES[rule].meaning}.`,
+    ...(parameters.length > 0 ? { parameters } : {}),
     ...(request ? { requestBody: { required: true, content: json(request, 'input') } } : {}),
     responses: {
-      200: { description: 'The answer', content: json(response, 'output') },
-      ...describeProblems([...problems, 'internal']),
+      ...describeSuccess(operation),
+      ...describeProblems(problemsOf(operation)),
     },
   }
+}
+
+function describeSuccess({ response, mediaType, status }: Operation): JsonObject {
+  if (mediaType !== undefined) {
+    const content = { [mediaType]: { schema: { type: 'string' } } }
+    return { [status ?? 200]: { description: 'The answer', content } }
+  }
+  if (!response) return { [status ?? 204]: { description: 'Done' } }
+  return { [status ?? 200]: { description: 'The answer', content: json(response, 'output') } }
+}
+
+/** What can go wrong on a route: its own problems, and those that its kind brings. */
+function problemsOf({ rule, request, problems, path }: Operation): readonly ProblemCode[] {
+  const ofBody = ['invalid-json', 'invalid-input', 'bad-request', 'too-large'] as const
+  const ofAccess = ['sign-in-required', 'forbidden'] as const
+  return [
+    ...new Set<ProblemCode>([
+      ...problems,
+      ...(request ? [...ofBody, 'unsupported-media-type' as const] : []),
+      ...(rule === 'open' ? [] : ofAccess),
+      ...(path.includes(':') ? (['not-found'] as const) : []),
+      'method-not-allowed',
+      'internal',
+    ]),
+  ]
 }
 
 /** One response per status; two problems that share a status share its description. */
@@ -73,7 +109,7 @@ function describeComponents(operations: readonly Operation[]): JsonObject {
   add(problemSchema, 'output')
   for (const { request, response } of operations) {
     if (request) add(request, 'input')
-    add(response, 'output')
+    if (response) add(response, 'output')
   }
   return withComponentPaths(components)
 }
