@@ -237,9 +237,7 @@ export const quickCheckTexts = {
     linkCopied: 'The link is copied.',
     textCopied: 'Two lines are copied.',
     notCopied: 'The browser did not let the page copy. Select and copy it here:',
-    saved: 'The drawing is saved.',
     notSaved: 'The drawing could not be saved.',
-    fileName: 'toehold-cross-section',
   },
   asText: {
     first: '{verdict}: {water}; {holdsTo}. {leave} Governs: {governs}.',

@@ -1,6 +1,8 @@
 import { evaluateSection } from '@shared/checks/evaluate-section'
+import type { LeaveLevel } from '@shared/checks/leave-level'
+import type { SectionMarks } from '@shared/drawing/cross-section'
 import type { SectionCase } from '@shared/schemas/section-case'
-import type { Verdict } from '@shared/schemas/section-result'
+import type { HoldsTo, Verdict } from '@shared/schemas/section-result'
 
 export type MarkId = 'low' | 'expected' | 'high'
 
@@ -29,4 +31,22 @@ function markAt(section: SectionCase, id: MarkId, depth: number): WaterMark {
   if (depth > 1.5 * section.barrier.diameter) return { id, depth, verdict: 'beyond' }
   const { verdict } = evaluateSection({ ...section, water: { ...section.water, depth } })
   return { id, depth, verdict }
+}
+
+/** Marks of the drawing: the band of the water, what holds, and when to leave. */
+export function drawnMarks(
+  marks: readonly WaterMark[],
+  holdsTo: HoldsTo,
+  leave: Pick<LeaveLevel, 'depth'>,
+): SectionMarks {
+  const depthOf = (wanted: MarkId) => {
+    const mark = marks.find(({ id }) => id === wanted)
+    return mark && mark.depth > 0 ? mark.depth : null
+  }
+  return {
+    low: depthOf('low'),
+    high: depthOf('high'),
+    holdsTo: holdsTo.from === null ? null : holdsTo.depth,
+    leave: leave.depth,
+  }
 }
