@@ -67,3 +67,6 @@ export const meta = sqliteTable('meta', {
   key: text().primaryKey(),
   value: text().notNull(),
 })
+
+export * from './tables/accounts'
+export * from './tables/projects'

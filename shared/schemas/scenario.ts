@@ -1,5 +1,6 @@
 import { z } from 'zod'
 import { sectionCaseSchema } from './section-case'
+import { CHECK_IDS, VERDICTS } from './section-result'
 
 const parts = sectionCaseSchema.shape
 const metres = (meaning: string) => z.number().meta({ unit: 'm', description: meaning })
@@ -51,3 +52,21 @@ export const scenarioContentSchema = z.strictObject({
   timeToClear: z.number().default(1200).meta({ unit: 's' }),
 })
 export type ScenarioContent = z.output<typeof scenarioContentSchema>
+
+/** What the server computed from a scenario: the line's answer in a few figures. */
+export const scenarioSummarySchema = z.strictObject({
+  verdict: z.enum(VERDICTS),
+  waterLevel: metres('Level that was checked'),
+  /** The section that gives way first. */
+  weakest: z.strictObject({
+    from: metres('Chainage'),
+    to: metres('Chainage'),
+    place: metres('Chainage of its lowest ground'),
+    check: z.enum(CHECK_IDS).nullable(),
+    utilisation: z.number().nullable(),
+  }),
+  holdsToLevel: metres('Level to which the whole line holds; null: nothing holds').nullable(),
+  sections: z.number().int().meta({ description: 'Number of sections' }),
+  failing: z.number().int().meta({ description: 'Sections that do not hold or are not checked' }),
+})
+export type ScenarioSummary = z.output<typeof scenarioSummarySchema>
