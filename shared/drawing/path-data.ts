@@ -1,8 +1,16 @@
-import type { ArrowsItem, Arrow, ArrowStyle, Point } from './scene'
+import type { ArrowsItem, Arrow, ArrowStyle, CircleItem, Point, ShapeItem } from './scene'
 
-/** A coordinate to a hundredth of a pixel, as SVG writes it. */
-function coordinate(value: number): string {
-  return String(Math.round(value * 100) / 100 || 0)
+/**
+ * A coordinate to a hundredth of a pixel, as SVG writes it. Put together from whole numbers: a drag
+ * writes a thousand of them for each frame, and printing a fraction costs several times as much.
+ */
+export function coordinate(value: number): string {
+  const hundredths = Math.round(Math.abs(value) * 100)
+  const whole = Math.trunc(hundredths / 100)
+  const rest = hundredths - whole * 100
+  const sign = value < 0 && hundredths > 0 ? '-' : ''
+  if (rest === 0) return `${sign}${whole}`
+  return rest < 10 ? `${sign}${whole}.0${rest}` : `${sign}${whole}.${rest}`
 }
 
 function pair(point: Point): string {
@@ -31,6 +39,20 @@ export function segmentsPath(segments: readonly (readonly [Point, Point])[]): st
   let d = ''
   for (const [from, to] of segments) d += `M${pair(from)}L${pair(to)}`
   return d
+}
+
+/** Path data of a circle. */
+export function circlePath({ cx, cy, r }: CircleItem): string {
+  const across = coordinate(2 * r)
+  const radius = coordinate(r)
+  const half = `a${radius} ${radius} 0 1 0 `
+  return `M${pair({ x: cx - r, y: cy })}${half}${across} 0${half}-${across} 0Z`
+}
+
+/** Path data of any item that is not a text. */
+export function shapePath(item: ShapeItem): string {
+  if (item.kind === 'path') return item.d
+  return item.kind === 'circle' ? circlePath(item) : arrowsPath(item)
 }
 
 /** Outline of one arrow: shaft and head in one closed shape; a short arrow gets a smaller head. */

@@ -8,7 +8,7 @@ import {
   type Theme,
   type ThemeName,
 } from './paints'
-import { arrowsPath } from './path-data'
+import { coordinate, shapePath } from './path-data'
 import type { Scene, SceneItem, ShapeRole, TextItem } from './scene'
 
 /** What a file needs beside the scene. */
@@ -76,26 +76,15 @@ function gradients(scene: Scene, theme: Theme): string {
 }
 
 function itemToSvg(item: SceneItem, theme: Theme, resolve: ResolveText): string {
-  switch (item.kind) {
-    case 'path':
-      return `<path d="${item.d}"${paintAttributes(item.role, theme)}/>`
-    case 'arrows':
-      return `<path d="${arrowsPath(item)}"${paintAttributes(item.role, theme)}/>`
-    case 'circle':
-      return (
-        `<circle cx="${short(item.cx)}" cy="${short(item.cy)}" r="${short(item.r)}"` +
-        `${paintAttributes(item.role, theme)}/>`
-      )
-    case 'text':
-      return textToSvg(item, theme, resolve)
-  }
+  if (item.kind === 'text') return textToSvg(item, theme, resolve)
+  return `<path d="${shapePath(item)}"${paintAttributes(item.role, theme)}/>`
 }
 
 function textToSvg(item: TextItem, theme: Theme, resolve: ResolveText): string {
   const anchor = item.anchor === 'start' ? '' : ` text-anchor="${item.anchor}"`
   const weight = item.weight === 400 ? '' : ` font-weight="${item.weight}"`
   return (
-    `<text x="${short(item.x)}" y="${short(item.y)}" font-size="${item.size}"${weight}${anchor} ` +
+    `<text x="${coordinate(item.x)}" y="${coordinate(item.y)}" font-size="${item.size}"${weight}${anchor} ` +
     `fill="${theme[TEXT_TONES[item.role]]}"${item.hasHalo ? halo(theme) : ''}>${escapeXml(resolve(item.message))}</text>`
   )
 }
@@ -103,10 +92,6 @@ function textToSvg(item: TextItem, theme: Theme, resolve: ResolveText): string {
 function halo(theme: Theme): string {
   const width = `stroke-width="${HALO.width}" stroke-opacity="${HALO.opacity}"`
   return ` paint-order="stroke" stroke="${theme.surface}" ${width} stroke-linejoin="round"`
-}
-
-function short(value: number): string {
-  return String(Math.round(value * 100) / 100 || 0)
 }
 
 function paintAttributes(role: ShapeRole, theme: Theme): string {

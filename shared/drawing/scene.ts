@@ -133,7 +133,10 @@ export interface TextItem {
   readonly hasHalo?: true
 }
 
-export type SceneItem = PathItem | CircleItem | ArrowsItem | TextItem
+/** Everything but texts. */
+export type ShapeItem = PathItem | CircleItem | ArrowsItem
+
+export type SceneItem = ShapeItem | TextItem
 
 /**
  * A drawing without a medium: page, SVG file and PDF all paint it. One drawing unit is one CSS pixel

@@ -112,7 +112,8 @@ function axisOf(
   usableWidth: number,
 ): CutAxis {
   const spare = usableWidth - scale * (extent.left + extent.right)
-  if (spare >= 0) return wholeAxis(layout.gutterLeft + spare * 0.6 + scale * extent.left, scale)
+  // Rounding must not cut a skirt that just fits.
+  if (spare >= -0.01) return wholeAxis(layout.gutterLeft + spare * 0.6 + scale * extent.left, scale)
   const originPx = layout.gutterLeft + usableWidth - scale * extent.right
   const skirtPx = originPx - layout.gutterLeft - CUT_GAP
   const edgePart = (layout.name === 'narrow' ? 0.62 : 0.5) * skirtPx
