@@ -32,6 +32,8 @@ export interface OperationFor<Rule extends RuleId> {
   readonly id: string
   readonly summary: string
   readonly rule: Rule
+  /** What may stand behind the question mark of the address: search, order, page. */
+  readonly query?: z.ZodObject
   readonly request?: z.ZodType
   /** Body of the answer; left out where there is none, or where it is no JSON. */
   readonly response?: z.ZodType
