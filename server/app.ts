@@ -5,7 +5,7 @@ import type { Db } from './db/client'
 import type { Env } from './env'
 import { NotFoundError } from './errors'
 import { errorHandler } from './http/error-handler'
-import { receiveJsonText } from './http/json-body'
+import { receiveJsonText, receiveLongJsonText } from './http/json-body'
 import { mountOperations, type Access } from './http/mount-operations'
 import { securityHeaders } from './http/security-headers'
 import { site } from './http/site'
@@ -37,6 +37,7 @@ export function createApp({ db, env, logger, version, siteFolder }: AppParts): E
     res.set('Cache-Control', 'no-store')
     next()
   })
+  app.use('/api/projects', receiveLongJsonText)
   app.use(receiveJsonText)
 
   const operations = [

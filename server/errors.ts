@@ -11,6 +11,14 @@ export class ForbiddenError extends Error {
 /** It contradicts what is already there (HTTP 409). */
 export class ConflictError extends Error {
   override readonly name = 'ConflictError'
+
+  constructor(
+    message: string,
+    /** What is there now, where the answer shows it beside what was sent. */
+    readonly current?: Readonly<Record<string, unknown>>,
+  ) {
+    super(message)
+  }
 }
 
 /** Something that the server needs does not answer (HTTP 503). */

@@ -10,7 +10,7 @@ import {
   TooManyRequestsError,
   UnavailableError,
 } from '../errors'
-import { MethodNotAllowedError, UnsupportedMediaTypeError } from './http-errors'
+import { MethodNotAllowedError, TooLargeError, UnsupportedMediaTypeError } from './http-errors'
 import { PROBLEMS } from './problems'
 
 /** More than a form or a list can have by honest mistake; keeps an answer shorter than its request. */
@@ -38,10 +38,13 @@ function toProblem(error: unknown): Problem {
   if (error instanceof InvalidJsonError) {
     return problem('invalid-json', `The body is not JSON: ${error.message}`)
   }
+  if (error instanceof ConflictError && error.current) {
+    return { ...problem('conflict', error.message), current: error.current }
+  }
   const code = codeOf(error)
   if (code && error instanceof Error) return problem(code, error.message)
   const parserCode = codeOfStatus(error)
-  if (parserCode) return problem(parserCode, `${PROBLEMS[parserCode].meaning}.`)
+  if (parserCode) return problem(parserCode, limitOf(error) ?? `${PROBLEMS[parserCode].meaning}.`)
   return problem('internal', 'Something went wrong on the server; the fault is in its log.')
 }
 
@@ -53,6 +56,7 @@ const CODES = [
   [UnavailableError, 'unavailable'],
   [TooManyRequestsError, 'too-many-requests'],
   [MethodNotAllowedError, 'method-not-allowed'],
+  [TooLargeError, 'too-large'],
   [UnsupportedMediaTypeError, 'unsupported-media-type'],
 ] as const
 
@@ -66,6 +70,12 @@ function codeOfStatus(error: unknown): ProblemCode | undefined {
   if (status === 413) return 'too-large'
   if (status === 415) return 'unsupported-media-type'
   return status >= 400 && status < 500 ? 'bad-request' : undefined
+}
+
+/** The limit that a parser of bodies found passed, in words. */
+function limitOf(error: unknown): string | undefined {
+  const limit = error instanceof Error && 'limit' in error ? Number(error.limit) : NaN
+  return Number.isFinite(limit) ? `The body is larger than ${limit / 1000} kB.` : undefined
 }
 
 function problem(code: ProblemCode, message: string): Problem {

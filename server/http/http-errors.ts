@@ -14,3 +14,8 @@ export class MethodNotAllowedError extends Error {
 export class UnsupportedMediaTypeError extends Error {
   override readonly name = 'UnsupportedMediaTypeError'
 }
+
+/** What was sent is larger than the address takes (HTTP 413). */
+export class TooLargeError extends Error {
+  override readonly name = 'TooLargeError'
+}

@@ -7,6 +7,12 @@ const JSON_TYPES = ['application/json', 'application/*+json']
 /** 256 kB: more than the longest list that is answered needs. */
 const BODY_LIMIT = 256_000
 
+/** 2 MB: a survey of 5000 stations, or a scenario with 2000 sizes. */
+const LONG_BODY_LIMIT = 2_000_000
+
+/** For addresses that take whole surveys; it goes before the other. */
+export const receiveLongJsonText = express.text({ type: JSON_TYPES, limit: LONG_BODY_LIMIT })
+
 /** Takes the body in as text, so that the API reads JSON exactly as the batch command does. */
 export const receiveJsonText = express.text({ type: JSON_TYPES, limit: BODY_LIMIT })
 

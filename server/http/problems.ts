@@ -10,7 +10,7 @@ export const PROBLEMS: Readonly<Record<ProblemCode, { status: number; meaning: s
   'not-found': { status: 404, meaning: 'It does not exist' },
   'method-not-allowed': { status: 405, meaning: 'The address has no such method' },
   conflict: { status: 409, meaning: 'It contradicts what is already there' },
-  'too-large': { status: 413, meaning: 'The body is larger than 256 kB' },
+  'too-large': { status: 413, meaning: 'The body is larger than the address takes' },
   'unsupported-media-type': {
     status: 415,
     meaning: 'The body is not sent as JSON in a known encoding',

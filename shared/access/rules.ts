@@ -17,6 +17,11 @@ export const ACCESS_RULES = {
   open: { account: 'anyone', meaning: 'Anyone, without an account' },
   'signed-in': { account: 'signed-in', meaning: 'Any account, for what is its own' },
   'make-project': { account: ['engineer'], meaning: 'Engineers make projects' },
+  'copy-project': {
+    account: ['engineer'],
+    member: WRITERS,
+    meaning: 'Engineers who lead or edit a project make a copy of it',
+  },
   'read-project': {
     account: 'signed-in',
     member: ALL_MEMBERS,

@@ -34,6 +34,10 @@ export const problemSchema = z
     code: z.enum(PROBLEM_CODES),
     message: z.string(),
     fields: z.array(problemFieldSchema).meta({ description: 'Empty unless fields were refused' }),
+    current: z
+      .looseObject({})
+      .optional()
+      .meta({ description: 'What is there now, where a save was made on an older version' }),
   })
   .meta({ id: 'Problem', description: 'Why a request was refused or could not be answered' })
 export type Problem = z.infer<typeof problemSchema>
