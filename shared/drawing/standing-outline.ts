@@ -7,6 +7,9 @@ import type { LastStanding } from './cross-section/section-input'
 /** The last standing depth is found to this width, in diameters: below a pixel. */
 const PRECISION = 1e-5
 
+/** Shallower water [m] bends nothing that could be seen, and its curves would be lost in rounding. */
+const SHALLOWEST = 1e-6
+
 function shapeAt(section: SectionCase, depth: number): StandingShape | null {
   const geometry = sectionGeometry({ ...section, water: { ...section.water, depth } })
   const { diameter, airPressure, skirtLength } = section.barrier
@@ -32,7 +35,8 @@ function outlineOf(section: SectionCase, shape: StandingShape, depth: number): L
 
 /** Outline of the tube at the depth of the case; null where it does not stand. */
 export function standingOutline(section: SectionCase): LoadedOutline | null {
-  const { depth } = section.water
+  const { depth: water } = section.water
+  const depth = water < SHALLOWEST && section.barrier.skirtLength > 0 ? 0 : water
   const shape = shapeAt(section, depth)
   return shape && outlineOf(section, shape, depth)
 }

@@ -1,6 +1,7 @@
 import type { Message } from '../../texts/format-text'
 import { drawingText, type Composition } from './composition'
-import { frictionResistance } from './forces'
+import { slopeRun } from './section-frame'
+import { frictionResistance } from './friction'
 import { failureMessages } from './notices'
 
 /** The drawing in sentences: what stands where, what acts, and how it ends. */
@@ -24,8 +25,8 @@ function barrierSentences({ input }: Composition): readonly Message[] {
     skirt: { value: skirtLength, kind: 'length' },
     pressure: { value: airPressure, kind: 'pressure' },
   })
-  if (fall === 0) return [sentence]
-  const run = Math.round(1 / Math.abs(fall))
+  const run = slopeRun(fall)
+  if (run === null) return [sentence]
   return [sentence, drawingText(fall > 0 ? 'describe.fallsToDry' : 'describe.fallsToWet', { run })]
 }
 

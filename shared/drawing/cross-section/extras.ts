@@ -98,6 +98,12 @@ function drawDebris(drawing: Composition): void {
   )
 }
 
+/** Room between the log and the wet edge of the drawing [px]. */
+const WET_EDGE = 22
+
+/** The middle of the log lies this share of its radius below the surface. */
+const SUNK = 0.4
+
 interface Log {
   readonly centre: Point
   readonly radius: number
@@ -106,16 +112,22 @@ interface Log {
 function floatingLog({ frame, input, body }: Composition): Log {
   const { depth } = input.case.water
   const radius = (frame.scale * Math.min(input.case.debris.draught, depth)) / 2
-  const shown = Math.max(4, Math.min(radius, 0.25 * frame.scale * input.case.barrier.diameter))
+  const surface = levelY(frame, depth)
+  const mostByTube = 0.25 * frame.scale * input.case.barrier.diameter
+  const mostByView = (surface - TOP_EDGE) / (1 - SUNK)
+  const shown = Math.max(4, Math.min(radius, mostByTube, mostByView))
   const left = Math.min(...body.wetFace.slice(1).map(({ x }) => x), body.centre.x)
   const face = Math.max(left, body.centre.x - frame.scale * input.case.barrier.diameter * 0.55)
-  return { centre: { x: face - shown - 3, y: levelY(frame, depth) + shown * 0.4 }, radius: shown }
+  const x = Math.max(shown + WET_EDGE, face - shown - 3)
+  return { centre: { x, y: surface + shown * SUNK }, radius: shown }
 }
 
 function debrisArrow({ frame, input }: Composition, { centre, radius }: Log): Arrow {
   const y = levelY(frame, input.case.water.depth)
   const to = { x: centre.x - radius - 3, y }
-  return { from: { x: to.x - frame.forceScale * input.evaluation.thrust.debris, y }, to }
+  const length = frame.forceScale * input.evaluation.thrust.debris
+  const shift = Math.max(0, length + 4 - to.x)
+  return { from: { x: to.x - length + shift, y }, to: { x: to.x + shift, y } }
 }
 
 /** What moves and floats, in words. */

@@ -1,8 +1,8 @@
 import { upliftShare } from '../../calc/uplift/uplift-share'
-import type { Point } from '../scene'
+import type { Arrow } from '../scene'
 import { crossing } from './body-shape'
 import type { Composition } from './composition'
-import { levelY } from './section-frame'
+import { levelY, type SectionFrame } from './section-frame'
 import type { CrossSectionInput } from './section-input'
 
 /** Head of water that acts upwards under the skirt [m], at a distance from its wet edge. */
@@ -17,19 +17,6 @@ export function upliftHead(input: CrossSectionInput): UpliftHead {
   const edgeDepth = Math.max(0, water.depth - barrier.skirtLength * sin)
   const excess = uplift.edgeFactor * edgeDepth - water.dryDepth
   return (fromEdge) => water.dryDepth + excess * upliftShare(uplift, base, fromEdge)
-}
-
-/**
- * Friction that the skirt can give, μ N with
- * `N = ρg(L_w h − ½ L_w² sin β) + (W_b − V_lift − V_dry) cos β − F sin β − U` [N/m].
- */
-export function frictionResistance(input: CrossSectionInput): number {
-  const { thrust, vertical } = input.evaluation
-  const { fall, friction } = input.case.ground
-  const cos = 1 / Math.hypot(1, fall)
-  const square = vertical.waterOnSkirt + vertical.lift - vertical.uplift
-  const upright = vertical.self - vertical.lift - vertical.dryLift
-  return friction * (square + upright * cos - thrust.total * fall * cos)
 }
 
 /** Length of the pressure arrow at a depth below the wet surface [px]. */
@@ -50,7 +37,7 @@ export function diagramX(drawing: Composition, y: number): number {
 }
 
 /** The thrust as an arrow; null where there is none, or it has no one arm. */
-export function thrustArrow(drawing: Composition): { from: Point; to: Point } | null {
+export function thrustArrow(drawing: Composition): Arrow | null {
   const { input, frame, body } = drawing
   const { total, arm } = input.evaluation.thrust
   if (total === 0 || arm === null) return null
@@ -61,6 +48,17 @@ export function thrustArrow(drawing: Composition): { from: Point; to: Point } | 
     const to = { x: diagramX(drawing, y) - 6, y }
     return { from: { x: to.x - length, y }, to }
   }
-  const to = { x: body.right + 8, y }
-  return { from: { x: to.x - length, y }, to }
+  return movedInside(frame, {
+    from: { x: body.right + 8 - length, y },
+    to: { x: body.right + 8, y },
+  })
+}
+
+/** Room that an arrow keeps to the dry edge of the drawing [px]. */
+const DRY_EDGE = 6
+
+/** An arrow on the dry side, moved over the tube where it would leave the drawing. */
+export function movedInside({ width }: SectionFrame, { from, to }: Arrow): Arrow {
+  const over = Math.max(0, Math.max(from.x, to.x) - (width - DRY_EDGE))
+  return { from: { x: from.x - over, y: from.y }, to: { x: to.x - over, y: to.y } }
 }

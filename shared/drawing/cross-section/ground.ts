@@ -28,8 +28,9 @@ function hatching(drawing: Composition): [Point, Point][] {
   for (let x = GROUP / 2; x < frame.width - 4; x += GROUP) {
     for (let index = 0; index < STROKES; index++) {
       const from = x + index * STROKE
-      if (isCut(drawing, from)) continue
+      if (from > frame.width || isCut(drawing, from)) continue
       const y = groundYAt(frame, from)
+      if (y < 0 || y + LENGTH > frame.height) continue
       strokes.push([
         { x: from, y },
         { x: Math.max(0, from - LENGTH), y: y + LENGTH },

@@ -29,7 +29,7 @@ export function drawLegend(drawing: Composition): void {
   for (const sample of samples(drawing)) {
     const label = quietLabel(
       drawing,
-      `scale-${sample.id}`,
+      `scale-${sample.id}-value`,
       drawingText('scaleValue', { value: sample.quantity }),
     )
     const textX = x - placer.width(label)

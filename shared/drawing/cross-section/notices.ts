@@ -1,6 +1,6 @@
 import type { Message } from '../../texts/format-text'
 import { drawingText, quietLabel, valueLabel, type Composition } from './composition'
-import { groundYAt, levelY } from './section-frame'
+import { groundYAt, levelY, slopeRun } from './section-frame'
 
 /** Names of the two sides, where every drawing has them. */
 export function labelSides(drawing: Composition): void {
@@ -108,8 +108,8 @@ function labelDryWater(drawing: Composition): void {
 
 function labelFall(drawing: Composition): void {
   const { frame, placer } = drawing
-  if (frame.fall === 0) return
-  const run = Math.round(1 / Math.abs(frame.fall))
+  const run = slopeRun(frame.fall)
+  if (run === null) return
   const name = frame.fall > 0 ? 'fallsToDry' : 'fallsToWet'
   const ground = groundYAt(frame, frame.width - 80)
   placer.place(quietLabel(drawing, 'fall', drawingText(name, { run }), 'labelGround'), [

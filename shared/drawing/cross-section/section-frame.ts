@@ -2,6 +2,7 @@ import type { LoadedOutline } from '../../calc/loaded-shape/loaded-outline'
 import { niceAbove } from '../nice-ticks'
 import type { Point } from '../scene'
 import { cutAxis, wholeAxis, type CutAxis } from './cut-axis'
+import { frictionResistance } from './friction'
 import { layoutFor, type SectionLayout } from './layout'
 import type { CrossSectionInput } from './section-input'
 
@@ -37,11 +38,14 @@ const CUT_GAP = 14
 /** Pressure arrows are drawn at less than this share of true head, below the thrust at a third. */
 const HEAD_SHARE = 0.28
 
+/** The drawing reaches at least so far to the wet side of the weld line, in diameters. */
+const LEAST_LEFT = 0.8
+
 /** Share of the spare height that goes above the water. */
 const SPARE_ABOVE = 0.72
 
 /** How far to the dry side a firm tube reaches under load, in diameters from the weld line. */
-const ROLLED = 0.9
+const ROLLED = 0.93
 
 /** Extent of the drawing in metres around the weld line. */
 interface Extent {
@@ -68,18 +72,19 @@ export function sectionFrame(input: CrossSectionInput): SectionFrame {
       ? Math.min(byWidth, byHeight)
       : Math.max(byWidth, Math.min(byHeight, (0.5 * usableWidth) / extent.right))
   const spare = usableHeight - scale * (extent.above + extent.below)
+  const axis = axisOf(extent, scale, layout, usableWidth)
   return {
     layout,
     width: view.width,
     height: view.height,
     scale,
     groundY: layout.top + scale * extent.above + spare * SPARE_ABOVE,
-    axis: axisOf(extent, scale, layout, usableWidth),
+    axis,
     sin,
     cos,
     fall,
     headScale: headScaleOf(input, layout, scale, sin),
-    forceScale: forceScaleOf(input, view.width),
+    forceScale: forceScaleOf(input, axis, layout),
   }
 }
 
@@ -88,7 +93,7 @@ function extentOf(input: CrossSectionInput, sin: number, cos: number): Extent {
   const nominal = diameter * (ROLLED + Math.abs(sin) / 2)
   const outline = input.outline ?? input.lastStanding?.outline
   const right = Math.max(nominal, outline ? farthest(outline) : 0)
-  const left = skirtLength * cos
+  const left = Math.max(skirtLength * cos, LEAST_LEFT * diameter)
   const wetRise = sin * (skirtLength + 0.4 * diameter)
   const dryRise = -sin * (right + 0.6 * diameter)
   return {
@@ -102,7 +107,7 @@ function extentOf(input: CrossSectionInput, sin: number, cos: number): Extent {
 function farthest(outline: LoadedOutline): number {
   let right = 0
   for (const { x } of outline.drySkin) right = Math.max(right, x)
-  return right * 1.02
+  return right
 }
 
 function axisOf(
@@ -138,22 +143,53 @@ function headScaleOf(
   return Math.min(layout.pressureMax / greatest, HEAD_SHARE * scale)
 }
 
+/** Longest force arrow: this share of the width, between these lengths [px]. */
+const FORCE_SHARE = 0.32
+const FORCE_LENGTHS = { least: 110, most: 330 } as const
+
+/** Kept free at the wet edge of the drawing [px]. */
+const WET_EDGE = 26
+
 /**
  * Thrust at the greatest depth and friction at a depth of one diameter fix the scale, so that it
  * stays while the water moves; only unusual forces (debris, waves) make it smaller, by nice steps.
  */
-function forceScaleOf(input: CrossSectionInput, width: number): number {
+function forceScaleOf(input: CrossSectionInput, axis: CutAxis, layout: SectionLayout): number {
   const { barrier, ground, water, gravity } = input.case
-  const { thrust, vertical } = input.evaluation
   const weight = water.density * gravity
   const { diameter, skirtLength, contactWidth } = barrier
   const greatest = Math.max(
     (weight * (GREATEST_DEPTH * diameter) ** 2) / 2,
     0.6 * ground.friction * weight * (skirtLength + contactWidth) * diameter,
   )
-  const present = Math.max(Math.abs(thrust.total), ground.friction * vertical.net)
+  const present = greatestForce(input)
   const reference = present > greatest ? niceAbove(present) : greatest
-  return Math.min(330, Math.max(110, 0.32 * width)) / reference
+  const { least, most } = FORCE_LENGTHS
+  const wanted = Math.min(most, Math.max(least, FORCE_SHARE * input.view.width))
+  const face = axis.toPx(-0.55 * diameter)
+  return Math.max(1, Math.min(wanted, face - layout.pressureMax - WET_EDGE)) / reference
+}
+
+/** The greatest force that one arrow shows. */
+function greatestForce(input: CrossSectionInput): number {
+  const { thrust, sliding } = input.evaluation
+  const friction = Math.max(0, frictionResistance(input))
+  return Math.max(
+    Math.abs(thrust.total),
+    thrust.debris,
+    thrust.dry,
+    friction,
+    friction * (sliding.utilisation ?? 0),
+  )
+}
+
+/** Flatter ground than 1 in this many is called level in words. */
+const FLATTEST = 1000
+
+/** The slope as "1 in …"; null where the ground is as good as level. */
+export function slopeRun(fall: number): number | null {
+  const run = Math.round(1 / Math.abs(fall))
+  return run > FLATTEST ? null : run
 }
 
 /** From the axes of the section (along the ground and square to it) [m] to the scene [px]. */

@@ -9,7 +9,8 @@ import {
   valueLabel,
   type Composition,
 } from './composition'
-import { frictionResistance, thrustArrow } from './forces'
+import { movedInside, thrustArrow } from './forces'
+import { frictionResistance } from './friction'
 import { crossing } from './body-shape'
 import { groundYAt, levelY, toScene } from './section-frame'
 import { reversed } from '../path-data'
@@ -32,7 +33,7 @@ function drawDryThrust(drawing: Composition): void {
   const y = levelY(frame, input.case.water.dryDepth / 3)
   const x = (crossing(reversed(body.dryFace), y)?.x ?? body.right) + 4
   addArrows(drawing, 'dry-thrust', 'force', [
-    { from: { x: x + frame.forceScale * dry, y }, to: { x, y } },
+    movedInside(frame, { from: { x: x + frame.forceScale * dry, y }, to: { x, y } }),
   ])
 }
 

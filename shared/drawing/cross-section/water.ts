@@ -118,9 +118,11 @@ function nappe(drawing: Composition, y: number): Point[] {
     const reach = Math.hypot(point.x - centre.x, point.y - centre.y) || 1
     const x = point.x + ((point.x - centre.x) / reach) * sheet
     const outer = point.y + ((point.y - centre.y) / reach) * sheet
-    return outer < groundYAt(frame, x) - THINNED * over ? [{ x, y: outer }] : []
+    const isClear = outer < groundYAt(frame, x) - THINNED * over
+    return isClear ? [{ x: Math.min(x, frame.width), y: outer }] : []
   })
-  const away = groundPoints(frame, (back.at(-1) ?? top).x + THINNED * over, frame.width)
+  const landing = Math.min(frame.width, (back.at(-1) ?? top).x + THINNED * over)
+  const away = groundPoints(frame, landing, frame.width)
   return [...brink, ...back, ...away.map(({ x, y: ground }) => ({ x, y: ground - THINNED * over }))]
 }
 
