@@ -35,14 +35,14 @@ export function useVerticalDrag(handlers: DragHandlers) {
   }
 
   function onPointermove(event: PointerEvent): void {
-    if (event.pointerId !== drag?.pointer) return
+    if (!drag || event.pointerId !== drag.pointer) return
     drag.y = event.clientY
     drag.frame ??= requestAnimationFrame(tell)
   }
 
   /** The last move is told at once, so that the value rests where the pointer was let go. */
   function onPointerup(event: PointerEvent): void {
-    if (event.pointerId !== drag?.pointer) return
+    if (!drag || event.pointerId !== drag.pointer) return
     if (drag.frame !== null) {
       cancelAnimationFrame(drag.frame)
       tell()
