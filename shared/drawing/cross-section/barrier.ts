@@ -114,5 +114,5 @@ export function labelBarrier(drawing: Composition): void {
     { x: frame.width - 8, y: top.y - 26, anchor: 'end' },
   ]
   if (fitsInside(drawing, placer.width(label), drop)) placer.placeSurely(label, [inside])
-  else placer.place(label, outside)
+  else if (body.state === 'standing') placer.place(label, outside)
 }

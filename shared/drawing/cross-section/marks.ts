@@ -1,4 +1,4 @@
-import { spreadColumn, type Label } from '../label-placer'
+import { spreadColumn, type Label, type Spot } from '../label-placer'
 import { areaPath, linePath, segmentsPath } from '../path-data'
 import { niceAbove } from '../nice-ticks'
 import type { Point, ShapeRole, TextRole } from '../scene'
@@ -87,18 +87,23 @@ function labelLevel(drawing: Composition): void {
   const { input, frame, placer } = drawing
   const { depth } = input.case.water
   const y = levelY(frame, depth) - 6
-  const spot = { x: levelMarkX(drawing) + 12, y, anchor: 'start' as const }
+  const mark = levelMarkX(drawing)
+  const spots: readonly Spot[] = [
+    { x: mark + 12, y, anchor: 'start' },
+    { x: mark - 12, y, anchor: 'end' },
+    { x: mark - 12, y: y - frame.layout.grip - 6, anchor: 'middle' },
+  ]
   const isNarrow = frame.layout.name === 'narrow'
   const values = heightValues(drawing, depth)
   if (values.level) {
     const name = isNarrow ? 'level' : 'levelNow'
     placer.placeSurely(
       valueLabel(drawing, 'level-value', 'labelWater', drawingText(name, values)),
-      [spot],
+      spots,
     )
   } else if (isNarrow) {
     const label = valueLabel(drawing, 'depth-value', 'labelWater', drawingText('depth', values))
-    placer.placeSurely(label, [spot])
+    placer.placeSurely(label, spots)
   }
 }
 
