@@ -9,7 +9,7 @@ import {
   type CaseInput,
   type FieldValues,
 } from '@/quick-check/case-input'
-import type { ChoiceId, Choices } from '@/quick-check/choices'
+import { CHOICE_IDS, type ChoiceId, type Choices } from '@/quick-check/choices'
 import {
   draftContent,
   draftFields,
@@ -121,12 +121,27 @@ function draftActions(fields: DraftFields, choices: Ref<Choices>, context: Draft
     setValues(figuresOf(barrier))
   }
 
+  /** Takes over what differs from the last valid input; what is being typed elsewhere stays. */
+  function take(next: CaseInput): void {
+    setValues(differingValues(valid.value.values, next.values))
+    if (!isSameChoice(valid.value.choices, next.choices)) choices.value = next.choices
+  }
+
   function load({ values, choices: chosen, refused }: AddressContent): void {
     choices.value = chosen
     for (const id of FIELD_IDS) fields[id].value = startState(values[id], refused[id])
   }
 
-  return { type, step, setValues, setDepth, choose, takeTube, load }
+  return { type, step, setValues, setDepth, choose, takeTube, take, load }
+}
+
+function differingValues(from: FieldValues, to: FieldValues): Partial<FieldValues> {
+  const changed = FIELD_IDS.filter((id) => to[id] !== from[id])
+  return Object.fromEntries(changed.map((id) => [id, to[id]]))
+}
+
+function isSameChoice(from: Choices, to: Choices): boolean {
+  return CHOICE_IDS.every((id) => from[id] === to[id])
 }
 
 /** In other units a typed figure would mean something else: it is shown converted. A text stays as it is. */

@@ -6,13 +6,7 @@ import { leaveLevel, type LeaveLevel } from '@shared/checks/leave-level'
 import { whatDecides } from '@shared/checks/what-decides'
 import type { SectionCase } from '@shared/schemas/section-case'
 import type { HoldsTo } from '@shared/schemas/section-result'
-import {
-  depthNow,
-  groundLevel,
-  sectionCase,
-  waterLevel,
-  type CaseInput,
-} from '@/quick-check/case-input'
+import type { CheckedCase } from '@/quick-check/checked-case'
 import { isSameButDepth } from '@/quick-check/same-section'
 import { statedHeight } from '@/quick-check/stated-height'
 import { nextTube } from '@/quick-check/tube'
@@ -20,11 +14,11 @@ import { waterMarks } from '@/quick-check/water-marks'
 import { useDeferred } from './useDeferred'
 
 /**
- * The answers for one valid input. What follows the water is computed for every change; what does
+ * The answers for one valid case. What follows the water is computed for every change; what does
  * not depend on it is kept while only the water moves, and deferred when anything else changes.
  */
-export function useSectionCheck(input: Ref<CaseInput>) {
-  const section = computed(() => sectionCase(input.value))
+export function useSectionCheck(input: Readonly<Ref<CheckedCase>>) {
+  const section = computed(() => input.value.section)
   const evaluation = computed<SectionEvaluation>(() => evaluateSection(section.value))
   const still = computed<SectionCase>((last) =>
     last && isSameButDepth(last, section.value) ? last : section.value,
@@ -43,16 +37,10 @@ export function useSectionCheck(input: Ref<CaseInput>) {
     const isSame = last?.depth === next.depth && last.from === next.from
     return isSame && last.check === next.check ? last : next
   })
-  const leave = computed(() => leaveOf(input.value, section.value, holdsTo.value))
-  const stated = computed(() =>
-    statedHeight(input.value.values.statedHeight, still.value, holdsTo.value),
-  )
-  const water = computed(() => ({
-    depth: section.value.water.depth,
-    level: waterLevel(input.value),
-    ground: groundLevel(input.value),
-  }))
-  const marks = computed(() => waterMarks(section.value, input.value.values.uncertainty ?? 0))
+  const leave = computed(() => leaveOf(input.value, holdsTo.value))
+  const stated = computed(() => statedHeight(input.value.statedHeight, still.value, holdsTo.value))
+  const water = computed(() => input.value.water)
+  const marks = computed(() => waterMarks(section.value, input.value.uncertainty))
 
   return {
     section,
@@ -71,14 +59,14 @@ export function useSectionCheck(input: Ref<CaseInput>) {
   }
 }
 
-function leaveOf(input: CaseInput, section: SectionCase, holdsTo: HoldsTo): LeaveLevel {
-  const { rateOfRise, clearTime } = input.values
+function leaveOf(checked: CheckedCase, holdsTo: HoldsTo): LeaveLevel {
+  const { section, depthNow, rateOfRise, timeToClear } = checked
   return leaveLevel({
     holdsToDepth: holdsTo.depth,
     depth: section.water.depth,
-    depthNow: depthNow(input),
+    depthNow,
     rateOfRise,
-    timeToClear: clearTime ?? 0,
+    timeToClear,
   })
 }
 
