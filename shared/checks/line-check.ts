@@ -42,16 +42,21 @@ export interface LineAnswer {
 /** Depth above which a case is not computed, in diameters; the same bound as of a typed depth. */
 const DEEPEST = 1.5
 
+/** Profiles by the case that they belong to, its depth left out. */
+export type HoldingProfiles = Map<string, HoldingProfile>
+
 /**
  * Checks every section of a line in one scenario. A section is its worst piece; the line is its
  * worst section. Profiles of equal sections are computed once.
+ *
+ * @param profiles Kept by whoever checks many scenarios: most of them share sizes and grounds.
  */
 export function checkLine(
   stations: readonly Station[],
   sectionLength: number,
   content: ScenarioContent,
+  profiles: HoldingProfiles = new Map(),
 ): LineAnswer {
-  const profiles = new Map<string, HoldingProfile>()
   const sections = lineSections(stations, sectionLength).map((section) =>
     answerSection(section, content, profiles),
   )
@@ -73,7 +78,7 @@ function isWeaker(a: SectionAnswer, b: SectionAnswer): boolean {
 function answerSection(
   section: LineSection,
   content: ScenarioContent,
-  profiles: Map<string, HoldingProfile>,
+  profiles: HoldingProfiles,
 ): SectionAnswer {
   const pieces = section.pieces.map((piece) => answerPiece(section, piece, content, profiles))
   const worst = pieces.reduce((a, b) => (isWorsePiece(b, a) ? b : a))
@@ -90,7 +95,7 @@ function answerPiece(
   section: LineSection,
   piece: SectionPiece,
   content: ScenarioContent,
-  profiles: Map<string, HoldingProfile>,
+  profiles: HoldingProfiles,
 ): SectionAnswer {
   const { lowestGround, lowestAt, surface } = piece
   const place = { chainage: lowestAt, groundLevel: lowestGround, surface }
@@ -136,7 +141,7 @@ function uncheckedFor(gap: NonNullable<SectionAnswer['gap']>) {
 }
 
 /** The profile does not depend on the depth: sections that differ only in it share one. */
-function keptProfile(section: SectionCase, profiles: Map<string, HoldingProfile>): HoldingProfile {
+function keptProfile(section: SectionCase, profiles: HoldingProfiles): HoldingProfile {
   const key = JSON.stringify({ ...section, water: { ...section.water, depth: 0 } })
   const kept = profiles.get(key)
   if (kept) return kept

@@ -25,18 +25,26 @@ const kept = {
   version: versionSchema,
 }
 
-/** `POST /api/projects` */
-export const newProjectSchema = z.strictObject({
+/** Fields without defaults: what a change leaves out stays as it is. */
+const projectFields = z.strictObject({
   name: nameSchema,
-  site: z.string().trim().max(200).default(''),
-  client: z.string().trim().max(200).default(''),
+  site: z.string().trim().max(200),
+  client: z.string().trim().max(200),
   datum: z.string().trim().min(1).max(60),
+  timeZone: timeZoneSchema,
+  note: noteSchema,
+})
+
+/** `POST /api/projects` */
+export const newProjectSchema = projectFields.extend({
+  site: projectFields.shape.site.default(''),
+  client: projectFields.shape.client.default(''),
   timeZone: timeZoneSchema.default('UTC'),
   note: noteSchema.default(''),
 })
 
 /** `PATCH /api/projects/:projectId` */
-export const projectChangeSchema = newProjectSchema.partial().extend({ version: versionSchema })
+export const projectChangeSchema = projectFields.partial().extend({ version: versionSchema })
 
 export const projectSchema = z
   .strictObject({
@@ -81,13 +89,17 @@ export const newMemberSchema = z.strictObject({
 export const memberChangeSchema = z.strictObject({ role: z.enum(MEMBER_ROLES) })
 
 /** `GET, POST /api/projects/:projectId/gauges`, `PATCH, DELETE …/gauges/:gaugeId` */
-export const newGaugeSchema = z.strictObject({
+const gaugeFields = z.strictObject({
   name: nameSchema,
   zero: z.number().min(-500).max(9000).meta({ unit: 'm' }),
-  correction: z.number().min(-100).max(100).default(0).meta({ unit: 'm' }),
+  correction: z.number().min(-100).max(100).meta({ unit: 'm' }),
+  note: noteSchema,
+})
+export const newGaugeSchema = gaugeFields.extend({
+  correction: gaugeFields.shape.correction.default(0),
   note: noteSchema.default(''),
 })
-export const gaugeChangeSchema = newGaugeSchema.partial().extend({ version: versionSchema })
+export const gaugeChangeSchema = gaugeFields.partial().extend({ version: versionSchema })
 export const gaugeSchema = z.strictObject({
   id: z.string(),
   name: z.string(),
@@ -100,14 +112,18 @@ export type Gauge = z.output<typeof gaugeSchema>
 export const gaugesSchema = z.strictObject({ gauges: z.array(gaugeSchema) })
 
 /** `GET, POST /api/projects/:projectId/lines` */
-export const newLineSchema = z.strictObject({
+const lineFields = z.strictObject({
   name: nameSchema,
-  note: noteSchema.default(''),
-  sectionLength: z.number().min(1).max(100).default(10).meta({ unit: 'm' }),
+  note: noteSchema,
+  sectionLength: z.number().min(1).max(100).meta({ unit: 'm' }),
   stations: stationsSchema,
 })
+export const newLineSchema = lineFields.extend({
+  note: noteSchema.default(''),
+  sectionLength: lineFields.shape.sectionLength.default(10),
+})
 /** `PATCH …/lines/:lineId`; stations replace all that were there. */
-export const lineChangeSchema = newLineSchema.partial().extend({ version: versionSchema })
+export const lineChangeSchema = lineFields.partial().extend({ version: versionSchema })
 export const lineSchema = z
   .strictObject({
     id: z.string(),
@@ -116,11 +132,14 @@ export const lineSchema = z
     sectionLength: z.number(),
     stations: z.array(stationSchema),
     scenarios: z.number().int(),
+    warnings: z
+      .array(z.strictObject({ path: z.string(), message: z.string() }))
+      .meta({ description: 'What looks like a slip in the survey, and may be right' }),
     ...kept,
   })
   .meta({ id: 'Line' })
 export type Line = z.output<typeof lineSchema>
-export const lineListItemSchema = lineSchema.omit({ stations: true }).extend({
+export const lineListItemSchema = lineSchema.omit({ stations: true, warnings: true }).extend({
   stationCount: z.number().int(),
   length: z.number().meta({ unit: 'm' }),
 })
