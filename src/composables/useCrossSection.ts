@@ -9,8 +9,8 @@ import type { View } from '@shared/drawing/scene'
 import { lastStanding, standingOutline } from '@shared/drawing/standing-outline'
 import { measureWith } from '@shared/drawing/text-width'
 import type { SectionCase } from '@shared/schemas/section-case'
-import type { ResolveText } from '@shared/texts/format-text'
 import { isSameButDepth } from '@/quick-check/same-section'
+import { useSceneText } from './useSceneText'
 
 /** What the drawing of a section shows. */
 export interface DrawnSection {
@@ -24,14 +24,15 @@ export interface DrawnSection {
  * The scene of a section, composed for a size. The last standing shape does not depend on the depth,
  * so it is searched once and kept while only the water moves.
  */
-export function useCrossSection(drawn: () => DrawnSection, say: ResolveText) {
+export function useCrossSection(drawn: () => DrawnSection) {
+  const say = useSceneText()
   const still = computed<SectionCase>((kept) => {
     const { section } = drawn()
     return kept && isSameButDepth(kept, section) ? kept : section
   })
   const last = computed(() => lastStanding(still.value))
   const outline = computed(() => standingOutline(drawn().section))
-  const measure = computed(() => measureWith(say))
+  const measure = computed(() => measureWith(say.value))
 
   function compose(view: View) {
     const { section, evaluation, marks, level } = drawn()

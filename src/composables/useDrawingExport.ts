@@ -11,7 +11,7 @@ const FILE_VIEW = { width: 1200, height: 640 }
 export function useDrawingExport(drawn: () => DrawnSection) {
   const { say } = useWords()
   const { isDark } = storeToRefs(usePreferences())
-  const { compose } = useCrossSection(drawn, say)
+  const { compose } = useCrossSection(drawn)
   const { state, save } = useSceneExport()
 
   function exportAs(format: SceneFormat): Promise<void> {

@@ -76,7 +76,7 @@ function shapeSentences(drawing: Composition): readonly Message[] {
     }),
     available !== null && available > 0
       ? drawingText('describe.freeboard', {
-          height: { value: available, kind: 'smallLength' },
+          height: { value: available, kind: 'smallLength', rounding: 'down' },
         })
       : drawingText('describe.noFreeboard'),
   ]

@@ -238,7 +238,7 @@ function labelFreeboard(drawing: Composition, { freeboardX }: CrestLines): void 
   if (foot === null || available === null) return
   const middle = (foot + body.top.y) / 2
   const at = { x: freeboardX + 9, anchor: 'start' as const }
-  const height = { value: available, kind: 'smallLength' } as const
+  const height = { value: available, kind: 'smallLength', rounding: 'down' } as const
   const value = valueLabel(
     drawing,
     'freeboard-value',

@@ -198,7 +198,7 @@ describe('what is present is drawn, and nothing else', () => {
 
   it('gives freeboard and crest as the check has them', () => {
     const scene = draw(tube())
-    expect(words(scene, 'freeboard-value')).toBe('277\u00a0mm')
+    expect(words(scene, 'freeboard-value')).toBe('276\u00a0mm')
     expect(words(scene, 'crest-value')).toBe('0.697\u00a0m')
     const ends = pointsOf(item(scene, 'path', 'freeboard').d)
     expect(ends[0]!.y - ends[1]!.y).toBeCloseTo(0.27668 * scene.grips.scale, 1)
