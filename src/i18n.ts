@@ -22,3 +22,13 @@ export function createTexts() {
     messageCompiler: compileMessage,
   })
 }
+
+/** Texts that come with an area of the program when it is entered. */
+export type AreaTexts = Readonly<Record<keyof typeof texts, object>>
+
+/** Adds the texts of an area; adding them again changes nothing. */
+export function addTexts({ global }: ReturnType<typeof createTexts>, area: AreaTexts): void {
+  for (const [locale, messages] of Object.entries(area)) {
+    global.mergeLocaleMessage(locale as keyof typeof texts, messages)
+  }
+}

@@ -15,5 +15,10 @@ import { createApp } from 'vue'
 import App from './App.vue'
 import { createTexts } from './i18n'
 import { createAppRouter } from './router'
+import { admitToAreas } from './router/admit-to-areas'
 
-createApp(App).use(createPinia()).use(createTexts()).use(createAppRouter()).mount('#app')
+const texts = createTexts()
+const router = createAppRouter()
+admitToAreas(router, texts)
+
+createApp(App).use(createPinia()).use(texts).use(router).mount('#app')

@@ -1,26 +1,108 @@
+import type { Problem, ProblemCode } from '@shared/schemas/problem'
+
 /** The server refused, or could not be reached. */
 export class ApiError extends Error {
   override readonly name = 'ApiError'
 
   constructor(
     message: string,
+    /** Status of the answer; null where there was none. */
     readonly status: number | null,
+    /** What the server said, where it answered in its own shape. */
+    readonly problem: Problem | null = null,
+    /** Seconds to wait before the same request may succeed; null where nothing was said. */
+    readonly retryAfter: number | null = null,
   ) {
-    super(message)
+    super(problem?.message ?? message)
+  }
+
+  get code(): ProblemCode | null {
+    return this.problem?.code ?? null
+  }
+
+  /** Refused fields; empty where the whole request was refused. */
+  get fields(): Problem['fields'] {
+    return this.problem?.fields ?? []
+  }
+
+  /** True where nothing answered: no network, or no server. */
+  get isOffline(): boolean {
+    return this.status === null
   }
 }
 
+export type Method = 'POST' | 'PUT' | 'PATCH' | 'DELETE'
+
 /** Asks the server for JSON. Throws ApiError for anything but a good answer. */
 export async function getJson(path: string, signal?: AbortSignal): Promise<unknown> {
-  const response = await send(path, signal)
-  if (!response.ok) throw new ApiError(`${path}: ${response.status}`, response.status)
-  return response.json()
+  return answerOf(await ask(path, { signal: signal ?? null }))
 }
 
-async function send(path: string, signal?: AbortSignal): Promise<Response> {
+/** Sends JSON and gives what is answered; undefined where the answer has no body. */
+export async function sendJson(method: Method, path: string, body?: unknown): Promise<unknown> {
+  if (body === undefined) return answerOf(await ask(path, { method }))
+  const headers = { 'content-type': 'application/json' }
+  return answerOf(await ask(path, { method, headers, body: JSON.stringify(body) }))
+}
+
+/** Sends a form with files. */
+export async function sendForm(method: Method, path: string, form: FormData): Promise<unknown> {
+  return answerOf(await ask(path, { method, body: form }))
+}
+
+/** Lets a person sign in again; true once they have. */
+export type SignInAgain = () => Promise<boolean>
+
+/** Set once, when the app starts: there is one page and one person in front of it. */
+let signInAgain: SignInAgain = () => Promise.resolve(false)
+
+/** Says how a person signs in again when a session has ended; the request is then repeated. */
+export function whenSessionEnds(ask: SignInAgain): void {
+  signInAgain = ask
+}
+
+/** Signing in and out is how a session begins and ends: neither waits for one. */
+export const SESSION_PATH = '/api/session'
+
+/** Sends a request; once more after the person has signed in again. */
+async function ask(path: string, init: RequestInit): Promise<Response> {
+  const first = await send(path, init)
+  if (first.ok) return first
+  const error = await errorOf(first, path)
+  const isSessionOver = error.code === 'sign-in-required' && path !== SESSION_PATH
+  if (!isSessionOver || !(await signInAgain())) throw error
+  const second = await send(path, init)
+  if (second.ok) return second
+  throw await errorOf(second, path)
+}
+
+async function send(path: string, init: RequestInit): Promise<Response> {
+  const headers = { accept: 'application/json', ...init.headers }
   try {
-    return await fetch(path, { headers: { accept: 'application/json' }, signal: signal ?? null })
+    return await fetch(path, { credentials: 'same-origin', ...init, headers })
   } catch (cause) {
     throw Object.assign(new ApiError(`${path}: no answer`, null), { cause })
+  }
+}
+
+async function answerOf(response: Response): Promise<unknown> {
+  const text = await response.text()
+  return text === '' ? undefined : JSON.parse(text)
+}
+
+async function errorOf(response: Response, path: string): Promise<ApiError> {
+  const { status } = response
+  const wait = Number(response.headers.get('retry-after') ?? NaN)
+  const retryAfter = Number.isFinite(wait) ? wait : null
+  return new ApiError(`${path}: ${status}`, status, problemOf(await response.text()), retryAfter)
+}
+
+/** A proxy between browser and server may answer in a shape of its own. */
+function problemOf(text: string): Problem | null {
+  try {
+    const body: unknown = JSON.parse(text)
+    return typeof body === 'object' && body !== null && 'code' in body ? (body as Problem) : null
+  } catch {
+    return null
   }
 }

@@ -1,5 +1,6 @@
 import { createRouter, createWebHistory, type RouteRecordRaw } from 'vue-router'
 import QuickCheckView from '@/views/QuickCheckView.vue'
+import { memberRoutes } from './member-routes'
 
 declare module 'vue-router' {
   interface RouteMeta {
@@ -15,6 +16,7 @@ export const routes: RouteRecordRaw[] = [
     component: QuickCheckView,
     meta: { titleKey: 'quickCheck.title' },
   },
+  ...memberRoutes,
   {
     path: '/:path(.*)*',
     name: 'not-found',

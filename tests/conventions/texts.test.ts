@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest'
 import { texts } from '../../shared/texts'
+import { areaTexts } from '../../shared/texts/member-area'
 import { sourceFiles } from '../support/source-files'
 
 /** Every text by its full key. */
@@ -13,8 +14,10 @@ function leaves(node: object, prefix = ''): Map<string, string> {
   return found
 }
 
-const keys = [...leaves(texts.en).keys()]
-const AREAS = Object.keys(texts.en).join('|')
+/** What is loaded at once and what comes with the area behind the sign-in. */
+const all = { ...texts.en, ...areaTexts.en }
+const keys = [...leaves(all).keys()]
+const AREAS = Object.keys(all).join('|')
 
 const sources = [...sourceFiles('src', /\.(ts|vue)$/), ...sourceFiles('shared', /\.ts$/)].filter(
   ({ path }) => !path.startsWith('shared/texts'),

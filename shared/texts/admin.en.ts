@@ -1,0 +1,4 @@
+/** Texts of the administration. */
+export const adminTexts = {
+  title: 'Administration',
+} as const

@@ -1,0 +1,47 @@
+/** Texts of states and controls that every page behind the sign-in shares. */
+export const statesTexts = {
+  loading: 'Loading {what}',
+  offline: {
+    title: 'No connection.',
+    text: 'What is on the page stays. Changes are kept here until they can be sent.',
+  },
+  problem: {
+    offline: 'The server cannot be reached',
+    refused: 'The server refused this',
+    signedOut: 'You are signed out',
+    forbidden: 'This is not for your role',
+    missing: 'It is not here',
+    conflict: 'Somebody was faster',
+    invalid: 'Something does not fit yet',
+    tooLarge: 'This is too large',
+    tooMany: 'Too many attempts',
+    failed: 'Something went wrong on the server',
+  },
+  next: {
+    offline: 'Check the connection, then try again.',
+    signedOut: 'Sign in, and the page goes on where it stood.',
+    forbidden: 'An administrator can change your role, or the lead of the project yours in it.',
+    missing: 'It may have been deleted, or you are not a member.',
+    conflict: 'Load what is there now, then decide.',
+    invalid: 'The fields say what is allowed.',
+    tooLarge: 'Make it smaller, then try again.',
+    tooMany: 'Wait a little, then try again.',
+    refused: 'Change what is named, then try again.',
+    failed: 'Try again; if it stays, tell your administrator.',
+  },
+  retry: 'Try again',
+  cancel: 'Cancel',
+  close: 'Close',
+  dismiss: 'Dismiss',
+  allowed: 'Allowed: {allowed}',
+  paging: {
+    label: 'Pages',
+    shown: '{first} to {last} of {total}',
+    previous: 'Previous',
+    next: 'Next',
+  },
+  sort: {
+    ascending: 'sorted upwards',
+    descending: 'sorted downwards',
+  },
+} as const

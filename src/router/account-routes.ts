@@ -1,0 +1,4 @@
+import type { RouteRecordRaw } from 'vue-router'
+
+/** Ways in, and what a person looks after for themselves. */
+export const accountRoutes: RouteRecordRaw[] = []

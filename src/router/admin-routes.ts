@@ -1,0 +1,4 @@
+import type { RouteRecordRaw } from 'vue-router'
+
+/** Administration; each tab has an address. */
+export const adminRoutes: RouteRecordRaw[] = []

@@ -1,0 +1,4 @@
+import type { RouteRecordRaw } from 'vue-router'
+
+/** Desk, projects, lines and scenarios. */
+export const projectRoutes: RouteRecordRaw[] = []
