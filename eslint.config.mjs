@@ -25,6 +25,15 @@ const oneWay = {
   ],
 }
 
+const noLucia = {
+  regex: '^(lucia|@lucia-auth/.*)$',
+  message: 'only server/auth/ knows what sessions are made of',
+}
+const noDrizzle = {
+  regex: '^drizzle-orm(/|$)',
+  message: 'only *.queries.ts and server/db/ know the database',
+}
+
 export default tseslint.config(
   { ignores: ['dist/', 'data/', 'coverage/', 'drizzle/', 'test-results/', 'playwright-report/'] },
   js.configs.recommended,
@@ -73,6 +82,21 @@ export default tseslint.config(
       'no-restricted-globals': ['error', 'process', 'console', 'Date', 'setTimeout', 'fetch'],
       'no-restricted-properties': ['error', { object: 'Math', property: 'random' }],
     },
+  },
+  {
+    files: ['server/**/*.ts'],
+    ignores: ['server/auth/**', 'server/db/**', 'server/**/*.queries.ts'],
+    rules: { 'no-restricted-imports': ['error', { patterns: [noLucia, noDrizzle] }] },
+  },
+  {
+    files: ['server/auth/**/*.ts'],
+    ignores: ['server/**/*.queries.ts'],
+    rules: { 'no-restricted-imports': ['error', { patterns: [noDrizzle] }] },
+  },
+  {
+    files: ['server/db/**/*.ts', 'server/**/*.queries.ts', 'src/**/*.{ts,vue}', 'tests/**/*.ts'],
+    ignores: ['server/auth/**'],
+    rules: { 'no-restricted-imports': ['error', { patterns: [noLucia] }] },
   },
   {
     files: ['src/**/*.{ts,vue}'],

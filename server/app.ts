@@ -1,22 +1,22 @@
 import compression from 'compression'
 import express, { type Express } from 'express'
 import type { Logger } from 'pino'
-import type { Db } from './db/client'
+import { createAccess } from './auth/create-access'
 import type { Env } from './env'
 import { NotFoundError } from './errors'
 import { errorHandler } from './http/error-handler'
 import { receiveJsonText, receiveLongJsonText } from './http/json-body'
-import { mountOperations, type Access } from './http/mount-operations'
+import { mountOperations } from './http/mount-operations'
+import type { Operation } from './http/operation'
+import { originCheck } from './http/origin-check'
 import { securityHeaders } from './http/security-headers'
 import { site } from './http/site'
 import { requestLog } from './logger'
-import { catalogueOperations } from './modules/catalogue/catalogue.routes'
-import { healthOperations } from './modules/health/health.routes'
-import { openapiOperations } from './modules/openapi/openapi.routes'
-import { sectionChecksOperations } from './modules/section-checks/section-checks.routes'
+import { allOperations } from './operations'
+import type { RouteParts } from './parts'
 
 export interface AppParts {
-  readonly db: Db
+  readonly parts: RouteParts
   readonly env: Env
   readonly logger: Logger
   readonly version: string
@@ -24,12 +24,10 @@ export interface AppParts {
   readonly siteFolder: string
 }
 
-/** Nobody can sign in yet: every route is open. */
-const NOBODY: Access = { signedIn: () => null, memberRole: () => null }
-
 /** Builds the server; it listens only where `main.ts` says so. */
-export function createApp({ db, env, logger, version, siteFolder }: AppParts): Express {
+export function createApp({ parts, env, logger, version, siteFolder }: AppParts): Express {
   const app = express()
+  app.set('trust proxy', env.trustedProxies)
   app.use(requestLog(logger))
   app.use(securityHeaders(env.appUrl))
   app.use(compression())
@@ -37,16 +35,13 @@ export function createApp({ db, env, logger, version, siteFolder }: AppParts): E
     res.set('Cache-Control', 'no-store')
     next()
   })
+  app.use('/api', originCheck({ appUrl: env.appUrl, carriesSession: parts.sessions.isCarriedBy }))
   app.use('/api/projects', receiveLongJsonText)
   app.use(receiveJsonText)
 
-  const operations = [
-    ...healthOperations(db, { version, mode: env.mode }),
-    ...catalogueOperations(db),
-    ...sectionChecksOperations(),
-  ]
-  const all = [...operations, ...openapiOperations(version, operations)]
-  app.use(mountOperations(all, NOBODY))
+  const operations = allOperations(parts, { version, mode: env.mode })
+  app.use(mountOperations(operations, createAccess(parts.db, parts.sessions)))
+  app.locals.operations = operations
 
   app.use(site(siteFolder))
   app.use((req) => {
@@ -54,4 +49,9 @@ export function createApp({ db, env, logger, version, siteFolder }: AppParts): E
   })
   app.use(errorHandler)
   return app
+}
+
+/** The routes of a server, for its documents and for tests that walk all of them. */
+export function operationsOf(app: Express): readonly Operation[] {
+  return app.locals.operations as readonly Operation[]
 }

@@ -1,3 +1,4 @@
+import { isIP } from 'node:net'
 import { z } from 'zod'
 import type { Mode } from '../shared/schemas/health'
 
@@ -8,6 +9,15 @@ export class EnvironmentError extends Error {
 
 const LOG_LEVELS = ['trace', 'debug', 'info', 'warn', 'error', 'fatal', 'silent'] as const
 const SHORTEST_SECRET = 32
+
+/** Known to everybody, as the passwords of the demonstration are. */
+const DEMO_SECRET = 'secret of the demonstration, known to everybody'
+
+/** Stands on mail that never leaves. */
+const OUTBOX_SENDER = 'Toehold <toehold@localhost.invalid>'
+
+/** Variables whose value no message repeats. */
+const HOLDS_A_PASSWORD = new Set(['SMTP_URL', 'SESSION_SECRET'])
 
 const portRule = 'must be a whole number from 0 to 65535'
 
@@ -24,6 +34,15 @@ const environmentSchema = z.object({
   LOG_LEVEL: z.enum(LOG_LEVELS).optional(),
   APP_URL: z.url({ protocol: /^https?$/, message: 'must be an http or https address' }).optional(),
   SESSION_SECRET: z.string().optional(),
+  SMTP_URL: z.url({ protocol: /^smtps?$/, message: 'must be an smtp or smtps address' }).optional(),
+  MAIL_FROM: z
+    .string()
+    .regex(/^[^\r\n]*[^\s@<]+@[^\s@>]+>?$/, 'must hold an address for mail')
+    .optional(),
+  TRUSTED_PROXIES: z
+    .string()
+    .refine(areProxies, 'must be addresses or networks with commas between them')
+    .default('loopback'),
 })
 
 export interface Env {
@@ -35,8 +54,14 @@ export interface Env {
   readonly logLevel: (typeof LOG_LEVELS)[number]
   /** Address at which people reach the program. */
   readonly appUrl: string
-  /** Signs what must not be forged; only production insists on it. */
-  readonly sessionSecret: string | undefined
+  /** Hashes sessions, links and attempts; only production insists on one of its own. */
+  readonly sessionSecret: string
+  /** Server that takes mail; left out: mail stays in the local outbox. */
+  readonly smtpUrl: string | undefined
+  /** Sender of mail. */
+  readonly mailFrom: string
+  /** Proxies whose word on where a request comes from counts, as Express takes them. */
+  readonly trustedProxies: string
 }
 
 /**
@@ -52,6 +77,9 @@ export function readEnv(source: Record<string, string | undefined>): Env {
   const variables = parsed.data
   const mode: Mode = variables.NODE_ENV === 'production' ? 'production' : 'demonstration'
   if (mode === 'production') assertProduction(variables)
+  if (variables.SMTP_URL && !variables.MAIL_FROM) {
+    throw new EnvironmentError('MAIL_FROM: mail over SMTP_URL needs the address of its sender')
+  }
   return {
     mode,
     port: variables.PORT,
@@ -59,8 +87,23 @@ export function readEnv(source: Record<string, string | undefined>): Env {
     databaseFile: variables.DATABASE_FILE,
     logLevel: variables.LOG_LEVEL ?? quietEnough(variables.NODE_ENV),
     appUrl: variables.APP_URL ?? `http://localhost:${variables.PORT}`,
-    sessionSecret: variables.SESSION_SECRET,
+    sessionSecret: variables.SESSION_SECRET ?? DEMO_SECRET,
+    smtpUrl: variables.SMTP_URL,
+    mailFrom: variables.MAIL_FROM ?? OUTBOX_SENDER,
+    trustedProxies: variables.TRUSTED_PROXIES,
   }
+}
+
+/** Addresses, networks in the form address/bits, or the names that Express has for usual ones. */
+function areProxies(text: string): boolean {
+  return text.split(',').every((part) => {
+    const [address = '', bits] = part.trim().split('/')
+    if (bits === undefined && ['loopback', 'linklocal', 'uniquelocal'].includes(address))
+      return true
+    const family = isIP(address)
+    if (family === 0 || bits === undefined) return family !== 0
+    return /^\d{1,3}$/.test(bits) && Number(bits) <= (family === 4 ? 32 : 128)
+  })
 }
 
 type Variables = z.output<typeof environmentSchema>
@@ -71,7 +114,8 @@ function describeIssues(error: z.ZodError, given: Record<string, string | undefi
       const name = String(issue.path[0])
       const rule =
         issue.code === 'invalid_value' ? `must be one of ${issue.values.join(', ')}` : issue.message
-      return `${name}: "${given[name] ?? ''}" is not allowed; it ${rule}`
+      const value = HOLDS_A_PASSWORD.has(name) ? 'what is set' : `"${given[name] ?? ''}"`
+      return `${name}: ${value} is not allowed; it ${rule}`
     })
     .join('\n')
 }

@@ -1,11 +1,18 @@
 import { existsSync, readFileSync } from 'node:fs'
 import type { Server } from 'node:http'
 import { fileURLToPath } from 'node:url'
+import type { Logger } from 'pino'
 import { createApp } from './app'
+import { startHousekeeping } from './auth/housekeeping'
 import { openDatabase } from './db/client'
 import { prepareDatabase } from './db/prepare-database'
 import { type Env, EnvironmentError, readEnv } from './env'
 import { createLogger } from './logger'
+import { startMailWorker } from './mail/mail-worker'
+import { createSmtpSender } from './mail/smtp-sender'
+import { demoPeopleSeed, usableDemoAccounts } from './modules/accounts/demo-accounts.service'
+import { firstAdministratorLink } from './modules/invitations/first-administrator.service'
+import { createParts, type RouteParts } from './parts'
 
 /** How long an answer under way may take once the server was told to stop [ms]. */
 const LAST_ANSWER = 5000
@@ -39,16 +46,52 @@ function start(): void {
   const env = readEnvironment()
   const logger = createLogger(env.logLevel)
   const { db, close } = openDatabase(env.databaseFile)
-  // People and projects of the demonstration are seeded by the modules that will own them.
-  prepareDatabase(db, { mode: env.mode, demoSeeds: [] })
+  const parts = createParts(db, env)
+  prepareDatabase(db, { mode: env.mode, demoSeeds: [demoPeopleSeed(parts.passwords)] })
+  if (env.mode === 'production') refuseDemoAccounts(parts, env)
   const siteFolder = inProject('dist')
-  const app = createApp({ db, env, logger, version: readVersion(), siteFolder })
+  const app = createApp({ parts, env, logger, version: readVersion(), siteFolder })
 
   const server = app.listen({ port: env.port, host: env.host }, (error?: Error) => {
     if (error) refuseToStart(describeListenError(error, env.port))
     process.stdout.write(`Toehold (${env.mode}) is at ${addressOf(server, env)}\n`)
+    printFirstAdministrator(parts)
   })
-  stopOnSignal(server, close)
+  const stopWorkers = startWorkers(parts, env, logger)
+  stopOnSignal(server, async () => {
+    await stopWorkers()
+    close()
+  })
+}
+
+/** Their password stands on the sign-in page of every demonstration. */
+function refuseDemoAccounts({ db }: RouteParts, { databaseFile }: Env): void {
+  const names = usableDemoAccounts(db)
+  if (names.length === 0) return
+  refuseToStart(
+    `DATABASE_FILE: ${databaseFile} holds accounts of the demonstration, whose password everybody ` +
+      `knows (${names.join(', ')}); production needs another file, or have them deactivated`,
+  )
+}
+
+function printFirstAdministrator(parts: RouteParts): void {
+  const link = firstAdministratorLink(parts)
+  if (link === null) return
+  process.stdout.write(`There is no administrator yet. Make the first account, once, at\n${link}\n`)
+}
+
+/** What runs beside the requests: mail on its way out, and forgetting what has expired. */
+function startWorkers(parts: RouteParts, env: Env, logger: Logger): () => Promise<void> {
+  const stopHousekeeping = startHousekeeping(parts, logger)
+  if (env.smtpUrl === undefined) return () => Promise.resolve(stopHousekeeping())
+  const sender = createSmtpSender(env.smtpUrl, env.mailFrom)
+  const mail = startMailWorker({ ...parts, sender, logger })
+  return async () => {
+    stopHousekeeping()
+    const lastMail = mail.stop()
+    sender.close()
+    await lastMail
+  }
 }
 
 function describeListenError(error: Error, port: number): string {
@@ -64,20 +107,21 @@ function addressOf(server: Server, env: Env): string {
   return env.mode === 'production' ? `${env.appUrl} (port ${port})` : `http://localhost:${port}`
 }
 
-/** Finishes what is under way, then closes the database. Ctrl-C arrives twice through `npm start`. */
-function stopOnSignal(server: Server, closeDatabase: () => void): void {
+/** Finishes what is under way, then closes. Ctrl-C arrives twice through `npm start`. */
+function stopOnSignal(server: Server, closeAll: () => Promise<void>): void {
   let isStopping = false
   const stop = () => {
     if (isStopping) return
     isStopping = true
     server.close(() => {
-      closeDatabase()
-      process.exit(0)
+      void closeAll().then(() => process.exit(0))
     })
     server.closeIdleConnections()
     setTimeout(() => {
       server.closeAllConnections()
     }, LAST_ANSWER).unref()
+    // A mail server that does not answer holds up nobody; its mail is tried again at the next start.
+    setTimeout(() => process.exit(0), 2 * LAST_ANSWER).unref()
   }
   process.on('SIGINT', stop)
   process.on('SIGTERM', stop)

@@ -1,5 +1,8 @@
 import type { AccountRole } from '../../shared/access/roles'
 
+/** One password for all of them; shown on the sign-in page, and refused in production. */
+export const DEMO_PASSWORD = 'high water at seven'
+
 /** Organisations of the demonstration; all invented. */
 export const DEMO_ORGANISATIONS = {
   firm: { id: 'demo-org-firm', name: 'Mill Lane Engineers' },

@@ -41,6 +41,7 @@ function toProblem(error: unknown): Problem {
   if (error instanceof ConflictError && error.current) {
     return { ...problem('conflict', error.message), current: error.current }
   }
+  if (isBusyDatabase(error)) return problem('unavailable', 'The database is busy; try again.')
   const code = codeOf(error)
   if (code && error instanceof Error) return problem(code, error.message)
   const parserCode = codeOfStatus(error)
@@ -76,6 +77,12 @@ function codeOfStatus(error: unknown): ProblemCode | undefined {
 function limitOf(error: unknown): string | undefined {
   const limit = error instanceof Error && 'limit' in error ? Number(error.limit) : NaN
   return Number.isFinite(limit) ? `The body is larger than ${limit / 1000} kB.` : undefined
+}
+
+/** Another process, such as a backup, held the database for longer than the server waits. */
+function isBusyDatabase(error: unknown): boolean {
+  const cause = error instanceof Error && error.cause instanceof Error ? error.cause : error
+  return cause instanceof Error && 'code' in cause && /^SQLITE_BUSY/.test(String(cause.code))
 }
 
 function problem(code: ProblemCode, message: string): Problem {

@@ -12,7 +12,7 @@ import type { Operation, SignedIn } from './operation'
 
 /** Answers who sends a request, and what they are in a project. */
 export interface Access {
-  readonly signedIn: (req: Request, res: Response) => SignedIn | null
+  readonly signedIn: (req: Request, res: Response) => SignedIn | null | Promise<SignedIn | null>
   readonly memberRole: (projectId: string, accountId: string) => MemberRole | null
 }
 
@@ -22,11 +22,21 @@ export function mountOperations(operations: readonly Operation[], access: Access
   for (const path of new Set(operations.map((operation) => operation.path))) {
     const route = router.route(path)
     const here = operations.filter((operation) => operation.path === path)
-    for (const operation of here) route[operation.method](handlerOf(operation, access))
+    for (const operation of here) {
+      assertRule(operation)
+      route[operation.method](handlerOf(operation, access))
+    }
     const methods = here.map(({ method }) => method.toUpperCase())
     route.all(allowOnly(methods.includes('GET') ? [...methods, 'HEAD'] : methods))
   }
   return router
+}
+
+/** The compiler asks for a rule as well; this holds for whatever comes past the compiler. */
+function assertRule({ id, rule }: Operation): void {
+  if (!Object.hasOwn(ACCESS_RULES, rule)) {
+    throw new Error(`${id} has no rule of the access table: "${String(rule)}"`)
+  }
 }
 
 function allowOnly(methods: readonly string[]): RequestHandler {
@@ -37,7 +47,7 @@ function allowOnly(methods: readonly string[]): RequestHandler {
 
 function handlerOf(operation: Operation, access: Access): RequestHandler {
   return async (req, res) => {
-    const actor = admit(operation, access, req, res)
+    const actor = await admit(operation, access, req, res)
     const handle = operation.handle as (context: object) => unknown
     const answer = await handle({ req, res, actor })
     if (operation.mediaType !== undefined) return
@@ -52,13 +62,13 @@ function handlerOf(operation: Operation, access: Access): RequestHandler {
  * @throws SignInRequiredError, ForbiddenError, or NotFoundError for a project that the account is no
  * member of.
  */
-function admit(
+async function admit(
   { rule, path }: Operation,
   access: Access,
   req: Request,
   res: Response,
-): SignedIn | null {
-  const account = access.signedIn(req, res)
+): Promise<SignedIn | null> {
+  const account = await access.signedIn(req, res)
   const projectId = req.params.projectId
   const member =
     account && typeof projectId === 'string'

@@ -35,6 +35,8 @@ export interface OperationFor<Rule extends RuleId> {
   /** What may stand behind the question mark of the address: search, order, page. */
   readonly query?: z.ZodObject
   readonly request?: z.ZodType
+  /** Media type of a body that is not JSON: a form with a file. */
+  readonly requestMediaType?: string
   /** Body of the answer; left out where there is none, or where it is no JSON. */
   readonly response?: z.ZodType
   /** Media type of an answer that the handler writes itself: a file, CSV. */

@@ -4,6 +4,8 @@ import { createApp } from '../../server/app'
 import { IN_MEMORY, openDatabase } from '../../server/db/client'
 import { type Preparation, prepareDatabase } from '../../server/db/prepare-database'
 import { readEnv } from '../../server/env'
+import { createPasswords } from '../../server/auth/passwords'
+import { createParts } from '../../server/parts'
 
 export const SECRET = 'a-secret-of-the-tests-that-is-long-enough'
 
@@ -11,6 +13,10 @@ export interface AppOptions {
   /** Environment of the server, as `process.env` would give it. */
   readonly environment?: Record<string, string>
   readonly siteFolder?: string
+  /** Demo data to begin with, in demonstration mode. */
+  readonly demoSeeds?: Preparation['demoSeeds']
+  /** Clock of the server [ms since 1970]. */
+  readonly now?: () => number
   /** Takes the lines of the log. */
   readonly log?: (line: string) => void
 }
@@ -26,10 +32,16 @@ export function freshDatabase(
   return database
 }
 
+/** Passwords that cost next to nothing: their strength is not what most tests are about. */
+export const CHEAP_PASSWORDS = createPasswords({ memoryCost: 8, timeCost: 1 })
+
 /** The whole server on a fresh database in memory; it does not listen. */
-export function freshApp({ environment, siteFolder = '/nowhere', log }: AppOptions = {}) {
+export function freshApp(options: AppOptions = {}) {
+  const { environment, siteFolder = '/nowhere', log, demoSeeds = [], now } = options
   const env = readEnv({ NODE_ENV: 'test', ...environment })
-  const { db, close } = freshDatabase({ mode: env.mode })
+  const { db, close } = freshDatabase({ mode: env.mode, demoSeeds })
   const logger = pino({ level: log ? 'info' : 'silent' }, { write: log ?? (() => undefined) })
-  return { app: createApp({ db, env, logger, version: '1.2.3', siteFolder }), db, close }
+  const parts = createParts(db, env, { passwords: CHEAP_PASSWORDS, ...(now ? { now } : {}) })
+  const app = createApp({ parts, env, logger, version: '1.2.3', siteFolder })
+  return { app, db, close, parts }
 }

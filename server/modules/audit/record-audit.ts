@@ -10,6 +10,9 @@ export interface Author {
 /** The program itself, for seeds and one-time links. */
 export const PROGRAM: Author = { accountId: null, name: 'Toehold' }
 
+/** Whoever sends a request without being signed in. */
+export const ANONYMOUS: Author = { accountId: null, name: '' }
+
 /** One line of the audit trail. */
 export interface AuditNote {
   /** Verb in the past, with its subject: `scenario.saved`, `person.deactivated`. */

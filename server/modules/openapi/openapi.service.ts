@@ -35,24 +35,39 @@ export function describeApi(version: string, operations: readonly Operation[]): 
 }
 
 function describeOperation(operation: Operation): JsonObject {
-  const { id, summary, rule, request, path } = operation
-  const parameters = [...path.matchAll(/:(\w+)/g)].map(([, name]) => ({
-    name,
-    in: 'path',
-    required: true,
-    schema: { type: 'string' },
-  }))
+  const { id, summary, rule, request, path, query } = operation
+  const parameters = [...describePath(path), ...describeQuery(query)]
   return {
     operationId: id,
     summary,
     description: `Access: ${ACCESS_RULES[rule].meaning}.`,
     ...(parameters.length > 0 ? { parameters } : {}),
-    ...(request ? { requestBody: { required: true, content: json(request, 'input') } } : {}),
+    ...(request ? { requestBody: { required: true, content: bodyOf(request, operation) } } : {}),
     responses: {
       ...describeSuccess(operation),
       ...describeProblems(problemsOf(operation)),
     },
   }
+}
+
+function describePath(path: string): readonly JsonObject[] {
+  return [...path.matchAll(/:(\w+)/g)].map(([, name]) => ({
+    name,
+    in: 'path',
+    required: true,
+    schema: { type: 'string' },
+  }))
+}
+
+function describeQuery(query: z.ZodObject | undefined): readonly JsonObject[] {
+  if (!query) return []
+  const { properties = {} } = z.toJSONSchema(query, { io: 'input' })
+  return Object.entries(properties).map(([name, schema]) => ({
+    name,
+    in: 'query',
+    required: false,
+    schema: withComponentPaths(schema as JsonObject),
+  }))
 }
 
 function describeSuccess({ response, mediaType, status }: Operation): JsonObject {
@@ -65,13 +80,14 @@ function describeSuccess({ response, mediaType, status }: Operation): JsonObject
 }
 
 /** What can go wrong on a route: its own problems, and those that its kind brings. */
-function problemsOf({ rule, request, problems, path }: Operation): readonly ProblemCode[] {
+function problemsOf({ rule, request, problems, path, query }: Operation): readonly ProblemCode[] {
   const ofBody = ['invalid-json', 'invalid-input', 'bad-request', 'too-large'] as const
   const ofAccess = ['sign-in-required', 'forbidden'] as const
   return [
     ...new Set<ProblemCode>([
       ...problems,
       ...(request ? [...ofBody, 'unsupported-media-type' as const] : []),
+      ...(query ? (['invalid-input', 'out-of-range'] as const) : []),
       ...(rule === 'open' ? [] : ofAccess),
       ...(path.includes(':') ? (['not-found'] as const) : []),
       'method-not-allowed',
@@ -98,6 +114,11 @@ function describeProblems(codes: readonly ProblemCode[]): JsonObject {
 /** The schema where it is used; whatever has an id is a reference to its component. */
 function json(schema: z.ZodType, io: 'input' | 'output'): JsonObject {
   return { 'application/json': { schema: withComponentPaths(z.toJSONSchema(schema, { io })) } }
+}
+
+function bodyOf(request: z.ZodType, { requestMediaType }: Operation): JsonObject {
+  const { 'application/json': media } = json(request, 'input')
+  return { [requestMediaType ?? 'application/json']: media }
 }
 
 /** Every schema with an id that a route takes or gives, with what it refers to. */

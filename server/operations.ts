@@ -1,0 +1,42 @@
+import type { Mode } from '../shared/schemas/health'
+import type { Operation } from './http/operation'
+import { accountsOperations } from './modules/accounts/accounts.routes'
+import { demoAccountsOperations, sessionOperations } from './modules/accounts/session.routes'
+import { auditOperations } from './modules/audit/audit.routes'
+import { catalogueOperations } from './modules/catalogue/catalogue.routes'
+import { healthOperations } from './modules/health/health.routes'
+import { invitationsOperations } from './modules/invitations/invitations.routes'
+import { mailsOperations } from './modules/mails/mails.routes'
+import { openapiOperations } from './modules/openapi/openapi.routes'
+import { organisationsOperations } from './modules/organisations/organisations.routes'
+import { passwordResetsOperations } from './modules/password-resets/password-resets.routes'
+import { peopleOperations } from './modules/people/people.routes'
+import { sectionChecksOperations } from './modules/section-checks/section-checks.routes'
+import type { RouteParts } from './parts'
+
+export interface Identity {
+  readonly version: string
+  readonly mode: Mode
+}
+
+/** Every route of the API. Whatever is not in this list does not exist. */
+export function allOperations(
+  parts: RouteParts,
+  { version, mode }: Identity,
+): readonly Operation[] {
+  const operations = [
+    ...healthOperations(parts.db, { version, mode }),
+    ...catalogueOperations(parts.db),
+    ...sectionChecksOperations(),
+    ...sessionOperations(parts),
+    ...demoAccountsOperations(parts, mode),
+    ...accountsOperations(parts),
+    ...invitationsOperations(parts),
+    ...passwordResetsOperations(parts),
+    ...peopleOperations(parts),
+    ...organisationsOperations(parts),
+    ...auditOperations(parts),
+    ...mailsOperations(parts),
+  ]
+  return [...operations, ...openapiOperations(version, operations)]
+}

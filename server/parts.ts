@@ -1,0 +1,45 @@
+import { createKeyedHash, type KeyedHash } from './auth/keyed-hash'
+import { createPasswords, type Passwords } from './auth/passwords'
+import { createSessions, type Sessions } from './auth/sessions'
+import type { Db } from './db/client'
+import type { Env } from './env'
+import type { MailWay } from './mail/mail-queue'
+
+/** What the services of people and accounts work with. */
+export interface ServerParts {
+  readonly db: Db
+  /** Clock [ms since 1970]; tests bring their own. */
+  readonly now: () => number
+  readonly keyedHash: KeyedHash
+  readonly passwords: Passwords
+  readonly mail: MailWay
+  /** Address at which people reach the program. */
+  readonly appUrl: string
+}
+
+/** What their routes need besides. */
+export interface RouteParts extends ServerParts {
+  readonly sessions: Sessions
+}
+
+/** What tests replace: the clock, and the cost of a password. */
+export interface Replaceable {
+  readonly now?: () => number
+  readonly passwords?: Passwords
+}
+
+type PartsEnv = Pick<Env, 'appUrl' | 'sessionSecret' | 'smtpUrl' | 'mailFrom'>
+
+/** Puts together what all routes of one server share. */
+export function createParts(
+  db: Db,
+  { appUrl, sessionSecret, smtpUrl, mailFrom }: PartsEnv,
+  { now = Date.now, passwords = createPasswords() }: Replaceable = {},
+): RouteParts {
+  const keyedHash = createKeyedHash(sessionSecret)
+  return {
+    ...{ db, now, keyedHash, passwords, appUrl },
+    mail: { isSmtp: smtpUrl !== undefined, from: mailFrom },
+    sessions: createSessions({ db, now, keyedHash, appUrl }),
+  }
+}
