@@ -220,6 +220,11 @@ export const projectFileSchema = z.strictObject({
 })
 export type ProjectFile = z.output<typeof projectFileSchema>
 export const projectFilesSchema = z.strictObject({ files: z.array(projectFileSchema) })
+/** `POST …/files`, as multipart: one file, and its caption. */
+export const fileUploadSchema = z.strictObject({
+  file: z.string().meta({ format: 'binary', description: 'JPEG, PNG, WebP, PDF, CSV or text' }),
+  caption: z.string().trim().max(300).default(''),
+})
 export const fileChangeSchema = z.strictObject({
   name: nameSchema.optional(),
   caption: z.string().trim().max(300).optional(),
