@@ -1,0 +1,36 @@
+import { randomUUID } from 'node:crypto'
+import type { z } from 'zod'
+import type { newLineSchema } from '../../../shared/schemas/project'
+import type { Deed } from '../projects/deed'
+import { makeScenario } from '../scenarios/scenario-rows'
+import { listScenarioContents } from '../scenarios/scenarios.queries'
+import { insertLine, replaceStations } from './lines.queries'
+import { lineAt, type LinePlace } from './open-line'
+
+/** Writes a line with its survey; the caller has checked it and writes the audit trail. */
+export function makeLine(
+  { tx, by, at }: Deed,
+  projectId: string,
+  { stations, name, note, sectionLength }: z.output<typeof newLineSchema>,
+): string {
+  const id = randomUUID()
+  const { accountId } = by
+  const kept = { createdAt: at, createdBy: accountId, updatedAt: at, updatedBy: accountId }
+  insertLine(tx, { id, projectId, name, note, sectionLength, ...kept })
+  replaceStations(tx, id, stations)
+  return id
+}
+
+/** Copies a line and those of its scenarios that are in use, each with its present state alone. */
+export function copyLine(
+  deed: Deed,
+  from: LinePlace,
+  to: { readonly projectId: string; readonly name: string },
+): string {
+  const line = lineAt(deed.tx, from)
+  const id = makeLine(deed, to.projectId, { ...line, name: to.name })
+  for (const text of listScenarioContents(deed.tx, line.id)) {
+    makeScenario(deed, { ...line, id }, text)
+  }
+  return id
+}

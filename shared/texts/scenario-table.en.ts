@@ -1,0 +1,20 @@
+/** Headings of the table of scenarios as a file: one per column, its unit in brackets. */
+export const scenarioFileTexts = {
+  name: 'Scenario',
+  waterLevel: 'Level (m)',
+  basis: 'Check basis',
+  upliftModel: 'Water under the skirt',
+  edgeFactor: 'Edge (0 sealed, 1 open)',
+  verdict: 'Verdict',
+  weakestFrom: 'Weakest section from (m)',
+  weakestTo: 'Weakest section to (m)',
+  weakestPlace: 'Weakest place (m)',
+  weakestCheck: 'Gives way by',
+  holdsToLevel: 'Holds to level (m)',
+  sections: 'Sections',
+  failing: 'Sections that do not hold',
+  version: 'Version',
+  updatedAt: 'Saved (UTC)',
+  updatedBy: 'Saved by',
+  note: 'Note',
+} as const

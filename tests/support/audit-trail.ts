@@ -1,0 +1,11 @@
+import type { Db } from '../../server/db/client'
+import { auditEntries } from '../../server/db/schema'
+
+/** The audit trail, oldest first. */
+export function auditOf(db: Db) {
+  return db.select().from(auditEntries).orderBy(auditEntries.id).all()
+}
+
+export function auditActions(db: Db): readonly string[] {
+  return auditOf(db).map(({ action }) => action)
+}
