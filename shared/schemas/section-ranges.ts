@@ -210,5 +210,7 @@ export function resolveRange(
   const common = { min, unit, ...(minExcluded ? { minExcluded } : {}) }
   if (typeof max === 'number') return { ...common, max }
   const other = read(max.of)
-  return { ...common, max: typeof other === 'number' && other > 0 ? max.times * other : Infinity }
+  // 1.5 × 0.7 is 1.0499999999999998 in binary: twelve digits give the bound that a person reads.
+  const bound = typeof other === 'number' ? Number((max.times * other).toPrecision(12)) : 0
+  return { ...common, max: bound > 0 ? bound : Infinity }
 }

@@ -1,3 +1,4 @@
+import { FILM } from '../../constants'
 import { gaussLegendre } from '../numerics/gauss-legendre'
 import type { StandingShape } from './loaded-shape'
 import { seatAngle, surfaceAngle, wetRun } from './skin-length'
@@ -44,7 +45,8 @@ const PIECE = gaussLegendre(3)
  * lifts, the weld line moves towards the water by the difference between its length and its run.
  */
 export function loadedOutline(input: OutlineInput): LoadedOutline {
-  const { shape, airPressure, depth, unitWeight, points = 24 } = input
+  const { shape, airPressure, unitWeight, points = 24 } = input
+  const depth = input.depth < FILM ? 0 : input.depth
   const radius = shape.crest / 2
   const skirt = freeSkirtCurve(depth, shape.weldHeight, points)
   const weld: Point = {

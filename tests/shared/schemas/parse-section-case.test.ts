@@ -88,6 +88,11 @@ describe('a case from outside', () => {
     expect(faults[0]!.message).toContain(shown)
   })
 
+  it('is taken at 1.5 diameters exactly, whatever binary makes of it', () => {
+    expect(parseSectionCase(water({ depth: 1.05 })).water.depth).toBe(1.05)
+    expect(parseSectionCase(barrier({ contactWidth: 0.35 })).barrier.contactWidth).toBe(0.35)
+  })
+
   it('is told of wrong shapes and wrong ranges together', () => {
     const { kind, faults } = faultsOf({ ...barrier({ mass: '4.8' }), ground: { friction: 5 } })
     expect(kind).toBe('shape')
