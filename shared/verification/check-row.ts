@@ -4,7 +4,8 @@
  */
 export type CheckTag = 'published' | 'memory' | 'derived' | 'practice'
 
-export type CheckTopic = 'hydrostatics' | 'stability' | 'movingWater' | 'loadedTube'
+export type CheckTopic =
+  'hydrostatics' | 'stability' | 'movingWater' | 'loadedTube' | 'ground' | 'water' | 'pumps'
 
 /** One figure of a check value, as the source prints it. */
 export interface CheckFigure {

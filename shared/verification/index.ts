@@ -1,8 +1,11 @@
 import type { CheckRow, ReferenceRow } from './check-row'
+import { GROUND_REFERENCES, GROUND_ROWS } from './ground'
 import { HYDROSTATICS_ROWS } from './hydrostatics'
 import { LOADED_TUBE_REFERENCES, LOADED_TUBE_ROWS } from './loaded-tube'
 import { MOVING_WATER_REFERENCES, MOVING_WATER_ROWS } from './moving-water'
+import { PUMP_REFERENCES, PUMP_ROWS } from './pumps'
 import { STABILITY_REFERENCES, STABILITY_ROWS } from './stability'
+import { WATER_ROWS } from './water'
 
 /** Every check value that the product computes; tests and the Method page read this one list. */
 export const CHECK_ROWS: readonly CheckRow[] = [
@@ -10,6 +13,9 @@ export const CHECK_ROWS: readonly CheckRow[] = [
   ...STABILITY_ROWS,
   ...MOVING_WATER_ROWS,
   ...LOADED_TUBE_ROWS,
+  ...GROUND_ROWS,
+  ...WATER_ROWS,
+  ...PUMP_ROWS,
 ]
 
 /** Values that stand for reference only and are not counted. */
@@ -17,4 +23,6 @@ export const REFERENCE_ROWS: readonly ReferenceRow[] = [
   ...STABILITY_REFERENCES,
   ...MOVING_WATER_REFERENCES,
   ...LOADED_TUBE_REFERENCES,
+  ...GROUND_REFERENCES,
+  ...PUMP_REFERENCES,
 ]
