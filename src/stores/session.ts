@@ -28,6 +28,12 @@ export const useSession = defineStore('session', () => {
     return account.value ?? null
   }
 
+  /** Asks again, where the server may have ended the session. */
+  function reload(): Promise<Account | null> {
+    account.value = undefined
+    return load()
+  }
+
   async function enter(input: SignIn): Promise<Account> {
     const entered = await signIn(input)
     set(entered)
@@ -44,6 +50,7 @@ export const useSession = defineStore('session', () => {
     isKnown,
     set,
     load,
+    reload,
     enter,
     leave,
     ...useSignInAgain(),
