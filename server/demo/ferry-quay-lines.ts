@@ -56,3 +56,20 @@ export const BEHIND_THE_KERB_STATIONS: readonly Station[] = stations([
   [26.08, 56, 2.07, 2.98, 'turf', 5],
   [32.31, 62.21, 2.56, 2.87, 'turf', 5, 'Meets Low road at ch 70'],
 ])
+
+/**
+ * Low road as it can be laid: swung 3 m landward between ch 140 and 148, onto asphalt. Nobody has
+ * surveyed the two stations there, so they have no place in the grid.
+ */
+export const OFF_THE_GRAVEL_STATIONS: readonly Station[] = LOW_ROAD_STATIONS.map((station) =>
+  station.surface === 'loose-gravel'
+    ? {
+        ...station,
+        x: null,
+        y: null,
+        groundLevel: 2.97,
+        surface: 'asphalt',
+        note: 'Swung 3 m landward onto asphalt',
+      }
+    : station,
+)

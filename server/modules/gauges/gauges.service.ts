@@ -42,8 +42,12 @@ export function createGauge(
 }
 
 /** A gauge without its line in the audit trail, for whoever makes more than one. */
-export function makeGauge({ tx, by, at }: Deed, projectId: string, input: NewGauge): string {
-  const id = randomUUID()
+export function makeGauge(
+  { tx, by, at }: Deed,
+  projectId: string,
+  input: NewGauge,
+  id = randomUUID() as string,
+): string {
   const { accountId } = by
   const kept = { createdAt: at, createdBy: accountId, updatedAt: at, updatedBy: accountId }
   insertGauge(tx, { id, projectId, ...input, ...kept })

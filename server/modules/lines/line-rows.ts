@@ -12,8 +12,8 @@ export function makeLine(
   { tx, by, at }: Deed,
   projectId: string,
   { stations, name, note, sectionLength }: z.output<typeof newLineSchema>,
+  id = randomUUID() as string,
 ): string {
-  const id = randomUUID()
   const { accountId } = by
   const kept = { createdAt: at, createdBy: accountId, updatedAt: at, updatedBy: accountId }
   insertLine(tx, { id, projectId, name, note, sectionLength, ...kept })

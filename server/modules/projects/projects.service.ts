@@ -71,7 +71,11 @@ export function createProject(work: ProjectWork, actor: SignedIn, input: NewProj
 }
 
 /** A project with its first lead; the caller writes the audit trail. */
-export function makeProject({ tx, by, at }: Deed, input: NewProject, id = randomUUID()): string {
+export function makeProject(
+  { tx, by, at }: Deed,
+  input: NewProject,
+  id = randomUUID() as string,
+): string {
   insertProject(tx, {
     id,
     ...input,

@@ -33,8 +33,8 @@ export function makeScenario(
   { tx, by, at }: Deed,
   line: Survey & { readonly id: string },
   text: ScenarioText,
+  id = randomUUID() as string,
 ): string {
-  const id = randomUUID()
   const { accountId } = by
   const answer = answerColumns(scenarioSummary(line, text.content))
   const { name, note, content } = text
