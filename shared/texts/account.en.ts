@@ -44,7 +44,6 @@ export const accountTexts = {
     goOn: 'Go on',
     demo: 'People of the demonstration',
     demoText: 'Choose one to sign in. They and everything they keep are invented.',
-    demoWhat: 'the people of the demonstration',
   },
   again: {
     title: 'Sign in to go on',
