@@ -24,7 +24,11 @@ import { FIELD_IDS, FIELDS, type FieldId } from '@/quick-check/fields'
 import { TUBE_FIELDS } from '@/quick-check/tube'
 
 /** Every field and choice of one Quick check, what is wrong with them, and the last input without a fault. */
-export function useCaseDraft(start: AddressContent, units: Ref<UnitSystem>) {
+export function useCaseDraft(
+  start: AddressContent,
+  units: Ref<UnitSystem>,
+  isReadonly: Readonly<Ref<boolean>> = shallowRef(false),
+) {
   const fields = draftFields(start)
   const choices = shallowRef<Choices>(start.choices)
 
@@ -55,6 +59,7 @@ export function useCaseDraft(start: AddressContent, units: Ref<UnitSystem>) {
   watch(units, () => forgetTyped(fields), { flush: 'sync' })
 
   return {
+    isReadonly,
     choices,
     valid,
     validBefore,
@@ -121,10 +126,12 @@ function draftActions(fields: DraftFields, choices: Ref<Choices>, context: Draft
     setValues(figuresOf(barrier))
   }
 
-  /** Takes over what differs from the last valid input; what is being typed elsewhere stays. */
-  function take(next: CaseInput): void {
-    setValues(differingValues(valid.value.values, next.values))
-    if (!isSameChoice(valid.value.choices, next.choices)) choices.value = next.choices
+  /** Follows a change that was made elsewhere; what is being typed in other fields stays. */
+  function take(next: CaseInput, before: CaseInput): void {
+    const changed = differingValues(before.values, next.values)
+    const isNews = ([id, value]: [string, unknown]) => fields[id as FieldId].value.value !== value
+    setValues(Object.fromEntries(Object.entries(changed).filter(isNews)))
+    if (!isSameChoice(before.choices, next.choices)) choices.value = next.choices
   }
 
   function load({ values, choices: chosen, refused }: AddressContent): void {
