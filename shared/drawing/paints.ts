@@ -85,6 +85,15 @@ export const SHAPE_PAINTS: Readonly<Record<ShapeRole, Paint>> = {
   required: { stroke: 'fails', width: 1.3, dash: '2 3' },
   now: { stroke: 'water', width: 1.4 },
   nowDot: { fill: 'surface', stroke: 'ink', width: 2 },
+  waterOverlay: { fill: 'water', fillOpacity: 0.17 },
+  tubeEdge: { stroke: 'barrier', width: 1.6 },
+  joint: { stroke: 'barrier', width: 1, strokeOpacity: 0.5 },
+  sectionHolds: { fill: 'holds' },
+  sectionNarrow: { fill: 'narrow' },
+  sectionFails: { fill: 'fails' },
+  sectionUnchecked: { fill: 'muted' },
+  weakest: { fill: 'holds' },
+  placeLine: { stroke: 'ink', width: 1.4 },
 }
 
 /** Colours of texts. */

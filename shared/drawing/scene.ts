@@ -53,6 +53,15 @@ export const SHAPE_ROLES = [
   'required',
   'now',
   'nowDot',
+  'waterOverlay',
+  'tubeEdge',
+  'joint',
+  'sectionHolds',
+  'sectionNarrow',
+  'sectionFails',
+  'sectionUnchecked',
+  'weakest',
+  'placeLine',
 ] as const
 export type ShapeRole = (typeof SHAPE_ROLES)[number]
 

@@ -1,5 +1,9 @@
 import { accountTexts } from './account.en'
 import { adminTexts } from './admin.en'
+import { deskTexts } from './desk.en'
+import { lineTexts } from './line.en'
+import { projectTexts } from './project.en'
+import { scenarioTexts } from './scenario.en'
 import { statesTexts } from './states.en'
 
 /** Texts of everything behind the sign-in; they are loaded when the area is entered. */
@@ -7,6 +11,10 @@ export const areaTexts = {
   en: {
     account: accountTexts,
     admin: adminTexts,
+    desk: deskTexts,
+    line: lineTexts,
+    project: projectTexts,
+    scenario: scenarioTexts,
     states: statesTexts,
   },
 } as const

@@ -1,0 +1,41 @@
+/** Texts of the desk. */
+export const deskTexts = {
+  title: 'Desk',
+  what: 'the desk',
+  projects: 'My projects',
+  all: 'All projects',
+  changes: 'What changed',
+  noChanges: 'Nothing has changed yet.',
+  counts: '{lines} lines, {scenarios} scenarios',
+  updated: 'changed {at} by {by}',
+  empty: 'Make the first project',
+  emptyText:
+    'A project holds the site, its gauges, the lines to be defended and the scenarios that are checked on them.',
+  emptyMember: 'You are in no project yet',
+  emptyMemberText:
+    'Whoever leads a project can add you by your address. The Quick check is open to you now.',
+  quickCheck: 'To the Quick check',
+  change: '{who} {did} {what}',
+  subject: {
+    project: 'the project',
+    member: 'a member',
+    gauge: 'the gauge',
+    line: 'the line',
+    scenario: 'the scenario',
+    file: 'the file',
+  },
+  did: {
+    created: 'made',
+    changed: 'changed',
+    saved: 'saved',
+    duplicated: 'copied',
+    archived: 'archived',
+    restored: 'restored',
+    removed: 'removed',
+    deleted: 'deleted',
+    added: 'added',
+    uploaded: 'added',
+    other: 'worked on',
+  },
+  crumbs: 'Where you are',
+} as const
