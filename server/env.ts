@@ -1,4 +1,5 @@
 import { isIP } from 'node:net'
+import { dirname } from 'node:path'
 import { z } from 'zod'
 import type { Mode } from '../shared/schemas/health'
 
@@ -31,6 +32,7 @@ const environmentSchema = z.object({
     .default(3000),
   HOST: z.string().optional(),
   DATABASE_FILE: z.string().default('data/toehold.sqlite'),
+  DATA_DIR: z.string().optional(),
   LOG_LEVEL: z.enum(LOG_LEVELS).optional(),
   APP_URL: z.url({ protocol: /^https?$/, message: 'must be an http or https address' }).optional(),
   SESSION_SECRET: z.string().optional(),
@@ -51,6 +53,8 @@ export interface Env {
   /** Interface to listen on; left out: all. */
   readonly host: string | undefined
   readonly databaseFile: string
+  /** Folder of project files; left out: the one of the database. */
+  readonly dataFolder: string
   readonly logLevel: (typeof LOG_LEVELS)[number]
   /** Address at which people reach the program. */
   readonly appUrl: string
@@ -85,6 +89,7 @@ export function readEnv(source: Record<string, string | undefined>): Env {
     port: variables.PORT,
     host: variables.HOST,
     databaseFile: variables.DATABASE_FILE,
+    dataFolder: variables.DATA_DIR ?? dirname(variables.DATABASE_FILE),
     logLevel: variables.LOG_LEVEL ?? quietEnough(variables.NODE_ENV),
     appUrl: variables.APP_URL ?? `http://localhost:${variables.PORT}`,
     sessionSecret: variables.SESSION_SECRET ?? DEMO_SECRET,

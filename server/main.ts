@@ -5,12 +5,15 @@ import type { Logger } from 'pino'
 import { createApp } from './app'
 import { startHousekeeping } from './auth/housekeeping'
 import { openDatabase } from './db/client'
+import type { DemoSeed } from './db/demo-seed'
 import { prepareDatabase } from './db/prepare-database'
+import { ferryQuaySeed } from './demo/ferry-quay'
 import { type Env, EnvironmentError, readEnv } from './env'
 import { createLogger } from './logger'
 import { startMailWorker } from './mail/mail-worker'
 import { createSmtpSender } from './mail/smtp-sender'
 import { demoPeopleSeed, usableDemoAccounts } from './modules/accounts/demo-accounts.service'
+import { sweepFiles } from './modules/files/files.service'
 import { firstAdministratorLink } from './modules/invitations/first-administrator.service'
 import { createParts, type RouteParts } from './parts'
 
@@ -47,7 +50,7 @@ function start(): void {
   const logger = createLogger(env.logLevel)
   const { db, close } = openDatabase(env.databaseFile)
   const parts = createParts(db, env)
-  prepareDatabase(db, { mode: env.mode, demoSeeds: [demoPeopleSeed(parts.passwords)] })
+  prepareDatabase(db, { mode: env.mode, demoSeeds: demoSeeds(parts) })
   if (env.mode === 'production') refuseDemoAccounts(parts, env)
   const siteFolder = inProject('dist')
   const app = createApp({ parts, env, logger, version: readVersion(), siteFolder })
@@ -62,6 +65,11 @@ function start(): void {
     await stopWorkers()
     close()
   })
+}
+
+/** In this order: projects name the people who made them. */
+function demoSeeds({ passwords, now }: RouteParts): readonly DemoSeed[] {
+  return [demoPeopleSeed(passwords), ferryQuaySeed(now)]
 }
 
 /** Their password stands on the sign-in page of every demonstration. */
@@ -83,6 +91,9 @@ function printFirstAdministrator(parts: RouteParts): void {
 /** What runs beside the requests: mail on its way out, and forgetting what has expired. */
 function startWorkers(parts: RouteParts, env: Env, logger: Logger): () => Promise<void> {
   const stopHousekeeping = startHousekeeping(parts, logger)
+  sweepFiles(parts).catch((error: unknown) => {
+    logger.error({ err: error }, 'files without a row were not swept')
+  })
   if (env.smtpUrl === undefined) return () => Promise.resolve(stopHousekeeping())
   const sender = createSmtpSender(env.smtpUrl, env.mailFrom)
   const mail = startMailWorker({ ...parts, sender, logger })

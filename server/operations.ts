@@ -13,6 +13,7 @@ import { passwordResetsOperations } from './modules/password-resets/password-res
 import { peopleOperations } from './modules/people/people.routes'
 import { sectionChecksOperations } from './modules/section-checks/section-checks.routes'
 import type { RouteParts } from './parts'
+import { projectOperations } from './project-operations'
 
 export interface Identity {
   readonly version: string
@@ -37,6 +38,7 @@ export function allOperations(
     ...organisationsOperations(parts),
     ...auditOperations(parts),
     ...mailsOperations(parts),
+    ...projectOperations(parts),
   ]
   return [...operations, ...openapiOperations(version, operations)]
 }

@@ -1,5 +1,5 @@
 import { open, mkdir, readdir, rename, rm, stat } from 'node:fs/promises'
-import { join } from 'node:path'
+import { join, resolve } from 'node:path'
 import { randomUUID } from 'node:crypto'
 
 /** The bytes as they are kept, or a smaller picture of them. */
@@ -18,10 +18,14 @@ export interface FileStore {
   readonly listOlderThan: (moment: number) => Promise<readonly string[]>
 }
 
+/** Name of the folder beside the database, or in DATA_DIR. */
+export const FILES_FOLDER = 'files'
+
 const ID = /^[0-9a-f]{8}(?:-[0-9a-f]{4}){3}-[0-9a-f]{12}$/
 
-/** @param folder Made when the first file is written. */
-export function openFileStore(folder: string): FileStore {
+/** @param path Folder, made when the first file is written. */
+export function openFileStore(path: string): FileStore {
+  const folder = resolve(path)
   const nameOf = (id: string, variant: FileVariant) => {
     // Ids come from the database; this holds even if one did not.
     if (!ID.test(id)) throw new Error('A file was asked for by something that is no id')

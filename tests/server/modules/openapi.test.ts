@@ -10,6 +10,9 @@ import { holdingCase } from '../../support/server-cases'
 const mediaSchema = z.strictObject({
   'application/json': z.strictObject({ schema: z.looseObject({}) }).optional(),
   'text/csv': z.strictObject({ schema: z.looseObject({}) }).optional(),
+  'application/octet-stream': z.strictObject({ schema: z.looseObject({}) }).optional(),
+  'multipart/form-data': z.strictObject({ schema: z.looseObject({}) }).optional(),
+  'message/rfc822': z.strictObject({ schema: z.looseObject({}) }).optional(),
 })
 
 const responseSchema = z.strictObject({
@@ -23,12 +26,20 @@ const operationSchema = z.strictObject({
   description: z.string().startsWith('Access: '),
   parameters: z
     .array(
-      z.strictObject({
-        name: z.string(),
-        in: z.literal('path'),
-        required: z.literal(true),
-        schema: z.strictObject({ type: z.literal('string') }),
-      }),
+      z.discriminatedUnion('in', [
+        z.strictObject({
+          name: z.string(),
+          in: z.literal('path'),
+          required: z.literal(true),
+          schema: z.strictObject({ type: z.literal('string') }),
+        }),
+        z.strictObject({
+          name: z.string(),
+          in: z.literal('query'),
+          required: z.literal(false),
+          schema: z.looseObject({ type: z.enum(['string', 'integer']) }),
+        }),
+      ]),
     )
     .optional(),
   requestBody: z.strictObject({ required: z.literal(true), content: mediaSchema }).optional(),
