@@ -73,11 +73,16 @@ function faultsOf(issue: Issue, input: unknown): Fault[] {
     })
   }
   const where = path === '' ? 'body' : path
-  const value = valueAt(input, issue.path)
+  const isSecret = SECRETS.has(path)
+  const value = isSecret ? null : valueAt(input, issue.path)
+  const shown = isSecret ? 'what was entered' : showValue(value)
   const allowed = allowedBy(issue)
-  const message = `${where}: ${showValue(value)} is not allowed; it must be ${allowed}`
+  const message = `${where}: ${shown} is not allowed; it must be ${allowed}`
   return [{ path: where, value, allowed, unit: '–', message }]
 }
+
+/** Fields that hold a password: what was typed is never sent back or shown. */
+const SECRETS = new Set(['password', 'current', 'next'])
 
 /** `stations[2].chainage`, as the client names its fields. */
 function pathText(path: readonly PropertyKey[]): string {
@@ -124,9 +129,14 @@ function allowedBy(issue: Issue): string {
 }
 
 const COUNTED: Readonly<Record<string, string>> = { string: 'characters', array: 'entries' }
+const ONE_OR_MORE: Readonly<Record<string, string>> = {
+  string: 'at least one character',
+  array: 'a list with at least one entry',
+}
 
 function boundText(bound: { min: number; max: number }, origin: string): string {
   const unit = COUNTED[origin] ?? '–'
+  if (bound.min === 1 && ONE_OR_MORE[origin] !== undefined) return ONE_OR_MORE[origin]
   if (bound.min === -Infinity)
     return `${String(bound.max)} ${unit === '–' ? '' : `${unit} `}or less`
   return describeRange({ ...bound, unit })

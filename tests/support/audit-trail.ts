@@ -9,3 +9,10 @@ export function auditOf(db: Db) {
 export function auditActions(db: Db): readonly string[] {
   return auditOf(db).map(({ action }) => action)
 }
+
+/** The same as "who: what: on whom". */
+export function auditTrail(db: Db): readonly string[] {
+  return auditOf(db).map(
+    ({ actorName, action, subjectName }) => `${actorName}: ${action}: ${subjectName}`,
+  )
+}
