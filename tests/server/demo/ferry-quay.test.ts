@@ -21,7 +21,7 @@ function seeded() {
   return server
 }
 
-describe('the demonstration at Ferry Quay', () => {
+describe('the demonstration at Ferry Quay', { timeout: 30_000 }, () => {
   it('has its people as members, its gauges and its lines', async () => {
     const lead = as(seeded(), 'engineerA')
     const members = membersSchema.parse((await lead.get(`${projectPath}/members`)).body)

@@ -51,7 +51,7 @@ const writes = ({ projectPath, linePath, scenarioPath }: Started): readonly Writ
   ['post', `${projectPath}/files`],
 ]
 
-describe('a project', () => {
+describe('a project', { timeout: 30_000 }, () => {
   it('does not exist for an outsider, even of the same organisation or an administrator', async () => {
     const server = projectServer()
     const started = await startedProject(server)

@@ -16,7 +16,7 @@ async function started() {
   return { server, lead, projectPath, path }
 }
 
-describe('members', () => {
+describe('members', { timeout: 30_000 }, () => {
   it('are added by address, whatever its capitals, and see the project from then on', async () => {
     const { server, lead, projectPath, path } = await started()
     await as(server, 'engineerB').get(projectPath).expect(404)

@@ -35,7 +35,7 @@ async function made(server: ProjectServer, name: string): Promise<Project> {
   return (await as(server, 'engineerA').post('/api/projects', body).expect(201)).body as Project
 }
 
-describe('projects', () => {
+describe('projects', { timeout: 30_000 }, () => {
   it('are made by engineers, who then lead them', async () => {
     const server = projectServer()
     const project = await made(server, 'Quay')
@@ -178,7 +178,7 @@ describe('projects', () => {
   })
 })
 
-describe('the desk', () => {
+describe('the desk', { timeout: 30_000 }, () => {
   it('shows my projects, the last changed first, and what changed in them', async () => {
     const server = projectServer()
     const { line, scenario, scenarioPath } = await startedProject(server)

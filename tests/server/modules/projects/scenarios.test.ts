@@ -21,7 +21,7 @@ import {
 } from '../../../support/project-server'
 import { auditActions, auditOf } from '../../../support/audit-trail'
 
-describe('a scenario', () => {
+describe('a scenario', { timeout: 30_000 }, () => {
   it('carries figures that the server computed, whatever is sent', async () => {
     const { lead, line, linePath, scenario, scenarioPath } = await startedProject(projectServer())
     const expected = scenarioSummary(line, scenarioContentSchema.parse(content()))
@@ -194,7 +194,7 @@ describe('a scenario', () => {
   })
 })
 
-describe('a changed survey', () => {
+describe('a changed survey', { timeout: 30_000 }, () => {
   it('computes the scenarios of the line again, and leaves their contents and versions', async () => {
     const server = projectServer()
     const { lead, line, linePath, scenario, scenarioPath } = await startedProject(server)
