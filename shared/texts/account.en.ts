@@ -8,7 +8,7 @@ export const accountTexts = {
   registrationNumber: 'Registration number',
   registrationHint: 'With a chamber or register of engineers; may stay empty.',
   organisation: 'Organisation',
-  organisationHint: 'An administrator changes it.',
+  organisationHint: 'An administrator changes address, organisation and role.',
   role: 'Role',
   timeZone: 'Time zone',
   timeZoneHint: 'Type to search, for example a city.',

@@ -1,5 +1,5 @@
 import { defineStore } from 'pinia'
-import { computed, shallowReadonly, shallowRef } from 'vue'
+import { shallowReadonly, shallowRef } from 'vue'
 import type { Account } from '@shared/schemas/account'
 import { whenSessionEnds } from '@/api/request'
 import { fetchSession, signIn, signOut, type SignIn } from '@/api/session'
@@ -10,28 +10,34 @@ export const useSession = defineStore('session', () => {
   const preferences = usePreferences()
   /** Undefined until the server has answered. */
   const account = shallowRef<Account | null>()
-  const isKnown = computed(() => account.value !== undefined)
+
+  let changes = 0
 
   /** Takes over an account; its choice of units applies from now on. */
   function set(next: Account | null): void {
+    changes += 1
     account.value = next
     if (next) preferences.units = next.unitSystem
   }
 
+  /** An answer that was asked for before somebody signed in or out comes too late. */
+  async function ask(): Promise<void> {
+    const before = changes
+    const answer = await fetchSession()
+    if (changes === before) set(answer)
+  }
+
   let asked: Promise<void> | null = null
   /** Asks the server once, however many ask at the same time. */
-  async function load(): Promise<Account | null> {
-    if (account.value === undefined) {
-      asked ??= fetchSession().then(set)
-      await asked.finally(() => (asked = null))
-    }
+  async function reload(): Promise<Account | null> {
+    asked ??= ask().finally(() => (asked = null))
+    await asked
     return account.value ?? null
   }
 
-  /** Asks again, where the server may have ended the session. */
-  function reload(): Promise<Account | null> {
-    account.value = undefined
-    return load()
+  /** Whoever is signed in, as far as it is known. */
+  async function load(): Promise<Account | null> {
+    return account.value === undefined ? reload() : account.value
   }
 
   async function enter(input: SignIn): Promise<Account> {
@@ -47,7 +53,6 @@ export const useSession = defineStore('session', () => {
 
   return {
     account: shallowReadonly(account),
-    isKnown,
     set,
     load,
     reload,
