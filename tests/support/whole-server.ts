@@ -1,0 +1,155 @@
+import { mkdtempSync, rmSync } from 'node:fs'
+import { createServer } from 'node:http'
+import type { AddressInfo } from 'node:net'
+import { tmpdir } from 'node:os'
+import { join } from 'node:path'
+import { sql } from 'drizzle-orm'
+import { onTestFinished } from 'vitest'
+import {
+  ACCOUNT_ROLES,
+  MEMBER_ROLES,
+  type AccountRole,
+  type MemberRole,
+} from '../../shared/access/roles'
+import { operationsOf } from '../../server/app'
+import type { Db } from '../../server/db/client'
+import { projectMembers } from '../../server/db/schema'
+import { lowRoadContent, SHORT_STATIONS } from './ferry-quay'
+import { linkFor, tokenOf } from './links'
+import { browser, makePerson, ORIGIN, PASSWORD, signedIn, type TestPerson } from './people'
+import { freshApp } from './server-app'
+
+/** Somebody of each account role, as member of each kind and as none. */
+export interface Visitor {
+  /** Such as "engineer, editor", or "nobody". */
+  readonly what: string
+  readonly role: AccountRole | null
+  readonly member: MemberRole | null
+  /** Value of the cookie header; empty for nobody. */
+  readonly cookie: string
+}
+
+export const SHORT_CONTENT = lowRoadContent({ place: 5, waterLevel: 3.2 })
+
+/** Folder that goes with the test. */
+function temporaryFolder(): string {
+  const folder = mkdtempSync(join(tmpdir(), 'toehold-whole-'))
+  onTestFinished(() => {
+    rmSync(folder, { recursive: true })
+  })
+  return folder
+}
+
+async function cookieOf(app: ReturnType<typeof freshApp>['app'], { email }: TestPerson) {
+  const answer = await browser(app).post('/api/session').send({ email, password: PASSWORD })
+  const [cookie = ''] = answer.headers['set-cookie'] as unknown as string[]
+  return cookie.split(';')[0]!
+}
+
+/** A project with a gauge, a line, a scenario and a file, and people who wait for an answer. */
+async function furnish(server: ReturnType<typeof freshApp>) {
+  const { app, db, parts } = server
+  const lead = makePerson(parts, { id: 'the-lead', email: 'lead@people.test' })
+  const admin = makePerson(parts, { id: 'the-admin', email: 'admin@people.test', role: 'admin' })
+  const [agent, office] = [await signedIn(app, lead), await signedIn(app, admin)]
+  const post = async (path: string, body: object) =>
+    ((await agent.post(path).send(body).expect(201)).body as { id: string }).id
+  const projectId = await post('/api/projects', { name: 'Quay', datum: 'QD' })
+  const project = `/api/projects/${projectId}`
+  const gaugeId = await post(`${project}/gauges`, { name: 'Lock', zero: 0.6 })
+  const lineId = await post(`${project}/lines`, { name: 'Low road', stations: SHORT_STATIONS })
+  const scenario = { name: 'As asked', content: SHORT_CONTENT }
+  const scenarioId = await post(`${project}/lines/${lineId}/scenarios`, scenario)
+  const uploaded = await agent
+    .post(`${project}/files`)
+    .attach('file', Buffer.from('Low road, 28 stations'), 'note.txt')
+    .expect(201)
+  const invited = { email: 'invited@people.test', role: 'viewer', organisationId: 'tests' }
+  const invitation = await office.post('/api/admin/invitations').send(invited).expect(201)
+  await browser(app).post('/api/password-resets').send({ email: lead.email }).expect(202)
+  return {
+    ...{ projectId, gaugeId, lineId, scenarioId },
+    fileId: (uploaded.body as { id: string }).id,
+    version: '1',
+    accountId: lead.id,
+    organisationId: 'tests',
+    invitationId: (invitation.body as { id: string }).id,
+    mailId: mailTo(db, invited.email),
+    tokens: [tokenOf(linkFor(db, invited.email)), tokenOf(linkFor(db, lead.email))] as const,
+  }
+}
+
+function mailTo(db: Db, recipient: string): string {
+  return db.get<{ id: string }>(sql`select id from mails where recipient = ${recipient}`).id
+}
+
+async function visitorsOf({ app, db, parts }: ReturnType<typeof freshApp>, projectId: string) {
+  const visitors: Visitor[] = [{ what: 'nobody', role: null, member: null, cookie: '' }]
+  for (const role of ACCOUNT_ROLES) {
+    for (const member of [null, ...MEMBER_ROLES]) {
+      const person = makePerson(parts, { id: `${role}-${member ?? 'none'}`, role })
+      if (member) {
+        db.insert(projectMembers)
+          .values({ projectId, accountId: person.id, role: member, addedAt: 0 })
+          .run()
+      }
+      const cookie = await cookieOf(app, person)
+      visitors.push({ what: `${role}, ${member ?? 'no member'}`, role, member, cookie })
+    }
+  }
+  return visitors
+}
+
+/** The whole server, furnished and listening, with somebody of each kind at its door. */
+export async function wholeServer() {
+  const server = freshApp({ environment: { DATA_DIR: temporaryFolder() } })
+  const ids = await furnish(server)
+  const visitors = await visitorsOf(server, ids.projectId)
+  const listener = createServer(server.app)
+  await new Promise<void>((resolve) => listener.listen(0, '127.0.0.1', resolve))
+  onTestFinished(() => {
+    listener.closeAllConnections()
+    listener.close()
+  })
+  const address = `http://127.0.0.1:${(listener.address() as AddressInfo).port}`
+  return { ...server, ids, visitors, address, operations: operationsOf(server.app) }
+}
+
+export type WholeServer = Awaited<ReturnType<typeof wholeServer>>
+
+/** Runs something and takes back whatever it wrote to the database. */
+export async function undone<T>(db: Db, run: () => Promise<T>): Promise<T> {
+  db.run(sql`begin immediate`)
+  try {
+    return await run()
+  } finally {
+    db.run(sql`rollback`)
+  }
+}
+
+export interface Sent {
+  readonly method: string
+  readonly path: string
+  readonly cookie: string
+  readonly body?: BodyInit
+  readonly mediaType?: string
+}
+
+/** Sends a request as a browser of the program would. */
+export function send(address: string, { method, path, cookie, body, mediaType }: Sent) {
+  const headers: Record<string, string> = { Origin: ORIGIN }
+  if (cookie !== '') headers.Cookie = cookie
+  if (mediaType !== undefined) headers['Content-Type'] = mediaType
+  const hasBody = body !== undefined && method !== 'get'
+  return fetch(address + path, {
+    method: method.toUpperCase(),
+    headers,
+    redirect: 'manual',
+    ...(hasBody ? { body } : {}),
+  })
+}
+
+/** The path with everything in it that it names; what is not known stands for what is not there. */
+export function filledPath(path: string, values: Readonly<Record<string, string>>): string {
+  return path.replace(/:(\w+)/g, (_, name: string) => encodeURIComponent(values[name] ?? 'nothing'))
+}
