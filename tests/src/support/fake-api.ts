@@ -41,7 +41,8 @@ export function refuse(
   more: Partial<Problem> & { readonly retryAfter?: number } = {},
 ): Response {
   const { retryAfter, ...rest } = more
-  const headers = retryAfter === undefined ? {} : { 'retry-after': String(retryAfter) }
+  const headers = new Headers()
+  if (retryAfter !== undefined) headers.set('retry-after', String(retryAfter))
   return Response.json({ code, message: code, fields: [], ...rest }, { status, headers })
 }
 

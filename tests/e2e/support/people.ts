@@ -1,0 +1,15 @@
+import { expect, type Page } from '@playwright/test'
+
+/** Signs in through the list of the demonstration and waits for the page that was asked for. */
+export async function signInAs(page: Page, name: string, path: string): Promise<void> {
+  await page.goto(path)
+  await expect(page).toHaveURL(/\/sign-in\?next=/)
+  await page.getByRole('button', { name: new RegExp(`^${name}`) }).click()
+  await expect(page).toHaveURL(path)
+}
+
+export async function signOut(page: Page): Promise<void> {
+  await page.getByRole('button', { name: /^Signed in as/ }).click()
+  await page.getByRole('button', { name: 'Sign out', exact: true }).click()
+  await expect(page).toHaveURL(/\/sign-in/)
+}
