@@ -47,7 +47,7 @@ export const drawingTexts = {
     leaveLevel: 'leave at {level}',
   },
 
-  noSkirt: 'No skirt: nothing holds the tube',
+  noSkirt: 'No skirt: nothing keeps the tube in place',
   givesWay: 'Gives way at {depth}',
   overtopped: 'Overtopped',
   overtoppedBy: 'Overtopped by {height}',
@@ -68,7 +68,7 @@ export const drawingTexts = {
       'Under load the crest stands at {crest}; the tube rests on {contact}, and {lifted} of the skirt is lifted.',
     freeboard: 'The freeboard is {height}.',
     noFreeboard: 'There is no freeboard.',
-    noSkirt: 'There is no skirt, so nothing holds the tube.',
+    noSkirt: 'There is no skirt, so nothing keeps the tube in place.',
     givesWay: 'At {depth} the barrier gives way.',
     overtopped: 'The water runs over the barrier.',
     overtoppedBy: 'The water runs over the barrier, {height} above its crest.',
@@ -107,7 +107,7 @@ export const drawingTexts = {
     now: 'now {depth}',
     holdsTo: 'holds to {depth}',
     required: 'needs {factor}',
-    noFactor: 'No factor at any depth: nothing holds the tube',
+    noFactor: 'No factor at any depth: nothing keeps the tube in place',
     capped: 'above {factor} not drawn',
     tick: '{value}',
     describe: {
@@ -116,7 +116,7 @@ export const drawingTexts = {
       now: 'At {depth} of water the factor is {factor}.',
       nowNone: 'At {depth} of water there is no factor.',
       holdsTo: 'The section holds to {depth}.',
-      holdsNowhere: 'The section holds at no depth.',
+      holdsNowhere: 'No depth of water can be relied on.',
     },
   },
 } as const

@@ -3,8 +3,8 @@ import { onBeforeRouteUpdate, useRoute } from 'vue-router'
 import { readAddress, writeAddress, type AddressProblem } from '@/quick-check/address'
 import type { CaseDraft } from './useCaseDraft'
 
-/** Browsers stop a page that rewrites its address much more often than this [ms]. */
-const LEAST_INTERVAL = 300
+/** The address follows once a change has rested this long, so that no frame of a drag pays for it [ms]. */
+const SETTLE = 250
 
 /** The query of a full path of the router. */
 function searchOf(fullPath: string): string {
@@ -27,14 +27,14 @@ export function useCaseAddress(draft: CaseDraft, startProblems: readonly Address
   let written = searchOf(route.fullPath)
 
   function write(): void {
-    timer = undefined
     written = writeAddress(draft.content.value)
     const url = `${window.location.pathname}?${written}${window.location.hash}`
     window.history.replaceState({ ...window.history.state, current: url }, '', url)
   }
 
   function writeSoon(): void {
-    timer ??= setTimeout(write, LEAST_INTERVAL)
+    clearTimeout(timer)
+    timer = setTimeout(write, SETTLE)
   }
 
   watch(draft.content, writeSoon, { immediate: startProblems.length === 0 })

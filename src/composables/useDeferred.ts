@@ -1,7 +1,7 @@
 import { onScopeDispose, shallowReadonly, shallowRef, watch } from 'vue'
 
 /** A change settles for this long before the work starts, so that no frame of a drag pays for it [ms]. */
-const SETTLE = 60
+const SETTLE = 120
 /** The work starts after this long even if the browser is never idle [ms]. */
 const LATEST = 400
 

@@ -1,5 +1,5 @@
 import { computed, type Ref } from 'vue'
-import { evaluateSection, type SectionEvaluation } from '@shared/checks/evaluate-section'
+import type { SectionEvaluation } from '@shared/checks/evaluate-section'
 import { holdingProfile, holdsToAt } from '@shared/checks/holds-to'
 import { justEnough } from '@shared/checks/just-enough'
 import { leaveLevel, type LeaveLevel } from '@shared/checks/leave-level'
@@ -7,6 +7,7 @@ import { whatDecides } from '@shared/checks/what-decides'
 import type { SectionCase } from '@shared/schemas/section-case'
 import type { HoldsTo } from '@shared/schemas/section-result'
 import type { CheckedCase } from '@/quick-check/checked-case'
+import { pageEvaluation } from '@/quick-check/page-evaluation'
 import { isSameButDepth } from '@/quick-check/same-section'
 import { statedHeight } from '@/quick-check/stated-height'
 import { nextTube } from '@/quick-check/tube'
@@ -19,7 +20,7 @@ import { useDeferred } from './useDeferred'
  */
 export function useSectionCheck(input: Readonly<Ref<CheckedCase>>) {
   const section = computed(() => input.value.section)
-  const evaluation = computed<SectionEvaluation>(() => evaluateSection(section.value))
+  const evaluation = computed<SectionEvaluation>(() => pageEvaluation(section.value))
   const still = computed<SectionCase>((last) =>
     last && isSameButDepth(last, section.value) ? last : section.value,
   )

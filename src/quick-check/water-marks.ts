@@ -1,10 +1,10 @@
-import { evaluateSection } from '@shared/checks/evaluate-section'
 import type { LeaveLevel } from '@shared/checks/leave-level'
 import type { SectionMarks } from '@shared/drawing/cross-section'
 import type { SectionCase } from '@shared/schemas/section-case'
 import type { HoldsTo, Verdict } from '@shared/schemas/section-result'
 
 export type MarkId = 'low' | 'expected' | 'high'
+import { pageEvaluation } from './page-evaluation'
 
 /** One mark of the band in which the water may come. */
 export interface WaterMark {
@@ -29,7 +29,7 @@ export function waterMarks(section: SectionCase, uncertainty: number): readonly 
 function markAt(section: SectionCase, id: MarkId, depth: number): WaterMark {
   if (depth <= 0) return { id, depth, verdict: 'dry' }
   if (depth > 1.5 * section.barrier.diameter) return { id, depth, verdict: 'beyond' }
-  const { verdict } = evaluateSection({ ...section, water: { ...section.water, depth } })
+  const { verdict } = pageEvaluation({ ...section, water: { ...section.water, depth } })
   return { id, depth, verdict }
 }
 

@@ -230,7 +230,7 @@ describe('a tube that does not stand', () => {
 
   it.each([WIDE, MEDIUM, NARROW])('never prints "Holds" without a skirt (%o)', (view) => {
     const scene = draw(tube({ barrier: { skirtLength: 0 } }), { view })
-    expect(words(scene, 'failure')).toBe('No skirt: nothing holds the tube')
+    expect(words(scene, 'failure')).toBe('No skirt: nothing keeps the tube in place')
     expect(allWords(scene)).not.toMatch(/Holds|holds to|section holds/)
     expect(has(scene, 'skirt')).toBe(false)
   })

@@ -123,8 +123,10 @@ describe('the factor chart', () => {
   it('says that nothing holds where there is no factor at all', () => {
     const none = { ...series('open', 1), points: [point(0.1, null), point(0.7, null)] }
     const empty = factorChartScene(chart({ series: [none], holdsTo: null }))
-    expect(say(item(empty, 'text', 'no-factor').message)).toContain('nothing holds the tube')
-    expect(allWords(empty)).toContain('The section holds at no depth.')
+    expect(say(item(empty, 'text', 'no-factor').message)).toContain(
+      'nothing keeps the tube in place',
+    )
+    expect(allWords(empty)).toContain('No depth of water can be relied on.')
     expect(has(empty, 'holds-to')).toBe(false)
   })
 
