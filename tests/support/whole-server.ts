@@ -1,4 +1,4 @@
-import { mkdtempSync, rmSync } from 'node:fs'
+import { cpSync, mkdtempSync, rmSync } from 'node:fs'
 import { createServer } from 'node:http'
 import type { AddressInfo } from 'node:net'
 import { tmpdir } from 'node:os'
@@ -102,8 +102,10 @@ async function visitorsOf({ app, db, parts }: ReturnType<typeof freshApp>, proje
 
 /** The whole server, furnished and listening, with somebody of each kind at its door. */
 export async function wholeServer() {
-  const server = freshApp({ environment: { DATA_DIR: temporaryFolder() } })
+  const folder = temporaryFolder()
+  const server = freshApp({ environment: { DATA_DIR: join(folder, 'data') } })
   const ids = await furnish(server)
+  cpSync(join(folder, 'data'), join(folder, 'kept'), { recursive: true })
   const visitors = await visitorsOf(server, ids.projectId)
   const listener = createServer(server.app)
   await new Promise<void>((resolve) => listener.listen(0, '127.0.0.1', resolve))
@@ -112,20 +114,21 @@ export async function wholeServer() {
     listener.close()
   })
   const address = `http://127.0.0.1:${(listener.address() as AddressInfo).port}`
-  return { ...server, ids, visitors, address, operations: operationsOf(server.app) }
+  const operations = operationsOf(server.app)
+  /** Runs something and takes back whatever it wrote to the database and deleted from the disk. */
+  const undone = async <T>(run: () => Promise<T>): Promise<T> => {
+    server.db.run(sql`begin immediate`)
+    try {
+      return await run()
+    } finally {
+      server.db.run(sql`rollback`)
+      cpSync(join(folder, 'kept'), join(folder, 'data'), { recursive: true })
+    }
+  }
+  return { ...server, ids, visitors, address, operations, undone }
 }
 
 export type WholeServer = Awaited<ReturnType<typeof wholeServer>>
-
-/** Runs something and takes back whatever it wrote to the database. */
-export async function undone<T>(db: Db, run: () => Promise<T>): Promise<T> {
-  db.run(sql`begin immediate`)
-  try {
-    return await run()
-  } finally {
-    db.run(sql`rollback`)
-  }
-}
 
 export interface Sent {
   readonly method: string

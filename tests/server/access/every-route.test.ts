@@ -8,7 +8,6 @@ import { routesOf } from '../../support/routes'
 import {
   filledPath,
   send,
-  undone,
   type Visitor,
   type WholeServer,
   wholeServer,
@@ -32,7 +31,7 @@ async function knock(server: WholeServer, operation: Operation, { cookie }: Visi
   const body = request ? { body: '{}', mediaType: 'application/json' } : {}
   const { tokens: _, ...ids } = server.ids
   const sent = { method, path: filledPath(path, ids), cookie, ...body }
-  return undone(server.db, async () => outcomeOf(await send(server.address, sent), operation))
+  return server.undone(async () => outcomeOf(await send(server.address, sent), operation))
 }
 
 describe('access', { timeout: 120_000 }, () => {
