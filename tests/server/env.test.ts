@@ -15,6 +15,7 @@ describe('the environment', () => {
       port: 3000,
       host: undefined,
       databaseFile: 'data/toehold.sqlite',
+      dataFolder: 'data',
       logLevel: 'warn',
       appUrl: 'http://localhost:3000',
       sessionSecret: 'secret of the demonstration, known to everybody',
