@@ -23,7 +23,9 @@ export interface LongSectionScene extends Scene {
   readonly frame: LongFrame
 }
 
-const measureMetric = measureWith(textResolver({ line: lineTexts, checks: checksTexts }, 'metric'))
+const measureMetric = measureWith(
+  textResolver({ linePage: lineTexts, checks: checksTexts }, 'metric'),
+)
 
 /**
  * Long section of a line: ground, tubes by size, water level, the level to which each section holds,
@@ -38,7 +40,7 @@ export function longSectionScene(input: LongSectionInput): LongSectionScene {
   return {
     width: input.view.width,
     height: input.view.height,
-    title: { key: 'line.drawing.title' },
+    title: { key: 'linePage.drawing.title' },
     description: describe(input, frame),
     items: [...shapes, ...placer.placed],
     frame,
@@ -78,21 +80,21 @@ function describe(input: LongSectionInput, frame: LongFrame): readonly Message[]
     ({ value, kind: 'length', ...(rounding ? { rounding } : {}) }) as const
   const messages: Message[] = [
     {
-      key: 'line.drawing.describe.line',
+      key: 'linePage.drawing.describe.line',
       values: { from: String(frame.from), to: String(frame.to), count: stations.length },
     },
     {
-      key: 'line.drawing.describe.lowest',
+      key: 'linePage.drawing.describe.lowest',
       values: { level: level(lowest.groundLevel), chainage: String(lowest.chainage) },
     },
   ]
   if (waterLevel !== null) {
-    messages.push({ key: 'line.drawing.describe.water', values: { level: level(waterLevel) } })
+    messages.push({ key: 'linePage.drawing.describe.water', values: { level: level(waterLevel) } })
   }
   if (sections.length > 0) {
     const count = (verdict: string) => sections.filter((s) => s.verdict === verdict).length
     messages.push({
-      key: 'line.drawing.describe.sections',
+      key: 'linePage.drawing.describe.sections',
       values: {
         holds: count('holds'),
         narrow: count('narrow'),
@@ -103,7 +105,7 @@ function describe(input: LongSectionInput, frame: LongFrame): readonly Message[]
   }
   if (weakest && weakest.holdsToLevel !== null) {
     messages.push({
-      key: 'line.drawing.describe.weakest',
+      key: 'linePage.drawing.describe.weakest',
       values: {
         chainage: String(Number(weakest.chainage.toFixed(2))),
         level: level(weakest.holdsToLevel, 'down'),
@@ -112,6 +114,6 @@ function describe(input: LongSectionInput, frame: LongFrame): readonly Message[]
   }
   return [
     ...messages,
-    { key: 'line.drawing.exaggeration', values: { times: String(frame.exaggeration) } },
+    { key: 'linePage.drawing.exaggeration', values: { times: String(frame.exaggeration) } },
   ]
 }

@@ -1,6 +1,7 @@
 import { isInRange, rangeFault, showValue, type AllowedRange, type Fault } from '../errors'
 import { lineSections } from '../calc/line/line-sections'
-import { STATION_RANGES, type Station } from './line'
+import type { Station } from './line'
+import { STATION_RANGES } from './station-ranges'
 
 /** A survey as it is sent: stations, and the section length that is laid on them. */
 export interface Survey {

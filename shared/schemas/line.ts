@@ -1,5 +1,7 @@
 import { z } from 'zod'
 
+export { STATION_RANGES } from './station-ranges'
+
 const metres = (meaning: string) => z.number().meta({ unit: 'm', description: meaning })
 
 /** A surveyed point of a line. Surface and clear width count from here to the next station. */
@@ -13,13 +15,6 @@ export const stationSchema = z.strictObject({
   note: z.string().trim().max(200).default(''),
 })
 export type Station = z.output<typeof stationSchema>
-
-/** Bounds of a survey; they catch millimetres typed as metres, not hills. */
-export const STATION_RANGES = {
-  chainage: { min: 0, max: 100_000, unit: 'm' },
-  groundLevel: { min: -500, max: 9000, unit: 'm' },
-  clearWidth: { min: 0, max: 1000, unit: 'm' },
-} as const
 
 /** Most stations that one line may have. */
 export const MOST_STATIONS = 5000

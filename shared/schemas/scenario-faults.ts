@@ -1,7 +1,7 @@
 import { lineSections } from '../calc/line/line-sections'
 import { isInRange, rangeFault, showValue, type AllowedRange, type Fault } from '../errors'
 import { caseAt, sizeAt } from '../checks/place-case'
-import { STATION_RANGES } from './line'
+import { STATION_RANGES } from './station-ranges'
 import type { Survey } from './line-faults'
 import type { GroundAssumption, ScenarioContent, SizeRun } from './scenario'
 import { sectionFaults } from './section-faults'

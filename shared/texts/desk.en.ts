@@ -34,7 +34,6 @@ export const deskTexts = {
     removed: 'removed',
     deleted: 'deleted',
     added: 'added',
-    uploaded: 'added',
     other: 'worked on',
   },
   crumbs: 'Where you are',

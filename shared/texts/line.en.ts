@@ -148,7 +148,6 @@ export const lineTexts = {
   },
   compare: {
     title: 'Side by side',
-    choose: 'Choose two scenarios in the table.',
     one: 'Choose one more.',
     close: 'Close the comparison',
     caption: 'Two scenarios and where they differ',

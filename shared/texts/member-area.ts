@@ -12,9 +12,9 @@ export const areaTexts = {
     account: accountTexts,
     admin: adminTexts,
     desk: deskTexts,
-    line: lineTexts,
-    project: projectTexts,
-    scenario: scenarioTexts,
+    linePage: lineTexts,
+    projectPage: projectTexts,
+    scenarioPage: scenarioTexts,
     states: statesTexts,
   },
 } as const

@@ -6,7 +6,6 @@ export const projectTexts = {
   listWhat: 'projects',
   list: {
     search: 'Search',
-    archived: 'Archived',
     showArchived: 'Show archived',
     empty: 'No project yet',
     emptyText: 'A project holds gauges, lines, files and the people who may see them.',
@@ -69,7 +68,6 @@ export const projectTexts = {
       updated: 'Changed',
     },
     archived: 'Show archived',
-    search: 'Search',
   },
 
   gauges: {
@@ -96,7 +94,6 @@ export const projectTexts = {
       'With its zero and correction a reading given by telephone becomes a level at the site.',
     emptyRead: 'No gauge is entered.',
     actions: 'Actions',
-    notNumber: 'Not a number.',
   },
 
   members: {
@@ -137,7 +134,6 @@ export const projectTexts = {
     uploading: '{name}: {share}',
     progress: 'Upload of {name}',
     failed: '{name} was not taken',
-    retry: 'Try again',
     dismiss: 'Leave it out',
     by: '{size}, {at}, {by}',
     open: 'Open {name}',

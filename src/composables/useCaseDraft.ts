@@ -46,7 +46,7 @@ export function useCaseDraft(
   const valid = computed<CaseInput>((last) =>
     sectionFaults.value.length === 0
       ? (section.value as CaseInput)
-      : (last ?? firstValid(start, 'section')),
+      : withoutSkirtIfOff(last ?? firstValid(start, 'section'), section.value),
   )
   const validBefore = computed<FieldValues>((last) =>
     beforeFaults.value.length === 0
@@ -76,6 +76,15 @@ export function useCaseDraft(
 }
 
 export type CaseDraft = ReturnType<typeof useCaseDraft>
+
+/**
+ * The last valid input stands while another field is wrong, but not with a skirt that is already
+ * off: then nothing on the page may say that the barrier holds.
+ */
+function withoutSkirtIfOff(last: CaseInput, { values }: FormInput): CaseInput {
+  if (values.skirtLength !== 0 || last.values.skirtLength === 0) return last
+  return { ...last, values: { ...last.values, skirtLength: 0 } }
+}
 
 interface DraftContext {
   readonly units: Ref<UnitSystem>

@@ -2,7 +2,7 @@ import type { AllowedRange } from '@shared/errors'
 import type { QuantityKind } from '@shared/units'
 import type { FieldFault } from '@/quick-check/field-faults'
 import { shownBounds } from '@/quick-check/field-text'
-import { FIELDS, fieldOf, type FieldId } from '@/quick-check/fields'
+import { fieldOf } from '@/quick-check/fields'
 import { useWords } from './useWords'
 
 /** Words for a refused field: its name, what was typed, what is allowed, in the chosen units. */
@@ -21,10 +21,15 @@ export function useFaultText() {
   }
 
   function faultText(fault: FieldFault, typed: string): string {
-    const { field, reason, range } = fault
-    const { kind } = FIELDS[field]
+    const label = t(`quickCheck.field.${fault.field}.label`)
+    return figureFault({ ...fault, label, kind: fieldOf(fault.field).kind }, typed)
+  }
+
+  /** The same for any figure that is not one of the Quick check. */
+  function figureFault(fault: FigureFault, typed: string): string {
+    const { label, kind, reason, range } = fault
     const words = t(`quickCheck.fault.${reason}`, {
-      field: t(`quickCheck.field.${field}.label`),
+      field: label,
       typed,
       allowed: allowed(range, kind),
     })
@@ -33,13 +38,24 @@ export function useFaultText() {
     return hint ? `${words} ${t('quickCheck.fault.millimetres', { typed, metres })}` : words
   }
 
-  return { faultText }
+  return { faultText, figureFault }
+}
+
+/** A refused figure, whatever it is called. */
+export interface FigureFault extends Omit<FieldFault, 'field'> {
+  readonly label: string
+  readonly kind: QuantityKind
 }
 
 /** A length that would be right if it had been typed in millimetres. */
-function isMillimetres({ field, value, range }: FieldFault): boolean {
-  const isLength = fieldOf(field as FieldId).kind === 'length'
-  return isLength && value !== null && value > range.max && value / 1000 <= range.max && value >= 20
+function isMillimetres({ kind, value, range }: FigureFault): boolean {
+  return (
+    kind === 'length' &&
+    value !== null &&
+    value > range.max &&
+    value / 1000 <= range.max &&
+    value >= 20
+  )
 }
 
 function figure(value: number): string {

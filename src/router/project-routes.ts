@@ -1,4 +1,38 @@
 import type { RouteRecordRaw } from 'vue-router'
 
 /** Desk, projects, lines and scenarios. */
-export const projectRoutes: RouteRecordRaw[] = []
+export const projectRoutes: RouteRecordRaw[] = [
+  {
+    path: '/desk',
+    name: 'desk',
+    component: () => import('@/views/DeskView.vue'),
+    meta: { titleKey: 'desk.title' },
+  },
+  {
+    path: '/projects',
+    name: 'projects',
+    component: () => import('@/views/ProjectsView.vue'),
+    meta: { titleKey: 'projectPage.listTitle' },
+  },
+  {
+    path: '/projects/:projectId',
+    name: 'project',
+    component: () => import('@/views/ProjectView.vue'),
+    props: true,
+    meta: { titleKey: 'projectPage.title' },
+  },
+  {
+    path: '/projects/:projectId/lines/:lineId',
+    name: 'line',
+    component: () => import('@/views/LineView.vue'),
+    props: true,
+    meta: { titleKey: 'linePage.title' },
+  },
+  {
+    path: '/projects/:projectId/lines/:lineId/scenarios/:scenarioId',
+    name: 'scenario',
+    component: () => import('@/views/ScenarioView.vue'),
+    props: true,
+    meta: { titleKey: 'scenarioPage.title' },
+  },
+]

@@ -28,7 +28,7 @@ export function labelLongSection(
       id: 'scale',
       role: 'labelQuiet',
       message: {
-        key: 'line.drawing.exaggeration',
+        key: 'linePage.drawing.exaggeration',
         values: { times: String(frame.exaggeration) },
       },
       size: frame.font - 1,
@@ -46,7 +46,7 @@ function labelAxes(frame: LongFrame, placer: LabelPlacer): void {
   frame.levelTicks.forEach((level, index) => {
     const isLast = index === frame.levelTicks.length - 1
     const value = { value: level, kind: 'length', isBare: !isLast } as const
-    const message = { key: 'line.drawing.level', values: { level: value } }
+    const message = { key: 'linePage.drawing.level', values: { level: value } }
     const y = frame.toY(level) + size * 0.35
     placer.place({ id: `level-${level}`, role: 'labelQuiet', message, size }, [
       { x: frame.left - 5, y, anchor: 'end' },
@@ -54,7 +54,7 @@ function labelAxes(frame: LongFrame, placer: LabelPlacer): void {
   })
   const y = frame.bottom + size + 3
   for (const chainage of frame.chainageTicks) {
-    const message = { key: 'line.drawing.chainage', values: { chainage: String(chainage) } }
+    const message = { key: 'linePage.drawing.chainage', values: { chainage: String(chainage) } }
     const x = frame.toX(chainage)
     placer.place({ id: `chainage-${chainage}`, role: 'labelQuiet', message, size }, [
       { x, y, anchor: 'middle' },
@@ -73,9 +73,9 @@ function labelWeakest(input: LongSectionInput, frame: LongFrame, placer: LabelPl
   const chainage = String(Number(weakest.chainage.toFixed(2)))
   const message: Message =
     weakest.holdsToLevel === null
-      ? { key: 'line.drawing.weakestNone', values: { chainage } }
+      ? { key: 'linePage.drawing.weakestNone', values: { chainage } }
       : {
-          key: 'line.drawing.weakest',
+          key: 'linePage.drawing.weakest',
           values: {
             chainage,
             level: { value: weakest.holdsToLevel, kind: 'length', rounding: 'down' } as const,
@@ -99,7 +99,7 @@ function labelWater(input: LongSectionInput, frame: LongFrame, placer: LabelPlac
   const y = frame.toY(waterLevel)
   placer.avoid({ left: frame.left, right: frame.right, top: y - 1, bottom: y + 1 })
   const message = {
-    key: 'line.drawing.water',
+    key: 'linePage.drawing.water',
     values: { level: { value: waterLevel, kind: 'length' } as const },
   }
   const label = { id: 'water-label', role: 'labelWater', message } as const
@@ -123,7 +123,7 @@ function labelRun(
   const x = frame.toX(middle)
   const width = frame.toX(Math.min(to, frame.to)) - frame.toX(Math.max(from, frame.from))
   const message = {
-    key: 'line.drawing.tube',
+    key: 'linePage.drawing.tube',
     values: { diameter: { value: diameter, kind: 'length' } as const },
   }
   const label = { id: `run-${index}`, role: 'labelBarrier', message, size: frame.font - 1 } as const
@@ -153,7 +153,7 @@ function labelSurfaces(input: LongSectionInput, frame: LongFrame, placer: LabelP
 function surfaceName(surface: string): Message {
   const isKnown = GROUNDS.some(({ id }) => id === surface)
   if (isKnown) return { key: `checks.ground.${surface}` }
-  return { key: 'line.drawing.surface', values: { surface } }
+  return { key: 'linePage.drawing.surface', values: { surface } }
 }
 
 /** Runs of stations on one surface. */

@@ -49,13 +49,18 @@ export function longShapes(input: LongSectionInput, frame: LongFrame): readonly 
 
 type Add = (id: string, role: ShapeRole, d: string) => void
 
+interface Stretch {
+  readonly from: number
+  readonly to: number
+  /** Height above the ground [m]. */
+  readonly raise?: number
+}
+
 /** Ground between two chainages, with every station in between. */
 function groundPoints(
   { stations }: LongSectionInput,
   frame: LongFrame,
-  from: number,
-  to: number,
-  raise = 0,
+  { from, to, raise = 0 }: Stretch,
 ): readonly Point[] {
   const inside = stations.filter(({ chainage }) => chainage > from && chainage < to)
   const chainages = [from, ...inside.map(({ chainage }) => chainage), to]
@@ -66,7 +71,7 @@ function groundPoints(
 }
 
 function addGround(input: LongSectionInput, frame: LongFrame, add: Add): void {
-  const surface = groundPoints(input, frame, frame.from, frame.to)
+  const surface = groundPoints(input, frame, frame)
   const { right, left, bottom } = frame
   add('ground', 'ground', areaPath([...surface, { x: right, y: bottom }, { x: left, y: bottom }]))
   add('ground-line', 'groundLine', linePath(surface))
@@ -87,7 +92,7 @@ function addWater(input: LongSectionInput, frame: LongFrame, add: Add): void {
   if (waterLevel === null) return
   const y = frame.toY(waterLevel)
   const { left, right } = frame
-  const ground = groundPoints(input, frame, frame.from, frame.to)
+  const ground = groundPoints(input, frame, frame)
   const below = [...ground].reverse().map((point) => ({ x: point.x, y: Math.max(point.y, y) }))
   add('water', 'waterOverlay', areaPath([{ x: left, y }, { x: right, y }, ...below]))
   add(
@@ -108,15 +113,15 @@ function addTubes(input: LongSectionInput, frame: LongFrame, add: Add): void {
     const start = Math.max(from, frame.from)
     const end = Math.min(to, frame.to)
     if (end <= start) return
-    const crest = groundPoints(input, frame, start, end, diameter)
-    const foot = [...groundPoints(input, frame, start, end)].reverse()
+    const crest = groundPoints(input, frame, { from: start, to: end, raise: diameter })
+    const foot = [...groundPoints(input, frame, { from: start, to: end })].reverse()
     add(`tube-${index}`, 'barrierFill', areaPath([...crest, ...foot]))
     add(`tube-edge-${index}`, 'tubeEdge', linePath([foot.at(-1)!, ...crest, foot[0]!]))
   })
   const joints = input.sections.slice(1).flatMap(({ from }): (readonly [Point, Point])[] => {
     const run = input.runs.find((candidate) => candidate.from < from && from < candidate.to)
     if (!run) return []
-    const [foot] = groundPoints(input, frame, from, from)
+    const [foot] = groundPoints(input, frame, { from, to: from })
     return [
       [foot!, { x: foot!.x, y: frame.toY(groundLevelAt(input.stations, from) + run.diameter) }],
     ]

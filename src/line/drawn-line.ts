@@ -1,0 +1,50 @@
+import type { LineAnswer } from '@shared/checks/line-check'
+import type { LongSectionInput } from '@shared/drawing/long-section'
+import type { ScenarioContent } from '@shared/schemas/scenario'
+import type { SurveyedLine } from '@/scenario/place-on-line'
+
+type Drawn = Omit<LongSectionInput, 'view' | 'measure'>
+
+/** A survey alone, without water and tubes. */
+export function drawnSurvey({ stations, sectionLength }: SurveyedLine): Drawn {
+  return {
+    stations,
+    sectionLength,
+    waterLevel: null,
+    runs: [],
+    sections: [],
+    weakest: null,
+    place: null,
+  }
+}
+
+/** A line in a scenario with what the check of the line says. */
+export function drawnScenario(
+  line: SurveyedLine,
+  content: ScenarioContent,
+  { sections, weakest }: LineAnswer,
+): Drawn {
+  return {
+    ...drawnSurvey(line),
+    waterLevel: content.waterLevel,
+    runs: drawnRuns(content, sections),
+    sections,
+    weakest: { chainage: weakest.place, holdsToLevel: weakest.holdsToLevel },
+    place: content.place,
+  }
+}
+
+/** Where runs overlap the later one counts: neighbours of one size are drawn as one. */
+function drawnRuns({ sizes }: ScenarioContent, sections: LineAnswer['sections']) {
+  const runs: { from: number; to: number; diameter: number }[] = []
+  for (const { from, to } of sections) {
+    const middle = (from + to) / 2
+    const size = sizes.filter((run) => run.from <= middle && middle <= run.to).at(-1)
+    if (!size) continue
+    const { diameter } = size.barrier
+    const before = runs.at(-1)
+    if (before?.to === from && before.diameter === diameter) before.to = to
+    else runs.push({ from, to, diameter })
+  }
+  return runs
+}
