@@ -83,7 +83,7 @@ function assertNothingLost(file: string, acknowledged: ReadonlyMap<number, strin
   }
 }
 
-describe('a server that is killed while it saves', { timeout: 240_000 }, () => {
+describe('a server that is killed while it saves', { timeout: 480_000 }, () => {
   it('loses no acknowledged save, twenty times over', async () => {
     const file = databaseFile()
     const acknowledged = new Map<number, string>()
