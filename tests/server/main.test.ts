@@ -7,6 +7,13 @@ import { healthSchema } from '../../shared/schemas/health'
 import { SECRET } from '../support/server-app'
 import { startNode, startServerFile } from '../support/server-process'
 
+const PRODUCTION = {
+  NODE_ENV: 'production',
+  APP_URL: 'https://toehold.example',
+  SESSION_SECRET: SECRET,
+  LOG_LEVEL: 'silent',
+}
+
 function temporaryDatabase(): string {
   const folder = mkdtempSync(join(tmpdir(), 'toehold-main-'))
   onTestFinished(() => {
@@ -28,7 +35,7 @@ async function takenPort(): Promise<number> {
   return (other.address() as AddressInfo).port
 }
 
-describe('the server', { timeout: 30_000 }, () => {
+describe('the server', { timeout: 90_000 }, () => {
   it('prints its address once, answers there, and stops when it is told to', async () => {
     const { child, ended, firstLine } = start()
     const line = await firstLine
@@ -42,12 +49,63 @@ describe('the server', { timeout: 30_000 }, () => {
   })
 
   it('starts production with an address and a secret', async () => {
-    const { firstLine } = start({
-      NODE_ENV: 'production',
-      APP_URL: 'https://toehold.example',
-      SESSION_SECRET: SECRET,
-    })
+    const { firstLine } = start(PRODUCTION)
     expect(await firstLine).toMatch(/^Toehold \(production\) is at https:\/\/toehold\.example/)
+  })
+
+  it('prints a one-time link for the first administrator in production, until there is one', async () => {
+    const DATABASE_FILE = temporaryDatabase()
+    const first = start({ ...PRODUCTION, DATABASE_FILE })
+    const link = await first.printed(/(https:\/\/toehold\.example\/invite\/[\w-]{43})/)
+    const port = await first.printed(/\(port (\d+)\)/)
+    const path = new URL(link).pathname.replace('/invite/', '/api/invitations/')
+    const accepted = {
+      name: 'Administrator',
+      password: 'the password of the first one',
+      email: 'first@people.test',
+    }
+    const answer = await fetch(`http://127.0.0.1:${port}${path}`, {
+      method: 'POST',
+      headers: { 'Content-Type': 'application/json' },
+      body: JSON.stringify(accepted),
+    })
+    expect(answer.status).toBe(201)
+    first.child.kill('SIGTERM')
+    expect((await first.ended).status).toBe(0)
+    const second = start({ ...PRODUCTION, DATABASE_FILE })
+    await second.firstLine
+    second.child.kill('SIGTERM')
+    expect((await second.ended).stdout).not.toContain('/invite/')
+  })
+
+  it('refuses production on the database of a demonstration', async () => {
+    const DATABASE_FILE = temporaryDatabase()
+    const demonstration = start({ DATABASE_FILE })
+    await demonstration.firstLine
+    demonstration.child.kill('SIGTERM')
+    await demonstration.ended
+    const { status, stdout, stderr } = await start({ ...PRODUCTION, DATABASE_FILE }).ended
+    expect({ status, stdout }).toEqual({ status: 1, stdout: '' })
+    expect(stderr).toMatch(/^DATABASE_FILE: .* holds accounts of the demonstration/m)
+  })
+
+  it('stops although its mail server takes the call and says nothing', async () => {
+    const silent = createServer()
+    const isCalled = new Promise((resolve) => silent.once('connection', resolve))
+    await new Promise<void>((resolve) => silent.listen(0, '127.0.0.1', resolve))
+    onTestFinished(() => void silent.close())
+    const SMTP_URL = `smtp://127.0.0.1:${(silent.address() as AddressInfo).port}`
+    const { child, ended, printed } = start({ SMTP_URL, MAIL_FROM: 'toehold@mail.test' })
+    const port = await printed(/localhost:(\d+)/)
+    const answer = await fetch(`http://127.0.0.1:${port}/api/password-resets`, {
+      method: 'POST',
+      headers: { 'Content-Type': 'application/json' },
+      body: JSON.stringify({ email: 'engineer.a@demo.invalid' }),
+    })
+    expect(answer.status).toBe(202)
+    await isCalled
+    child.kill('SIGTERM')
+    expect((await ended).status).toBe(0)
   })
 
   it('refuses production without them, and names both', async () => {

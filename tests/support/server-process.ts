@@ -21,6 +21,8 @@ export interface Running {
   readonly ended: Promise<Outcome>
   /** Resolves with the first line that it prints. */
   readonly firstLine: Promise<string>
+  /** Resolves with the first group of the pattern once that is printed. */
+  readonly printed: (pattern: RegExp) => Promise<string>
 }
 
 /** What the program needs from its surroundings, without what the test runner adds. */
@@ -51,7 +53,16 @@ export function startNode(
       resolve({ status, stdout, stderr })
     })
   })
-  return { child, ended, firstLine }
+  const printed = (pattern: RegExp) =>
+    new Promise<string>((resolve) => {
+      const look = () => {
+        const found = pattern.exec(stdout)?.[1]
+        if (found !== undefined) resolve(found)
+      }
+      child.stdout.on('data', look)
+      look()
+    })
+  return { child, ended, firstLine, printed }
 }
 
 /** Runs a TypeScript program of the server to its end. */
