@@ -73,7 +73,7 @@ export const projectTexts = {
   gauges: {
     title: 'Gauges',
     what: 'gauges',
-    lead: 'Level at the site = reading + zero + correction.',
+    lead: 'Levels in {datum}. Level at the site = reading + zero + correction.',
     add: 'Add a gauge',
     addTitle: 'Add a gauge',
     editTitle: 'Change the gauge',

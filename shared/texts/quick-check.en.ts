@@ -117,6 +117,7 @@ export const quickCheckTexts = {
     notCovered: 'not covered',
     updating: 'updating',
     checks: 'Checks',
+    allChecks: 'All {count} checks',
     detail: 'Show how: {check}',
     stale:
       'These figures belong to the last valid input, {water}. They will follow once the marked field is corrected.',
@@ -234,6 +235,8 @@ export const quickCheckTexts = {
     svg: 'Drawing as SVG',
     png: 'as PNG',
     reset: 'Start again',
+    save: 'Save to a project',
+    notReached: 'The server cannot be reached. The case is kept in the address.',
     linkCopied: 'The link is copied.',
     textCopied: 'Two lines are copied.',
     notCopied: 'The browser did not let the page copy. Select and copy it here:',

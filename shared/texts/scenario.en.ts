@@ -75,8 +75,7 @@ export const scenarioTexts = {
 
   water: {
     level: 'Water level',
-    levelTip:
-      'Level that is checked, in the datum of the project. Depth is always level less ground.',
+    levelTip: 'Level that is checked, above {datum}. Depth is always level less ground.',
     depth: 'Depth here',
     depthTip: 'Depth of water at this place. It is kept as level: ground plus depth.',
     now: 'Level now',
@@ -156,6 +155,18 @@ export const scenarioTexts = {
     save: 'Save this',
     later: 'Decide later',
     resolved: 'Both versions are brought together.',
+  },
+  keep: {
+    title: 'Save to a project',
+    text: 'The case becomes a scenario of a line, and is saved as you go on working.',
+    action: 'Save it there',
+    project: 'Project',
+    line: 'Line',
+    newLine: 'A new line with one station',
+    lineName: 'Name of the line',
+    ground: 'Ground level of its station',
+    name: 'Name of the scenario',
+    noProject: 'You may not write in any project. Make one on the desk first.',
   },
   history: {
     open: 'History',

@@ -21,7 +21,7 @@ export interface LongFrame {
 }
 
 /** Exaggerations that are read at a glance; the largest that fits is taken. */
-const STEPS = [1, 1.5, 2, 2.5, 3, 4, 5, 6, 8] as const
+const STEPS = [1, 1.2, 1.5, 2, 2.5, 3, 4, 5, 6, 7, 8, 9] as const
 
 /** px for one step of an axis, at least. */
 const CHAINAGE_STEP = 64
