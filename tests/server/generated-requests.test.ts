@@ -71,6 +71,6 @@ describe('5 000 generated requests over every route', { timeout: 300_000 }, () =
     expect(tally.signedInAndShaped).toBeGreaterThanOrEqual(REQUESTS / 2)
     // Hardly a route was only ever refused: the requests reach what lies behind shape and access.
     const refused = server.operations.filter(({ id }) => !tally.succeeded.has(id))
-    expect(refused.length / server.operations.length).toBeLessThan(0.1)
+    expect(refused.length / server.operations.length).toBeLessThan(0.15)
   })
 })

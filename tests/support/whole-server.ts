@@ -103,7 +103,14 @@ async function visitorsOf({ app, db, parts }: ReturnType<typeof freshApp>, proje
 /** The whole server, furnished and listening, with somebody of each kind at its door. */
 export async function wholeServer() {
   const folder = temporaryFolder()
-  const server = freshApp({ environment: { DATA_DIR: join(folder, 'data') } })
+  const server = freshApp({
+    // Nothing is sent: no worker runs.
+    environment: {
+      DATA_DIR: join(folder, 'data'),
+      SMTP_URL: 'smtp://127.0.0.1:1',
+      MAIL_FROM: 'toehold@mail.test',
+    },
+  })
   const ids = await furnish(server)
   cpSync(join(folder, 'data'), join(folder, 'kept'), { recursive: true })
   const visitors = await visitorsOf(server, ids.projectId)
