@@ -14,3 +14,13 @@ for (const depth of [0, 0.01, 0.2, 0.42, 0.69, 0.8, 1.05]) {
     await expect(check.verdict).toHaveText('Does not hold')
   })
 }
+
+test('with the skirt off nothing says that it holds, also while another field is wrong', async ({
+  page,
+}) => {
+  const check = new QuickCheckPage(page)
+  await check.open('?v=1&skirt=0&uplift=developing')
+  await check.settle()
+  await expect(check.band).toContainText('to correct')
+  expect(await page.locator('body').textContent()).not.toMatch(/\bholds\b/i)
+})
