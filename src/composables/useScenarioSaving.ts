@@ -20,7 +20,7 @@ const RETRY = 5000
 export type SavingState =
   'saved' | 'waiting' | 'saving' | 'faulty' | 'unreachable' | 'refused' | 'conflict'
 
-/** My version beside the one that is there now. */
+/** What is there now beside my version, which may go on changing until a person decides. */
 export interface MetCollision extends Collision {
   readonly current: Scenario
 }
@@ -57,7 +57,7 @@ export function useScenarioSaving(parts: SavingParts) {
   return {
     base: shallowReadonly(base),
     problem: shallowReadonly(problem),
-    collision: shallowReadonly(collision),
+    collision: computed(() => collision.value && { ...collision.value, mine: parts.state.value }),
     isDirty,
     standing: computed(() => standingOf(parts, memory)),
     saveNow: actions.saveNow,
@@ -74,7 +74,7 @@ function savingMemory({ initial, state }: SavingParts) {
     base: shallowRef<Scenario>(initial),
     savedState,
     problem: shallowRef<ApiError | null>(null),
-    collision: shallowRef<MetCollision | null>(null),
+    collision: shallowRef<Omit<MetCollision, 'mine'> | null>(null),
     isSaving: shallowRef(false),
     isDirty: computed(() => !isSameState(state.value, savedState.value)),
     timer: undefined as ReturnType<typeof setTimeout> | undefined,
@@ -134,7 +134,7 @@ function savingActions(parts: SavingParts, memory: Memory) {
   function meet(current: Scenario, mine: ScenarioState, before: ScenarioState | null): void {
     const theirs = stateOf(current)
     if (isSameState(mine, theirs)) take(current, mine)
-    else collision.value = { mine, theirs, base: before, current }
+    else collision.value = { theirs, base: before, current }
   }
 
   /** The version that saves go on from, once a person has decided or restored. */
