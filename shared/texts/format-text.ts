@@ -26,9 +26,10 @@ export function showValues(values: TextValues, system: UnitSystem): Record<strin
 
 /** A resolver without a framework, for SVG files, PDFs and plain text; `{name}` is filled in. */
 export function textResolver(texts: object, system: UnitSystem): ResolveText {
-  return ({ key, values = {} }) => {
-    const shown = showValues(values, system)
+  return ({ key, values }) => {
     const template = lookUp(texts, key)
+    if (!values) return template
+    const shown = showValues(values, system)
     return template.replace(/\{(\w+)\}/g, (placeholder, name: string) => shown[name] ?? placeholder)
   }
 }

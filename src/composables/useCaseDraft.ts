@@ -18,7 +18,7 @@ import {
   startState,
   type DraftFields,
 } from '@/quick-check/draft-fields'
-import { fieldFaults, type FormInput } from '@/quick-check/field-faults'
+import { fieldFaults, type FieldFault, type FormInput } from '@/quick-check/field-faults'
 import { readTyped, shownText, stepped } from '@/quick-check/field-text'
 import { FIELD_IDS, FIELDS, type FieldId } from '@/quick-check/fields'
 import { TUBE_FIELDS } from '@/quick-check/tube'
@@ -53,9 +53,11 @@ export function useCaseDraft(
       ? (before.value.values as FieldValues)
       : (last ?? firstValid(start, 'before').values),
   )
-  const faults = computed(
-    () => new Map([...sectionFaults.value, ...beforeFaults.value].map((f) => [f.field, f])),
-  )
+  /** The same map as long as nothing is wrong, so that a drag does not wake every field. */
+  const faults = computed<ReadonlyMap<FieldId, FieldFault>>((last) => {
+    const all = [...sectionFaults.value, ...beforeFaults.value]
+    return all.length === 0 && last?.size === 0 ? last : new Map(all.map((f) => [f.field, f]))
+  })
   watch(units, () => forgetTyped(fields), { flush: 'sync' })
 
   return {
