@@ -210,7 +210,8 @@ export function resolveRange(
   const common = { min, unit, ...(minExcluded ? { minExcluded } : {}) }
   if (typeof max === 'number') return { ...common, max }
   const other = read(max.of)
-  // 1.5 × 0.7 is 1.0499999999999998 in binary: twelve digits give the bound that a person reads.
-  const bound = typeof other === 'number' ? Number((max.times * other).toPrecision(12)) : 0
+  // 1.5 × 0.7 is 1.0499999999999998 in binary; the bound that a person reads, 1.05, is allowed too.
+  const exact = typeof other === 'number' ? max.times * other : 0
+  const bound = Math.max(exact, Number(exact.toPrecision(12)))
   return { ...common, max: bound > 0 ? bound : Infinity }
 }
