@@ -8,6 +8,8 @@ export const CLEARING_TIME = 20 * 60
 export interface LeaveInput {
   /** Depth to which all checks hold [m]; 0 where nothing holds. */
   readonly holdsToDepth: number
+  /** Depth from which they hold [m]; 0 or left out: from the first drop. */
+  readonly holdsFrom?: number | null
   /** Depth that is checked [m]. */
   readonly depth: number
   /** Depth of the water at this moment [m], where it is known. */
@@ -22,12 +24,16 @@ export interface LeaveInput {
  * - `leave-at`: everybody leaves before the water reaches it.
  * - `leave-before-level`: the level checked holds, but lies above the leave level.
  * - `leave-now`: the water is above it already.
- * - `none`: nothing holds, so there is no leave level; do not rely on the barrier.
+ * - `none`: nothing holds, or not at this water or below it, so there is no leave level; do not rely
+ *   on the barrier.
  */
 export type LeaveState = 'leave-at' | 'leave-before-level' | 'leave-now' | 'none'
 
 export interface LeaveLevel {
-  /** Depth at which everybody leaves [m]; null where nothing holds. */
+  /**
+   * Depth at which everybody leaves [m]; null where nothing holds. Negative where the water must be
+   * left before it reaches the barrier at all.
+   */
   readonly depth: number | null
   /** What it lies below the level that holds [m]. */
   readonly margin: number
@@ -36,13 +42,15 @@ export interface LeaveLevel {
 
 /**
  * Leave level: what holds, less what the water rises while the area is cleared, at least 0.05 m.
- * Not below the ground.
  */
 export function leaveLevel(input: LeaveInput): LeaveLevel {
-  const { holdsToDepth, depth, depthNow = null, rateOfRise, timeToClear } = input
+  const { holdsToDepth, holdsFrom, depth, depthNow = null, rateOfRise, timeToClear } = input
   const margin = Math.max((rateOfRise ?? 0) * timeToClear, LEAST_LEAVE_MARGIN)
-  if (holdsToDepth <= 0) return { depth: null, margin, state: 'none' }
-  const leave = Math.max(0, holdsToDepth - margin)
+  const leave = holdsToDepth - margin
+  // Where it holds only from some depth on, it cannot be relied on below that.
+  const from = holdsFrom ?? 0
+  const isBelowHold = from > 0 && (depth < from || leave <= from)
+  if (holdsToDepth <= 0 || isBelowHold) return { depth: null, margin, state: 'none' }
   return { depth: leave, margin, state: leaveState(leave, depth, depthNow, holdsToDepth) }
 }
 

@@ -50,19 +50,23 @@ type Draft = Omit<Alternative, 'holdsTo'>
 
 function edgeAlternatives(section: SectionCase): readonly Draft[] {
   const { uplift } = section
-  if (uplift.model === 'none') return []
+  const isSealed = uplift.model === 'none'
+  // Nothing under the skirt is an assumption, too: show what the edge would do without it.
+  const model = isSealed ? 'linear' : uplift.model
   return (Object.keys(EDGE_FACTORS) as EdgeId[])
-    .filter((id) => EDGE_FACTORS[id] !== uplift.edgeFactor)
+    .filter((id) => EDGE_FACTORS[id] !== (isSealed ? EDGE_FACTORS.sealed : uplift.edgeFactor))
     .map((id) => ({
       id: `edge-${id}` as const,
       group: 'edge' as const,
-      section: { ...section, uplift: { ...uplift, edgeFactor: EDGE_FACTORS[id] } },
+      section: { ...section, uplift: { ...uplift, model, edgeFactor: EDGE_FACTORS[id] } },
     }))
 }
 
 function frictionAlternatives(section: SectionCase): readonly Draft[] {
-  if (section.ground.friction <= SLIPPERY_FRICTION) return []
-  const ground = { ...section.ground, friction: SLIPPERY_FRICTION }
+  const { friction } = section.ground
+  // On ground that is slippery already: half of it.
+  const slippery = friction > SLIPPERY_FRICTION ? SLIPPERY_FRICTION : friction / 2
+  const ground = { ...section.ground, friction: slippery }
   return [{ id: 'friction-slippery', group: 'friction', section: { ...section, ground } }]
 }
 

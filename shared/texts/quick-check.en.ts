@@ -101,6 +101,8 @@ export const quickCheckTexts = {
         AsDepth: 'Leave now. The leave level of {depth} is reached.',
         AsLevel: 'Leave now. The leave level of {level} ({depth}) is reached.',
       },
+      whileDry: 'Leave before the water reaches the barrier.',
+      nowDry: 'Leave now. The water must be left before it reaches the barrier.',
       none: 'Do not rely on it. There is no leave level.',
     },
     overtopped: 'Overtopped: the water stands {height} above the unloaded crest.',
@@ -182,13 +184,17 @@ export const quickCheckTexts = {
       weighed: 'weighed, 50 %',
       sealed: 'sealed, 0 %',
       typed: '{share} open',
+      none: 'none under it (sealed seat)',
     },
     slippery: 'slippery, {friction}',
     friction: '{friction}',
     tube: 'tube {diameter}',
     chosen: 'chosen',
     nothing: 'none',
-    judgement: 'Weighed and sealed edges, and the slippery surface, are judgement, unverified.',
+    judgement:
+      'Weighed and sealed edges, and the slippery surface, are judgement, unverified. A weighed edge takes 2 edge bags of 20 kg per metre.',
+    adverse:
+      'The adverse limit: an open edge with a sealed seat puts the full pressure under the whole base, and nothing holds.',
     noSkirt: 'Without a skirt none of this changes the answer: put the skirt on first.',
   },
   before: {
@@ -245,7 +251,17 @@ export const quickCheckTexts = {
   asText: {
     first: '{verdict}: {water}; {holdsTo}. {leave} Governs: {governs}.',
     second:
-      'Rests on tube {diameter} (skirt {skirt}, air {air}), {surface}, friction {friction}, skirt edge {edge} open, basis “{basis}”. A design check, not a guarantee. {link}',
+      'Rests on tube {diameter} (skirt {skirt}, air {air}), {surface}, friction {friction}, {edge}, basis “{basis}”{loads}. A design check, not a guarantee. {link}',
+    stale: 'Not computed from what was typed last.',
+    edge: { open: 'skirt edge {edge} open', none: 'no water under the skirt (sealed seat)' },
+    load: {
+      dryDepth: '{value} of water on the dry side',
+      current: 'current {value}',
+      waves: 'waves {value}',
+      debris: 'floating debris',
+      fall: 'crossfall {value}',
+      freeboard: 'freeboard {value} required',
+    },
   },
   announce: '{verdict}. {water}, {holdsTo}. {leave} {governs} governs.',
 

@@ -9,7 +9,7 @@ import {
   type CaseInput,
   type FieldValues,
 } from '@/quick-check/case-input'
-import { CHOICE_IDS, type ChoiceId, type Choices } from '@/quick-check/choices'
+import { CHOICE_IDS, type ChoiceId, type Choices, OWN_SURFACE } from '@/quick-check/choices'
 import {
   draftContent,
   draftFields,
@@ -121,6 +121,7 @@ function draftActions(fields: DraftFields, choices: Ref<Choices>, context: Draft
     if (id === 'waterMode') setValues(changeForMode(valid.value, next.waterMode))
     choices.value = next
     if (id === 'surface') layOn(option)
+    if (id === 'suitable' && option === 'yes') choices.value = judgedByUser(choices.value)
   }
 
   function layOn(surface: string): void {
@@ -187,4 +188,10 @@ export function injectCaseDraft(): CaseDraft {
   const draft = inject(KEY)
   if (!draft) throw new Error('No case draft above this component')
   return draft
+}
+
+/** A ground that the catalogue calls unsuitable can only be judged otherwise as another surface. */
+function judgedByUser(choices: Choices): Choices {
+  const ground = GROUNDS.find(({ id }) => id === choices.surface)
+  return ground && !ground.isSuitable ? { ...choices, surface: OWN_SURFACE } : choices
 }

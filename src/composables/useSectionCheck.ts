@@ -64,6 +64,7 @@ function leaveOf(checked: CheckedCase, holdsTo: HoldsTo): LeaveLevel {
   const { section, depthNow, rateOfRise, timeToClear } = checked
   return leaveLevel({
     holdsToDepth: holdsTo.depth,
+    holdsFrom: holdsTo.from,
     depth: section.water.depth,
     depthNow,
     rateOfRise,

@@ -1,6 +1,6 @@
 import type { SectionCase } from '@shared/schemas/section-case'
 import type { CheckId, Verdict } from '@shared/schemas/section-result'
-import type { ResolveText } from '@shared/texts/format-text'
+import type { Message, ResolveText } from '@shared/texts/format-text'
 import type { QuantityKind } from '@shared/units'
 import { basisKey } from './basis-key'
 
@@ -14,14 +14,15 @@ export interface TextOfCase {
   readonly section: SectionCase
   readonly surface: string
   readonly link: string
+  /** The figures belong to an older input: something typed since is refused. */
+  readonly isStale: boolean
 }
 
+/** Shows a figure as it was given. */
+type Given = (value: number, kind: QuantityKind) => string
+
 /** Two lines for a message: the answer, and what it rests on with the link. */
-export function caseAsText(
-  say: ResolveText,
-  given: (value: number, kind: QuantityKind) => string,
-  text: TextOfCase,
-): string {
+export function caseAsText(say: ResolveText, given: Given, text: TextOfCase): string {
   const { section, surface, verdict, governs, water, holdsTo, leave, link } = text
   const { barrier, ground, uplift, basis } = section
   const first = say({
@@ -42,10 +43,37 @@ export function caseAsText(
       air: given(barrier.airPressure, 'pressure'),
       surface: say({ key: `checks.ground.${surface}` }),
       friction: given(ground.friction, 'ratio'),
-      edge: given(uplift.edgeFactor, 'percent'),
+      edge: say(edgeMessage(uplift, given)),
+      loads: loadMessages(section, given)
+        .map((message) => `, ${say(message)}`)
+        .join(''),
       basis: say({ key: basisKey(basis) }),
       link,
     },
   })
-  return `${first}\n${second}`
+  const stale = text.isStale ? `${say({ key: 'quickCheck.asText.stale' })} ` : ''
+  return `${stale}${first}\n${second}`
+}
+
+function edgeMessage(uplift: SectionCase['uplift'], given: Given): Message {
+  if (uplift.model === 'none') return { key: 'quickCheck.asText.edge.none' }
+  const values = { edge: given(uplift.edgeFactor, 'percent') }
+  return { key: 'quickCheck.asText.edge.open', values }
+}
+
+/** Everything that is not as in plain still water on level ground. */
+function loadMessages(section: SectionCase, given: Given): readonly Message[] {
+  const { water, debris, ground, requiredFreeboard } = section
+  const load = (id: string, value = ''): Message => ({
+    key: `quickCheck.asText.load.${id}`,
+    values: { value },
+  })
+  return [
+    ...(water.dryDepth > 0 ? [load('dryDepth', given(water.dryDepth, 'length'))] : []),
+    ...(water.currentSpeed > 0 ? [load('current', given(water.currentSpeed, 'speed'))] : []),
+    ...(water.waveHeight > 0 ? [load('waves', given(water.waveHeight, 'length'))] : []),
+    ...(debris.force > 0 ? [load('debris')] : []),
+    ...(ground.fall !== 0 ? [load('fall', given(ground.fall, 'percent'))] : []),
+    load('freeboard', given(requiredFreeboard, 'length')),
+  ]
 }

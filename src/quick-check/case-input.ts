@@ -1,3 +1,4 @@
+import { GROUNDS } from '@shared/catalogue/grounds'
 import type { SectionCase } from '@shared/schemas/section-case'
 import type { Choices } from './choices'
 import type { FieldId } from './fields'
@@ -14,6 +15,11 @@ export interface CaseInput {
 /** A field that must not be empty has a number in a valid input; an empty one never reaches a calculation. */
 function given(value: number | null): number {
   return value ?? Number.NaN
+}
+
+/** False for a ground that the catalogue marks as unsuitable: loose gravel, bare mud. */
+function isSuitableSurface(surface: string): boolean {
+  return GROUNDS.find(({ id }) => id === surface)?.isSuitable ?? true
 }
 
 /** Water level on the wet side [m above datum], null while the water is entered as a depth. */
@@ -49,7 +55,8 @@ export function sectionCase(input: CaseInput): SectionCase {
     ground: {
       friction: given(values.friction),
       fall: given(values.fall),
-      suitable: choices.suitable === 'yes',
+      // What the catalogue calls unsuitable stays so; another surface is the user's own to judge.
+      suitable: choices.suitable === 'yes' && isSuitableSurface(choices.surface),
       permeability: values.permeability,
       layerThickness: values.layerThickness,
     },

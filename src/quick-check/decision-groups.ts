@@ -1,4 +1,4 @@
-import { EDGE_FACTORS, SLIPPERY_FRICTION, type Alternative } from '@shared/checks/what-decides'
+import { EDGE_FACTORS, type Alternative } from '@shared/checks/what-decides'
 import { basisKey } from './basis-key'
 import type { SectionCase } from '@shared/schemas/section-case'
 import type { HoldsTo } from '@shared/schemas/section-result'
@@ -52,7 +52,11 @@ export function decisionGroups(
 }
 
 function chosenName(id: DecisionGroupId, section: SectionCase, given: Given): Message {
-  if (id === 'edge') return edgeName(section.uplift.edgeFactor, given)
+  if (id === 'edge') {
+    const { model, edgeFactor } = section.uplift
+    if (model === 'none') return { key: 'quickCheck.decides.edge.none' }
+    return edgeName(edgeFactor, given)
+  }
   if (id === 'friction') {
     const values = { friction: given(section.ground.friction, 'ratio') }
     return { key: 'quickCheck.decides.friction', values }
@@ -68,7 +72,7 @@ function alternativeName({ group, section }: Alternative, given: Given): Message
   if (group === 'friction')
     return {
       key: 'quickCheck.decides.slippery',
-      values: { friction: given(SLIPPERY_FRICTION, 'ratio') },
+      values: { friction: given(section.ground.friction, 'ratio') },
     }
   return chosenName(group, section, given)
 }

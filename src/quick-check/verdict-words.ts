@@ -55,6 +55,10 @@ export function holdsToWords(
 /** The leave level, in its sentence. */
 export function leaveWords(say: ResolveText, leave: LeaveLevel, place: WaterPlace): string {
   if (leave.depth === null) return say({ key: 'quickCheck.verdict.leave.none' })
+  if (leave.depth <= 0 && place.ground === null) {
+    const isNow = leave.state === 'leave-now'
+    return say({ key: `quickCheck.verdict.leave.${isNow ? 'nowDry' : 'whileDry'}` })
+  }
   const { form, values } = limit(leave.depth, place)
   return say({ key: `quickCheck.verdict.leave.${leave.state}.${form}`, values })
 }

@@ -47,6 +47,7 @@ export function drawnMarks(
     low: depthOf('low'),
     high: depthOf('high'),
     holdsTo: holdsTo.from === null ? null : holdsTo.depth,
-    leave: leave.depth,
+    // Below the ground there is nothing to mark: the words say when to leave.
+    leave: leave.depth !== null && leave.depth > 0 ? leave.depth : null,
   }
 }

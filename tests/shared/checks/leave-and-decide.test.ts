@@ -58,9 +58,20 @@ describe('leave level', () => {
     expect(leaveLevel({ ...known, depthNow: 0.4 }).state).toBe('leave-at')
   })
 
-  it('has no leave level where nothing holds, and none below the ground', () => {
-    expect(leaveLevel({ ...known, holdsToDepth: 0 })).toMatchObject({ depth: null, state: 'none' })
-    expect(leaveLevel({ ...known, holdsToDepth: 0.03, depth: 0.02 }).depth).toBe(0)
+  it('lies below the ground where clearing takes longer than the water needs', () => {
+    // 2 m/h for 20 min is 0.667 m: more than the 0.49 m that hold.
+    const { depth, margin } = leaveLevel({ ...known, rateOfRise: 2 / 3600 })
+    expect(margin).toBeCloseTo(2 / 3, 12)
+    expect(depth).toBeCloseTo(0.49 - 2 / 3, 12)
+    expect(leaveLevel({ ...known, rateOfRise: 2 / 3600, depthNow: -0.1 }).state).toBe('leave-now')
+  })
+
+  it('is not there where nothing holds, or only higher water does', () => {
+    const none = { depth: null, state: 'none' }
+    expect(leaveLevel({ ...known, holdsToDepth: 0 })).toMatchObject(none)
+    expect(leaveLevel({ ...known, holdsFrom: 0.43 })).toMatchObject(none)
+    expect(leaveLevel({ ...known, holdsFrom: 0.45, depth: 0.46 })).toMatchObject(none)
+    expect(leaveLevel({ ...known, holdsFrom: 0.2 }).state).toBe('leave-at')
   })
 })
 
@@ -87,10 +98,13 @@ describe('what decides', () => {
     expect(holdsTo('next-size')).toBeGreaterThan(holdsToAt(holdingProfile(section), 0.55).depth)
   })
 
-  it('does not ask for an edge where the base is sealed, nor for a slippery ground where it is', () => {
+  it('leaves no group out where the choice is the most favourable, or the ground slippery', () => {
     const sealed = exampleSection({ uplift: { model: 'none' }, ground: { friction: 0.2 } })
-    const ids = whatDecides(sealed, null).map(({ id }) => id)
-    expect(ids.every((id) => id.startsWith('basis-'))).toBe(true)
+    const others = whatDecides(sealed, null)
+    const find = (id: string) => others.find((other) => other.id === id)!
+    expect(find('edge-open').section.uplift).toMatchObject({ model: 'linear', edgeFactor: 1 })
+    expect(find('edge-weighed').section.uplift).toMatchObject({ model: 'linear', edgeFactor: 0.5 })
+    expect(find('friction-slippery').section.ground.friction).toBe(0.1)
   })
 })
 
