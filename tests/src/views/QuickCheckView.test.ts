@@ -156,8 +156,11 @@ describe('the Quick check', () => {
 
   it('names what decides once it is worked out', async () => {
     await open()
-    await waitFor(() =>
-      expect(screen.getByRole('row', { name: /sealed, 0\s% .*0\.588/ })).toBeTruthy(),
+    await waitFor(
+      () => {
+        expect(screen.getByRole('row', { name: /sealed, 0\s% .*0\.588/ })).toBeTruthy()
+      },
+      { timeout: 15_000 },
     )
     expect(screen.getByRole('row', { name: /open, 100\s% chosen .*0\.489/ })).toBeTruthy()
   })
