@@ -52,11 +52,26 @@ export function rangeOfField(id: FieldId, input: FormInput): AllowedRange {
   const { path, range } = fieldOf(id)
   if (path) return resolveRange(path, (other) => input.values[BY_PATH.get(other)!])
   if (id === 'level') return depthRangeFrom(input, 0) ?? range!
-  if (id === 'stage') {
-    const offset = gaugeOffset(input.values as FieldValues)
-    return (Number.isFinite(offset) ? depthRangeFrom(input, offset) : null) ?? range!
+  if (id === 'stage') return stageRange(input) ?? range!
+  if (id === 'waterNow') {
+    const top = topRange(input)
+    return top ? { ...top, min: tidy(top.min - LOW_WATER) } : range!
   }
   return range!
+}
+
+/** A river may stand so far below the ground at the barrier [m]. */
+const LOW_WATER = 50
+
+/** Range of the water in the way in which it is entered. */
+function topRange(input: FormInput): AllowedRange | null {
+  if (input.choices.waterMode === 'depth') return rangeOfField('depth', input)
+  return input.choices.waterMode === 'level' ? depthRangeFrom(input, 0) : stageRange(input)
+}
+
+function stageRange(input: FormInput): AllowedRange | null {
+  const offset = gaugeOffset(input.values as FieldValues)
+  return Number.isFinite(offset) ? depthRangeFrom(input, offset) : null
 }
 
 /** Range of the depth, seen from a zero that lies `offset` above the datum. */

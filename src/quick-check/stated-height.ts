@@ -2,13 +2,13 @@ import { evaluateSection } from '@shared/checks/evaluate-section'
 import type { SectionCase } from '@shared/schemas/section-case'
 import type { CheckId } from '@shared/schemas/section-result'
 
-/** Where the height on the maker's label goes: stated = depth + sag + freeboard + moving + spare. */
+/** Where the height of the tube goes: diameter = depth + sag + freeboard + moving + spare. */
 export interface StatedHeight {
   /** Height on the label [m]. */
   readonly stated: number
   /** Depth to which every check is met [m]; 0 where none is. */
   readonly depth: number
-  /** Label less the loaded crest at that depth [m]; negative where the tube stands higher than its label. */
+  /** Unloaded diameter less the loaded crest at that depth [m]. */
   readonly sag: number
   /** Freeboard that is required [m]. */
   readonly freeboard: number
@@ -37,7 +37,7 @@ export function statedHeight(
   return {
     stated,
     depth,
-    sag: stated - crest,
+    sag: section.barrier.diameter - crest,
     freeboard,
     allowance: crest - depth - at.freeboard.available,
     spare: Math.max(0, at.freeboard.available - freeboard),
