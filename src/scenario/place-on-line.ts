@@ -1,10 +1,10 @@
 import { groundLevelAt, lineSections, surfaceAt } from '@shared/calc/line/line-sections'
 import { assumptionOf, sizeAt, type Place } from '@shared/checks/place-case'
-import type { Line } from '@shared/schemas/project'
+import type { Survey } from '@shared/schemas/line-faults'
 import type { GroundAssumption, ScenarioContent, SizeRun } from '@shared/schemas/scenario'
 
 /** What a line is to a workbench: its survey and how it is cut. */
-export type SurveyedLine = Pick<Line, 'stations' | 'sectionLength'>
+export type SurveyedLine = Survey
 
 /** A place of a line in a scenario: its ground, its section, and what is laid on it. */
 export interface PlaceOnLine extends Place {
