@@ -41,6 +41,7 @@ test('work is made, moves with the water, is saved by itself and found again tom
   await signOut(page)
   await signInAs(page, 'Engineer A', '/desk')
   await page.getByRole('link', { name: project, exact: true }).first().click()
+  await expect(page.getByRole('heading', { level: 1, name: project })).toBeVisible()
   await page.getByRole('link', { name: 'Mill road' }).click()
   const row = page.getByRole('row', { name: /Tonight/ })
   await expect(row).toContainText('3.320')
