@@ -82,6 +82,8 @@ function labelWeakest(input: LongSectionInput, frame: LongFrame, placer: LabelPl
           },
         }
   const spots: Spot[] = [
+    { x: x + 8, y: frame.top, anchor: 'start' },
+    { x: x - 8, y: frame.top, anchor: 'end' },
     { x, y: y - 16, anchor: 'middle' },
     { x: x + 10, y: y - 5, anchor: 'start' },
     { x: x - 10, y: y - 5, anchor: 'end' },
