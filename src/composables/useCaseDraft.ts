@@ -21,6 +21,7 @@ import {
 import { fieldFaults, type FieldFault, type FormInput } from '@/quick-check/field-faults'
 import { readTyped, shownText, stepped } from '@/quick-check/field-text'
 import { FIELD_IDS, FIELDS, type FieldId } from '@/quick-check/fields'
+import { surfaceFigures } from '@/quick-check/surface'
 import { TUBE_FIELDS } from '@/quick-check/tube'
 
 /** Every field and choice of one Quick check, what is wrong with them, and the last input without a fault. */
@@ -125,11 +126,10 @@ function draftActions(fields: DraftFields, choices: Ref<Choices>, context: Draft
   }
 
   function layOn(surface: string): void {
-    const ground = GROUNDS.find(({ id }) => id === surface)
-    if (!ground) return
-    const { friction, permeability, layerThickness, isSuitable } = ground
-    setValues({ friction, permeability, layerThickness })
-    choices.value = { ...choices.value, suitable: isSuitable ? 'yes' : 'no' }
+    const figures = surfaceFigures(surface)
+    if (!figures) return
+    setValues(figures.values)
+    choices.value = { ...choices.value, suitable: figures.suitable }
   }
 
   function takeTube(tube: string): void {

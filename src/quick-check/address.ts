@@ -2,6 +2,7 @@ import type { CaseInput, FieldValues } from './case-input'
 import { CHOICE_IDS, CHOICES, INITIAL_CHOICES, type Choices } from './choices'
 import { isInUse } from './field-faults'
 import { FIELD_IDS, fieldOf, type FieldId } from './fields'
+import { surfaceFigures } from './surface'
 
 /** Version of the address. Its keys and its default case do not change; a new meaning needs a new one. */
 const VERSION = '1'
@@ -43,20 +44,22 @@ const CHOICE_BY_KEY = new Map<string, (typeof CHOICE_IDS)[number]>(
  * The inputs as the query of an address: `v=1`, then plain SI figures under readable keys.
  *
  * The figures on which an answer rests most (water, tube, friction, surface, edge, basis) are always
- * there, so that a link can be read without opening it; the rest only where it differs from the
- * default case of version 1, which never changes. `none` is a field left empty. An entry that the
- * form refuses follows as `typed.<key>`, beside the last value that was accepted.
+ * there, so that a link can be read without opening it; the rest only where it differs from what its
+ * surface brings along, or from the default case of version 1, which never changes. `none` is a field
+ * left empty. An entry that the form refuses follows as `typed.<key>`, beside the last value that was
+ * accepted.
  */
 export function writeAddress({ values, choices, refused }: AddressContent): string {
   const query = new URLSearchParams({ v: VERSION })
+  const usual = caseOn(choices.surface)
   for (const id of CHOICE_IDS) {
-    const { key, initial, ...choice } = CHOICES[id]
-    if ('isAlwaysSent' in choice || choices[id] !== initial) query.set(key, choices[id])
+    const { key, ...choice } = CHOICES[id]
+    if ('isAlwaysSent' in choice || choices[id] !== usual.choices[id]) query.set(key, choices[id])
   }
   for (const id of FIELD_IDS) {
-    const { key, initial } = fieldOf(id)
+    const { key } = fieldOf(id)
     const value = values[id]
-    const isTold = isToldAlways(id, choices) || value !== initial
+    const isTold = isToldAlways(id, choices) || value !== usual.values[id]
     if (isInUse(id, choices) && isTold) query.set(key, value === null ? NONE : String(value))
     const entry = refused[id]
     if (entry !== undefined) query.set(TYPED + key, String(entry))
@@ -76,9 +79,12 @@ export function readAddress(search: string): ReadAddress {
   const query = new URLSearchParams(search)
   const version = query.get('v')
   if (version !== null && version !== VERSION)
-    return { ...start(), problems: [{ reason: 'unknownVersion', key: 'v', value: version }] }
+    return {
+      ...caseOn(CHOICES.surface.initial),
+      problems: [{ reason: 'unknownVersion', key: 'v', value: version }],
+    }
 
-  const content = start()
+  const content = caseOn(query.getAll(CHOICES.surface.key).at(-1) ?? CHOICES.surface.initial)
   const problems: AddressProblem[] = []
   for (const [key, value] of query) {
     const reason = key === 'v' ? null : readEntry(content, key, value)
@@ -95,8 +101,15 @@ interface Draft {
   readonly refused: Partial<Record<FieldId, RefusedEntry>>
 }
 
-function start(): Draft & AddressContent {
-  return { values: { ...INITIAL_VALUES }, choices: { ...INITIAL_CHOICES }, refused: {} }
+/** The default case on a surface: with its friction, permeability and fitness where nothing else is said. */
+function caseOn(surface: string): Draft & AddressContent {
+  const figures = surfaceFigures(surface)
+  const suitable = figures?.suitable ?? INITIAL_CHOICES.suitable
+  return {
+    values: { ...INITIAL_VALUES, ...figures?.values },
+    choices: { ...INITIAL_CHOICES, suitable },
+    refused: {},
+  }
 }
 
 function readEntry(into: Draft, key: string, value: string): AddressProblem['reason'] | null {

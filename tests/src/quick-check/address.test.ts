@@ -97,6 +97,31 @@ describe('the address', () => {
     expect(problems.map(({ reason }) => reason)).toEqual(['noVersion'])
   })
 
+  it.each([
+    ['concrete', 0.4, 1e-7, 'yes'],
+    ['loose-gravel', 0.45, 1e-2, 'no'],
+    ['bare-mud', 0.2, 1e-7, 'no'],
+  ])('takes what %s brings along where nothing else is said', (surface, friction, k, suitable) => {
+    const { values, choices, problems } = readAddress(`v=1&depth=0.3&surface=${surface}`)
+    expect(values).toMatchObject({ friction, permeability: k, layerThickness: 2, depth: 0.3 })
+    expect(choices).toMatchObject({ surface, suitable })
+    expect(problems).toEqual([])
+  })
+
+  it('keeps a friction that is said, whatever stands first', () => {
+    expect(readAddress('v=1&friction=0.33&surface=concrete').values.friction).toBe(0.33)
+    expect(readAddress('v=1&surface=concrete&friction=0.45').values.friction).toBe(0.45)
+  })
+
+  it('gives a surface of the user’s own, or one that it does not know, the default figures', () => {
+    expect(readAddress('v=1&surface=own').values.friction).toBe(0.45)
+    expect(readAddress('v=1&surface=ice')).toMatchObject({
+      values: { friction: 0.45 },
+      choices: { surface: 'turf' },
+      problems: [{ reason: 'notAChoice', key: 'surface', value: 'ice' }],
+    })
+  })
+
   it('takes a bare address as the default case', () => {
     expect(readAddress('')).toEqual({ ...START, problems: [] })
   })
