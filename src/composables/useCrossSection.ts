@@ -1,3 +1,4 @@
+import { storeToRefs } from 'pinia'
 import { computed, type Ref } from 'vue'
 import {
   crossSectionScene,
@@ -10,6 +11,7 @@ import { lastStanding, standingOutline } from '@shared/drawing/standing-outline'
 import { measureWith } from '@shared/drawing/text-width'
 import type { SectionCase } from '@shared/schemas/section-case'
 import { isSameButDepth } from '@/quick-check/same-section'
+import { usePreferences } from '@/stores/preferences'
 import { useSceneText } from './useSceneText'
 
 /** What the drawing of a section shows. */
@@ -26,6 +28,7 @@ export interface DrawnSection {
  */
 export function useCrossSection(drawn: () => DrawnSection) {
   const say = useSceneText()
+  const { units } = storeToRefs(usePreferences())
   const still = computed<SectionCase>((kept) => {
     const { section } = drawn()
     return kept && isSameButDepth(kept, section) ? kept : section
@@ -44,6 +47,7 @@ export function useCrossSection(drawn: () => DrawnSection) {
       marks,
       level,
       view,
+      units: units.value,
       measure: measure.value,
     })
   }

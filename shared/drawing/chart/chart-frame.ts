@@ -1,4 +1,4 @@
-import { niceAbove, niceTicks } from '../nice-ticks'
+import { niceAbove, niceShownTicks, niceTicks } from '../nice-ticks'
 import type { FactorChartInput } from './factor-chart-input'
 
 /** How depths and factors become pixels. */
@@ -45,7 +45,12 @@ export function chartFrame(input: FactorChartInput): ChartFrame {
     font,
     toX: (depth) => left + ((right - left) * depth) / greatestDepth,
     toY: (factor) => bottom - ((bottom - top) * factor) / cap,
-    depthTicks: niceTicks(greatestDepth, Math.max(1, Math.floor((right - left) / DEPTH_STEP))),
+    depthTicks: niceShownTicks(
+      greatestDepth,
+      Math.max(1, Math.floor((right - left) / DEPTH_STEP)),
+      'length',
+      input.units ?? 'metric',
+    ),
     factorTicks: niceTicks(cap, Math.max(1, Math.floor((bottom - top) / FACTOR_STEP))),
   }
 }

@@ -1,6 +1,7 @@
 import type { Message } from '../../texts/format-text'
 import type { View } from '../scene'
 import type { MeasureText } from '../text-width'
+import type { UnitSystem } from '../../units'
 
 /** One point of a curve. */
 export interface FactorPoint {
@@ -31,5 +32,7 @@ export interface FactorChartInput {
   readonly now: number
   /** Depth to which the section holds; null: it holds at none. */
   readonly holdsTo: number | null
+  /** Units in which the ticks are round figures; metric if left out. */
+  readonly units?: UnitSystem | undefined
   readonly measure?: MeasureText | undefined
 }

@@ -1,4 +1,4 @@
-import { niceBelow } from '../nice-ticks'
+import { niceShownBelow } from '../nice-ticks'
 import { areaPath } from '../path-data'
 import type { Point } from '../scene'
 import type { Quantity } from '../../units'
@@ -45,9 +45,10 @@ export function drawLegend(drawing: Composition): void {
 function samples(drawing: Composition): readonly Sample[] {
   const { frame, input } = drawing
   const weight = input.case.water.density * input.case.gravity
-  const pressure = niceBelow((PRESSURE_SAMPLE / frame.headScale) * weight)
-  const force = niceBelow(FORCE_SAMPLE / frame.forceScale)
-  const length = niceBelow(LENGTH_SAMPLE / frame.scale)
+  const { units = 'metric' } = input
+  const pressure = niceShownBelow((PRESSURE_SAMPLE / frame.headScale) * weight, 'pressure', units)
+  const force = niceShownBelow(FORCE_SAMPLE / frame.forceScale, 'forcePerLength', units)
+  const length = niceShownBelow(LENGTH_SAMPLE / frame.scale, 'length', units)
   return [
     {
       id: 'force',

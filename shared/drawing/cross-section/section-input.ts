@@ -3,6 +3,7 @@ import type { SectionCase } from '../../schemas/section-case'
 import type { SectionResult } from '../../schemas/section-result'
 import type { View } from '../scene'
 import type { MeasureText } from '../text-width'
+import type { UnitSystem } from '../../units'
 
 /** Answers of the engine that the drawing shows. */
 export type DrawnEvaluation = Pick<
@@ -46,6 +47,8 @@ export interface CrossSectionInput {
   readonly level?: GroundLevel | null | undefined
   readonly marks?: SectionMarks | undefined
   readonly view: View
+  /** Units in which the scales are round figures; metric if left out. */
+  readonly units?: UnitSystem | undefined
   /** Width of the texts as they will be printed; metric English if left out. */
   readonly measure?: MeasureText | undefined
 }

@@ -3,7 +3,7 @@ import { frictionResistance } from '../../../shared/drawing/cross-section/fricti
 import { upliftShare } from '../../../shared/calc/uplift/uplift-share'
 import { evaluateSection } from '../../../shared/checks/evaluate-section'
 import type { Scene } from '../../../shared/drawing/scene'
-import type { Quantity } from '../../../shared/units'
+import { toDisplay, type Quantity } from '../../../shared/units'
 import {
   allWords,
   draw,
@@ -31,6 +31,15 @@ function statedScale(scene: Scene, id: 'force' | 'pressure'): number {
 const highest = (d: string) => Math.min(...pointsOf(d).map(({ y }) => y))
 
 describe('the drawing is to scale', () => {
+  it.each(['metric', 'us'] as const)('states its scales in round %s figures', (units) => {
+    const scene = draw(tube(), { units })
+    for (const id of ['force', 'pressure', 'length']) {
+      const { value, kind } = item(scene, 'text', `scale-${id}-value`).message.values!
+        .value as Quantity
+      expect(toDisplay(value, kind, units).toExponential(6)).toMatch(/^[125]\.000000e/)
+    }
+  })
+
   it('shows the loaded crest at its height above the ground', () => {
     const section = tube()
     const scene = draw(section)

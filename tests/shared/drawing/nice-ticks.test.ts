@@ -1,6 +1,13 @@
 import fc from 'fast-check'
 import { expect, it } from 'vitest'
-import { niceAbove, niceBelow, niceTicks } from '../../../shared/drawing/nice-ticks'
+import {
+  niceAbove,
+  niceBelow,
+  niceShownBelow,
+  niceShownTicks,
+  niceTicks,
+} from '../../../shared/drawing/nice-ticks'
+import { formatQuantity } from '../../../shared/units'
 
 it.each([
   [0.7, 0.5],
@@ -32,4 +39,19 @@ it('marks an axis evenly from nothing to its end', () => {
   expect(niceTicks(3.75, 4)).toEqual([0, 1, 2, 3])
   expect(niceTicks(1, 10)).toHaveLength(11)
   expect(niceTicks(0, 5)).toEqual([0])
+})
+
+it('is a round figure in the units that are shown', () => {
+  const shown = (value: number, system: 'metric' | 'us') =>
+    formatQuantity({ value: niceShownBelow(value, 'pressure', system), kind: 'pressure' }, system)
+  expect(shown(2345, 'metric')).toBe('2.0\u00a0kPa')
+  expect(shown(2345, 'us')).toBe('20\u00a0psf')
+  expect(niceShownBelow(2345, 'pressure', 'us')).toBeLessThan(2345)
+})
+
+it('marks an axis in feet at whole parts of a foot', () => {
+  // 0.7 m are 2.297 ft; 1 ft is 0.3048 m (exact, NIST SP 811).
+  const ticks = niceShownTicks(0.7, 5, 'length', 'us')
+  expect(ticks).toHaveLength(5)
+  ticks.forEach((tick, index) => expect(tick).toBeCloseTo(index * 0.5 * 0.3048, 12))
 })
