@@ -35,7 +35,18 @@ const noDrizzle = {
 }
 
 export default tseslint.config(
-  { ignores: ['dist/', 'data/', 'coverage/', 'drizzle/', 'test-results/', 'playwright-report/'] },
+  {
+    ignores: [
+      'dist/',
+      'data/',
+      'coverage/',
+      'drizzle/',
+      'test-results/',
+      'playwright-report/',
+      '.stryker-tmp/',
+      'reports/',
+    ],
+  },
   js.configs.recommended,
   ...tseslint.configs.strict,
   ...tseslint.configs.stylistic,

@@ -44,7 +44,11 @@ export default defineConfig({
   define: WITHOUT_I18N_EXTRAS,
   server: { proxy: { '/api': `http://localhost:${process.env.API_PORT ?? 3001}` } },
   // check-bundle reads manifest and modules to learn what the first page loads.
-  build: { manifest: true },
+  build: {
+    manifest: true,
+    // Fonts come as files: the content security policy refuses them inline.
+    assetsInlineLimit: (file) => (/\.(woff2?|ttf)$/.test(file) ? false : undefined),
+  },
   test: {
     include: ['tests/**/*.test.ts'],
     exclude: ['tests/e2e/**'],
