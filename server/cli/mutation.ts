@@ -1,0 +1,38 @@
+import { spawnSync } from 'node:child_process'
+import { existsSync, mkdirSync, readFileSync, writeFileSync } from 'node:fs'
+import { format } from 'prettier'
+import { folderResult, type MutationReport, type MutationResults } from './mutation/folder-result'
+
+const RESULTS = 'docs/mutation.json'
+const CACHE = 'node_modules/.cache/mutation'
+const REPORT = 'reports/mutation/mutation.json'
+
+/** Runs the mutants of one folder below shared/ and keeps the figures; only what changed runs again. */
+async function measure(folder: string): Promise<void> {
+  if (!existsSync(`shared/${folder}`)) throw new Error(`shared/${folder} is not there`)
+  mkdirSync(CACHE, { recursive: true })
+  const kept = `${CACHE}/${folder.replaceAll('/', '-')}.json`
+  const options = [
+    '--mutate',
+    `shared/${folder}/**/*.ts`,
+    '--incremental',
+    '--incrementalFile',
+    kept,
+  ]
+  spawnSync('npx', ['stryker', 'run', ...options], { stdio: 'inherit' })
+  const report = JSON.parse(readFileSync(REPORT, 'utf8')) as MutationReport
+  const results = JSON.parse(readFileSync(RESULTS, 'utf8')) as MutationResults
+  const measured = new Date().toISOString().slice(0, 10)
+  const result = folderResult(report, { folder, measured, before: results.folders[folder] })
+  const folders = Object.entries({ ...results.folders, [folder]: result })
+  const sorted = Object.fromEntries(folders.sort(([a], [b]) => a.localeCompare(b)))
+  const text = JSON.stringify({ ...results, folders: sorted })
+  writeFileSync(RESULTS, await format(text, { parser: 'json', printWidth: 100 }))
+}
+
+const folders = process.argv.slice(2)
+if (folders.length === 0) {
+  process.stderr.write('Name one folder or more below shared/: npm run mutation -- calc/uplift\n')
+  process.exitCode = 2
+}
+for (const folder of folders) await measure(folder)
