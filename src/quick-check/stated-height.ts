@@ -95,15 +95,15 @@ export function statedWords(held: StatedHeight): {
 }
 
 function partsOf({ label, sag, freeboard, allowance, spare, ...why }: StatedHeight): Message[] {
-  const part = (id: string, value: number): Message[] =>
-    value < LEAST ? [] : [{ key: `quickCheck.stated.${id}`, values: { height: mm(value) } }]
+  const part = (key: string, value: number): Message[] =>
+    value < LEAST ? [] : [{ key, values: { height: mm(value) } }]
   return [
-    ...part('labelOver', label),
-    ...part('labelUnder', -label),
-    ...part('sag', sag),
-    ...part('freeboard', freeboard),
-    ...part('moving', allowance),
-    ...part(`spare.${spareKey(why)}`, spare),
+    ...part('quickCheck.stated.labelOver', label),
+    ...part('quickCheck.stated.labelUnder', -label),
+    ...part('quickCheck.stated.sag', sag),
+    ...part('quickCheck.stated.freeboard', freeboard),
+    ...part('quickCheck.stated.moving', allowance),
+    ...part(`quickCheck.stated.spare.${givingWay(why)}`, spare),
   ]
 }
 
@@ -112,7 +112,8 @@ function mm(value: number): Quantity {
 }
 
 /** What gives way; sliding and flotation with water under the skirt are another thing than without. */
-function spareKey({ check, hasUplift }: Pick<StatedHeight, 'check' | 'hasUplift'>): string {
-  const isOnWater = (check === 'sliding' || check === 'flotation') && hasUplift
-  return isOnWater ? `${check}OnWater` : check
+function givingWay({ check, hasUplift }: Pick<StatedHeight, 'check' | 'hasUplift'>): string {
+  if (hasUplift && check === 'sliding') return 'slidingOnWater'
+  if (hasUplift && check === 'flotation') return 'flotationOnWater'
+  return check
 }
