@@ -3,18 +3,18 @@ import { skinDemand, type StabilityPairs } from './global-checks'
 import type { SectionState } from './section-state'
 
 /** Partial factors on permanent and variable actions, and on tan φ. */
-interface Combination {
+export interface Combination {
   readonly permanent: number
   readonly variable: number
   readonly friction: number
 }
 
 /** EN 1997-1:2004, tables A.3 and A.4: sets A1 + M1 and A2 + M2. */
-const COMBINATION_1: Combination = { permanent: 1.35, variable: 1.5, friction: 1 }
-const COMBINATION_2: Combination = { permanent: 1, variable: 1.3, friction: 1.25 }
+export const COMBINATION_1: Combination = { permanent: 1.35, variable: 1.5, friction: 1 }
+export const COMBINATION_2: Combination = { permanent: 1, variable: 1.3, friction: 1.25 }
 
 /** Loss of equilibrium. EN 1997-1:2004, table A.1. */
-const EQU = { permanent: 1.1, variable: 1.5, favourable: 0.9 }
+export const EQU = { permanent: 1.1, variable: 1.5, favourable: 0.9 }
 
 /** Uplift by water pressure. EN 1997-1:2004, table A.15. */
 export const UPL = { unfavourable: 1, favourable: 0.9 }
