@@ -81,7 +81,7 @@ export const LOW_ROAD_SCENARIOS: readonly DemoScenario[] = [
   {
     key: 'open-edge',
     name: 'Open edge, best layout',
-    note: 'Each size where it serves best, all five 1.00 m tubes in use. The slipway at ch 40 decides.',
+    note: 'Each size where it serves best, all five 1.00 m tubes in use. The turn at ch 60 and the slipway decide.',
     content: content(OPEN_LAYOUT, 45),
   },
   {

@@ -22,6 +22,16 @@ export function stabilityPairs(state: SectionState): StabilityPairs {
   return state.basis.format === 'partial' ? partialPairs(state) : globalPairs(state)
 }
 
+/** The pairs with the grip that a missing skirt leaves; what pulls a barrier up is never made less. */
+function withGripShare(pairs: StabilityPairs, share: number): StabilityPairs {
+  if (share === 1) return pairs
+  const less = ({ demand, resistance }: DemandAndResistance): DemandAndResistance => ({
+    demand,
+    resistance: resistance > 0 ? share * resistance : resistance,
+  })
+  return { ...pairs, sliding: less(pairs.sliding), skirt: less(pairs.skirt) }
+}
+
 type Checked = Pick<SectionResult, CheckId>
 
 const FABRIC_NOT_CHECKED: CheckResult = {
@@ -153,11 +163,18 @@ function resultantOf({ vertical, horizontal, geometry }: SectionState): Resultan
  * All checks of one section at its own depth. Cheap: it is called for every frame while the water is
  * dragged, and 200 times for a holds-to level.
  *
+ * @param gripShare Share of friction resistance and skirt grip that is there, 0 to 1: less than 1 where
+ * skirt is missing at a bend.
  * @remarks Expects a case inside `SECTION_RANGES`.
  */
-export function evaluateSection(section: SectionCase): SectionEvaluation {
-  const state = sectionState(section)
-  const pairs = stabilityPairs(state)
+export function evaluateSection(section: SectionCase, gripShare = 1): SectionEvaluation {
+  return evaluateState(sectionState(section), gripShare)
+}
+
+/** The same from a state that was found in another way, such as with uplift that grew for hours. */
+export function evaluateState(state: SectionState, gripShare = 1): SectionEvaluation {
+  const { section } = state
+  const pairs = withGripShare(stabilityPairs(state), gripShare)
   const checks = checkResults(state, pairs)
   const seepage = seepageResult(state)
   // Written out field by field: spreading would cost more than the engineering.

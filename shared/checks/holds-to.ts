@@ -32,8 +32,11 @@ export interface HoldingProfile {
  * Depths at which all checks hold, scanned at 0.005 D up to D and refined at each edge.
  *
  * It does not depend on the depth of the case: keep it while only the water moves.
+ *
+ * @param gripShare See `evaluateSection`.
  */
-export function holdingProfile(section: SectionCase): HoldingProfile {
+export function holdingProfile(section: SectionCase, gripShare = 1): HoldingProfile {
+  const scanned = { section, gripShare }
   const { diameter } = section.barrier
   const intervals: HoldingInterval[] = []
   const firstStep = STEP * diameter
@@ -41,19 +44,19 @@ export function holdingProfile(section: SectionCase): HoldingProfile {
   let below = 0
   for (let step = 1; step <= STEPS; step += 1) {
     const depth = step * STEP * diameter
-    const holds = holdsAt(section, depth)
+    const holds = holdsAt(scanned, depth)
     if (holds && from === null) {
-      from = step === 1 ? 0 : edge(section, depth, below).holding
+      from = step === 1 ? 0 : edge(scanned, depth, below).holding
     }
     if (!holds && from !== null) {
-      const { holding, failing } = edge(section, below, depth)
-      intervals.push({ from, to: holding, check: governsAt(section, failing) })
+      const { holding, failing } = edge(scanned, below, depth)
+      intervals.push({ from, to: holding, check: governsAt(scanned, failing) })
       from = null
     }
     below = depth
   }
-  if (from !== null) intervals.push({ from, to: below, check: governsAt(section, below) })
-  return { intervals, firstStep, checkAtFirstStep: governsAt(section, firstStep) }
+  if (from !== null) intervals.push({ from, to: below, check: governsAt(scanned, below) })
+  return { intervals, firstStep, checkAtFirstStep: governsAt(scanned, firstStep) }
 }
 
 /** The holding interval that contains the depth, else the lowest one. */
@@ -65,28 +68,33 @@ export function holdsToAt(profile: HoldingProfile, depth: number): HoldsTo {
   return { from: interval.from, depth: interval.to, check: interval.check }
 }
 
-function at(section: SectionCase, depth: number): SectionCase {
-  return { ...section, water: { ...section.water, depth } }
+interface Scanned {
+  readonly section: SectionCase
+  readonly gripShare: number
 }
 
-function holdsAt(section: SectionCase, depth: number): boolean {
-  return evaluateSection(at(section, depth)).verdict !== 'fails'
+function at({ section, gripShare }: Scanned, depth: number) {
+  return evaluateSection({ ...section, water: { ...section.water, depth } }, gripShare)
 }
 
-function governsAt(section: SectionCase, depth: number): CheckId {
-  return evaluateSection(at(section, depth)).governs
+function holdsAt(scanned: Scanned, depth: number): boolean {
+  return at(scanned, depth).verdict !== 'fails'
+}
+
+function governsAt(scanned: Scanned, depth: number): CheckId {
+  return at(scanned, depth).governs
 }
 
 /** Halves the way between a holding and a failing depth. */
 function edge(
-  section: SectionCase,
+  scanned: Scanned,
   holding: number,
   failing: number,
 ): { holding: number; failing: number } {
   let [good, bad] = [holding, failing]
   while (Math.abs(bad - good) > EDGE_WIDTH) {
     const middle = (good + bad) / 2
-    if (holdsAt(section, middle)) good = middle
+    if (holdsAt(scanned, middle)) good = middle
     else bad = middle
   }
   return { holding: good, failing: bad }

@@ -4,6 +4,7 @@ import type { SectionCase } from '../schemas/section-case'
 import type { SectionResult } from '../schemas/section-result'
 import { globalPairs } from './global-checks'
 import { partialSliding } from './partial-checks'
+import type { GripShareFor } from './bend-loss'
 import { sectionState } from './section-state'
 
 export type JustEnough = SectionResult['justEnough']
@@ -16,30 +17,34 @@ const NONE: JustEnough = { skirtLength: null, friction: null, edgeFactor: null }
  *
  * An edge factor of 1 or more means that any edge will do. Demand and resistance are linear in the
  * edge factor and the friction, so two evaluations give these exactly; the skirt length is a root.
+ *
+ * @param gripShareFor Share of the resistance that bends leave, by skirt length.
  */
-export function justEnough(section: SectionCase): JustEnough {
+export function justEnough(section: SectionCase, gripShareFor?: GripShareFor): JustEnough {
   if (section.water.dryDepth > section.water.depth) return NONE
+  const share = gripShareFor ?? (() => 1)
   return {
-    skirtLength: enoughSkirt(section),
-    friction: enoughFriction(section),
-    edgeFactor: enoughEdge(section),
+    skirtLength: enoughSkirt(section, share),
+    friction: enoughFriction(section, share),
+    edgeFactor: enoughEdge(section, share),
   }
 }
 
 /** Resistance less required demand of sliding [N/m], one figure per combination of the basis. */
-function slidingSpare(section: SectionCase): readonly number[] {
+function slidingSpare(section: SectionCase, shareFor: GripShareFor): readonly number[] {
   const state = sectionState(section)
   const { format, sliding: required } = state.basis
   const pairs =
     format === 'partial'
       ? [partialSliding(state, 1), partialSliding(state, 2)]
       : [globalPairs(state).sliding]
-  return pairs.map(({ demand, resistance }) => resistance - required * demand)
+  const share = shareFor(section.barrier.skirtLength)
+  return pairs.map(({ demand, resistance }) => share * resistance - required * demand)
 }
 
-function enoughSkirt(section: SectionCase): number | null {
+function enoughSkirt(section: SectionCase, share: GripShareFor): number | null {
   const spare = (skirtLength: number): number =>
-    Math.min(...slidingSpare({ ...section, barrier: { ...section.barrier, skirtLength } }))
+    Math.min(...slidingSpare({ ...section, barrier: { ...section.barrier, skirtLength } }, share))
   const low = 0
   const high = fieldRange('barrier.skirtLength').max as number
   const atLow = spare(low)
@@ -49,9 +54,9 @@ function enoughSkirt(section: SectionCase): number | null {
   return findRoot(spare, { low, high, atLow, atHigh })
 }
 
-function enoughFriction(section: SectionCase): number | null {
+function enoughFriction(section: SectionCase, share: GripShareFor): number | null {
   const spare = (friction: number): readonly number[] =>
-    slidingSpare({ ...section, ground: { ...section.ground, friction } })
+    slidingSpare({ ...section, ground: { ...section.ground, friction } }, share)
   const without = spare(0)
   const perUnit = spare(1).map((value, i) => value - without[i]!)
   const needed = without.map((value, i) => needAlong(value, perUnit[i]!))
@@ -65,9 +70,9 @@ function needAlong(value: number, slope: number): number {
   return slope > 0 ? -value / slope : Infinity
 }
 
-function enoughEdge(section: SectionCase): number | null {
+function enoughEdge(section: SectionCase, share: GripShareFor): number | null {
   const spare = (edgeFactor: number): readonly number[] =>
-    slidingSpare({ ...section, uplift: { ...section.uplift, edgeFactor } })
+    slidingSpare({ ...section, uplift: { ...section.uplift, edgeFactor } }, share)
   const sealed = spare(0)
   const open = spare(1)
   if (sealed.some((value) => value < 0)) return null

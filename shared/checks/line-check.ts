@@ -1,11 +1,13 @@
 import { lineSections, type LineSection, type SectionPiece } from '../calc/line/line-sections'
-import type { Station } from '../schemas/line'
+import { isTurnTooSharp } from '../catalogue/joints'
+import type { Survey } from '../schemas/line-faults'
 import type { ScenarioContent } from '../schemas/scenario'
 import type { SectionCase } from '../schemas/section-case'
 import type { CheckId, Verdict } from '../schemas/section-result'
 import { isWorse } from './compare'
 import { evaluateSection } from './evaluate-section'
 import { holdingProfile, holdsToAt, type HoldingProfile } from './holds-to'
+import { gripShareOf } from './bend-loss'
 import { assumptionOf, caseAt, sizeAt } from './place-case'
 
 /** Answer for one section of a line: its worst piece. */
@@ -26,8 +28,14 @@ export interface SectionAnswer {
   readonly holdsToLevel: number | null
   /** What fails beyond that level. */
   readonly limitedBy: CheckId | null
+  /** Loaded crest in the datum of the line [m]; null where no shape stands, or nothing is laid. */
+  readonly crestLevel: number | null
+  /** Freeboard that is there [m]; null where no shape stands. */
+  readonly freeboard: number | null
+  /** Share of friction resistance and skirt grip that missing skirt at bends leaves, 0 to 1. */
+  readonly gripShare: number
   /** Why the section could not be checked. */
-  readonly gap: 'no-size' | 'no-ground' | 'too-deep' | null
+  readonly gap: 'no-size' | 'no-ground' | 'too-deep' | 'sharp-turn' | null
 }
 
 /** Answer for a whole line. */
@@ -47,18 +55,18 @@ export type HoldingProfiles = Map<string, HoldingProfile>
 
 /**
  * Checks every section of a line in one scenario. A section is its worst piece; the line is its
- * worst section. Profiles of equal sections are computed once.
+ * worst section. Profiles of equal sections are computed once. Skirt that is missing at a bend takes its
+ * share of friction resistance and skirt grip from both sections beside it.
  *
  * @param profiles Kept by whoever checks many scenarios: most of them share sizes and grounds.
  */
 export function checkLine(
-  stations: readonly Station[],
-  sectionLength: number,
+  { stations, sectionLength, marks }: Survey,
   content: ScenarioContent,
   profiles: HoldingProfiles = new Map(),
 ): LineAnswer {
-  const sections = lineSections(stations, sectionLength).map((section) =>
-    answerSection(section, content, profiles),
+  const sections = lineSections(stations, sectionLength, marks).map((section) =>
+    answerSection(section, content, { sectionLength, profiles }),
   )
   const weakest = sections.reduce((a, b) => (isWeaker(b, a) ? b : a))
   return { sections, verdict: worstVerdict(sections), weakest }
@@ -75,12 +83,19 @@ function isWeaker(a: SectionAnswer, b: SectionAnswer): boolean {
   return a.holdsToLevel === null || a.holdsToLevel < b.holdsToLevel
 }
 
-function answerSection(
+/** What all sections of one answer share. */
+export interface LineWork {
+  readonly sectionLength: number
+  readonly profiles: HoldingProfiles
+}
+
+/** The answer for one section in a scenario: its worst piece, and the lowest level of all pieces. */
+export function answerSection(
   section: LineSection,
   content: ScenarioContent,
-  profiles: HoldingProfiles,
+  work: LineWork,
 ): SectionAnswer {
-  const pieces = section.pieces.map((piece) => answerPiece(section, piece, content, profiles))
+  const pieces = section.pieces.map((piece) => answerPiece(section, piece, content, work))
   const worst = pieces.reduce((a, b) => (isWorsePiece(b, a) ? b : a))
   const lowest = pieces.reduce((a, b) => (isWeaker(b, a) ? b : a))
   return { ...worst, holdsToLevel: lowest.holdsToLevel, limitedBy: lowest.limitedBy }
@@ -95,7 +110,7 @@ function answerPiece(
   section: LineSection,
   piece: SectionPiece,
   content: ScenarioContent,
-  profiles: HoldingProfiles,
+  { sectionLength, profiles }: LineWork,
 ): SectionAnswer {
   const { lowestGround, lowestAt, surface } = piece
   const place = { chainage: lowestAt, groundLevel: lowestGround, surface }
@@ -111,9 +126,13 @@ function answerPiece(
     depth: Math.max(0, content.waterLevel - lowestGround),
   }
   if (!run) return { ...blank, ...uncheckedFor('no-size') }
+  if (isTurnTooSharp(section.turnAtStart) || isTurnTooSharp(section.turnAtEnd)) {
+    return { ...blank, ...uncheckedFor('sharp-turn') }
+  }
   if (!ground) return { ...blank, ...uncheckedFor('no-ground') }
   const sectionCase = caseAt(content, place, run, ground)
-  const profile = keptProfile(sectionCase, profiles)
+  const gripShare = gripShareOf(section, run.barrier.skirtLength, sectionLength)
+  const profile = keptProfile(sectionCase, gripShare, profiles)
   const holdsTo = holdsToAt(profile, blank.depth)
   const limits = {
     holdsToLevel: holdsTo.from === null ? null : lowestGround + holdsTo.depth,
@@ -122,30 +141,48 @@ function answerPiece(
   if (blank.depth > DEEPEST * run.barrier.diameter) {
     return { ...blank, ...uncheckedFor('too-deep'), ...limits }
   }
-  const { verdict, governs, ...checks } = evaluateSection(sectionCase)
-  const utilisation = checks[governs]?.utilisation ?? null
-  return { ...blank, verdict, governs, utilisation, gap: null, ...limits }
+  const { verdict, governs, ...checks } = evaluateSection(sectionCase, gripShare)
+  const { loadedShape: shape, freeboard } = checks
+  return {
+    ...blank,
+    verdict,
+    governs,
+    utilisation: checks[governs]?.utilisation ?? null,
+    crestLevel: shape.solved ? lowestGround + shape.crest : null,
+    freeboard: freeboard.available ?? null,
+    gripShare,
+    gap: null,
+    ...limits,
+  }
 }
 
 /** A section without size or ground cannot be relied on; nor can one under 1.5 diameters of water. */
 function uncheckedFor(gap: NonNullable<SectionAnswer['gap']>) {
-  const verdict: Verdict = gap === 'too-deep' ? 'fails' : 'notChecked'
+  const isFailing = gap === 'too-deep' || gap === 'sharp-turn'
+  const verdict: Verdict = isFailing ? 'fails' : 'notChecked'
   return {
     verdict,
     governs: null,
     utilisation: null,
     holdsToLevel: null,
     limitedBy: null,
+    crestLevel: null,
+    freeboard: null,
+    gripShare: 1,
     gap,
   }
 }
 
 /** The profile does not depend on the depth: sections that differ only in it share one. */
-function keptProfile(section: SectionCase, profiles: HoldingProfiles): HoldingProfile {
-  const key = JSON.stringify({ ...section, water: { ...section.water, depth: 0 } })
+export function keptProfile(
+  section: SectionCase,
+  gripShare: number,
+  profiles: HoldingProfiles,
+): HoldingProfile {
+  const key = JSON.stringify([gripShare, { ...section, water: { ...section.water, depth: 0 } }])
   const kept = profiles.get(key)
   if (kept) return kept
-  const profile = holdingProfile(section)
+  const profile = holdingProfile(section, gripShare)
   profiles.set(key, profile)
   return profile
 }

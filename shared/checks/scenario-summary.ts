@@ -1,4 +1,4 @@
-import type { Station } from '../schemas/line'
+import type { Survey } from '../schemas/line-faults'
 import type { ScenarioContent, ScenarioSummary } from '../schemas/scenario'
 import { checkLine, type HoldingProfiles, type LineAnswer } from './line-check'
 
@@ -30,10 +30,10 @@ export function summaryOf(answer: LineAnswer, waterLevel: number): ScenarioSumma
  * @param profiles See `checkLine`.
  */
 export function scenarioSummary(
-  survey: { readonly stations: readonly Station[]; readonly sectionLength: number },
+  survey: Survey,
   content: ScenarioContent,
   profiles?: HoldingProfiles,
 ): ScenarioSummary {
-  const answer = checkLine(survey.stations, survey.sectionLength, content, profiles)
+  const answer = checkLine(survey, content, profiles)
   return summaryOf(answer, content.waterLevel)
 }

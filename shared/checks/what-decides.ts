@@ -2,6 +2,7 @@ import type { CatalogueBarrier } from '../catalogue/barriers'
 import { BASIS_IDS, type BasisId } from '../catalogue/check-bases'
 import type { SectionCase } from '../schemas/section-case'
 import type { HoldsTo } from '../schemas/section-result'
+import type { GripShareFor } from './bend-loss'
 import { holdingProfile, holdsToAt } from './holds-to'
 
 /** Edge factors that the product offers by name. Judgement, unverified. */
@@ -29,10 +30,13 @@ export interface Alternative {
  * What decides the answer: skirt edge, friction, basis and size, each with the depth to which the
  * section would hold. Leaves out what is already chosen. Each costs one holding profile, so keep the
  * list while only the water moves.
+ *
+ * @param gripShareFor Share of the resistance that bends leave, by skirt length.
  */
 export function whatDecides(
   section: SectionCase,
   nextTube: CatalogueBarrier | null,
+  gripShareFor: GripShareFor = () => 1,
 ): readonly Alternative[] {
   const draft = [
     ...edgeAlternatives(section),
@@ -42,7 +46,10 @@ export function whatDecides(
   ]
   return draft.map((alternative) => ({
     ...alternative,
-    holdsTo: holdsToAt(holdingProfile(alternative.section), section.water.depth),
+    holdsTo: holdsToAt(
+      holdingProfile(alternative.section, gripShareFor(alternative.section.barrier.skirtLength)),
+      section.water.depth,
+    ),
   }))
 }
 

@@ -1,12 +1,15 @@
 import { isInRange, rangeFault, showValue, type AllowedRange, type Fault } from '../errors'
 import { lineSections } from '../calc/line/line-sections'
 import type { Station } from './line'
+import type { LineMark } from './mark'
 import { STATION_RANGES } from './station-ranges'
 
 /** A survey as it is sent: stations, and the section length that is laid on them. */
 export interface Survey {
   readonly stations: readonly Station[]
   readonly sectionLength: number
+  /** Marks on the line; its turns count where x and y are not known. */
+  readonly marks?: readonly LineMark[]
 }
 
 /** Something that may be right, but looks like a slip. */
@@ -65,11 +68,11 @@ function notRising(stations: readonly Station[], index: number): Fault[] {
   return [{ path, value: chainage, allowed, unit: 'm', message }]
 }
 
-function tooManySections({ stations, sectionLength }: Survey): Fault[] {
+function tooManySections({ stations, sectionLength, marks }: Survey): Fault[] {
   const length = stations[stations.length - 1]!.chainage - stations[0]!.chainage
   const isTooMany =
     length / sectionLength > MOST_SECTIONS ||
-    lineSections(stations, sectionLength).length > MOST_SECTIONS
+    lineSections(stations, sectionLength, marks).length > MOST_SECTIONS
   if (!isTooMany) return []
   const path = 'sectionLength'
   const allowed = `long enough for ${MOST_SECTIONS} sections or fewer on ${length} m`

@@ -130,14 +130,16 @@ function renamed(fault: Fault, path: string): Fault {
 function dryLevelFaults(content: ScenarioContent, survey: Survey): Fault[] {
   const { dryLevel } = content
   if (dryLevel === null) return []
-  const tops = lineSections(survey.stations, survey.sectionLength).flatMap((section) => {
-    const run = sizeAt(content, (section.from + section.to) / 2)
-    if (!run) return []
-    const read = (path: NumericPath) =>
-      path === 'barrier.diameter' ? run.barrier.diameter : undefined
-    const { max } = resolveRange('water.dryDepth', read)
-    return section.pieces.map(({ lowestGround }) => lowestGround + max)
-  })
+  const tops = lineSections(survey.stations, survey.sectionLength, survey.marks).flatMap(
+    (section) => {
+      const run = sizeAt(content, (section.from + section.to) / 2)
+      if (!run) return []
+      const read = (path: NumericPath) =>
+        path === 'barrier.diameter' ? run.barrier.diameter : undefined
+      const { max } = resolveRange('water.dryDepth', read)
+      return section.pieces.map(({ lowestGround }) => lowestGround + max)
+    },
+  )
   const top = tops.length > 0 ? Math.min(...tops) : LEVEL.max
   return faultOutside('dryLevel', dryLevel, { min: LEVEL.min, max: top, unit: 'm' })
 }

@@ -31,7 +31,7 @@ export function useLineCheck(
   const answer = computed<LineAnswer>(() => {
     const { line: surveyed, content: kept, profiles } = settled.result.value
     const { waterLevel } = content.value
-    return checkLine(surveyed.stations, surveyed.sectionLength, { ...kept, waterLevel }, profiles)
+    return checkLine(surveyed, { ...kept, waterLevel }, profiles)
   })
   return { answer, isUpdating: settled.isPending }
 }
@@ -43,6 +43,6 @@ function withoutWater(content: ScenarioContent): ScenarioContent {
 
 function prepare({ line, content }: { line: SurveyedLine; content: ScenarioContent }): Kept {
   const profiles: HoldingProfiles = new Map()
-  checkLine(line.stations, line.sectionLength, content, profiles)
+  checkLine(line, content, profiles)
   return { line, content, profiles }
 }

@@ -1,6 +1,7 @@
 import { computed, type Ref } from 'vue'
+import { gripShareBeside, type Bends, type GripShareFor } from '@shared/checks/bend-loss'
 import type { SectionEvaluation } from '@shared/checks/evaluate-section'
-import { holdingProfile, holdsToAt } from '@shared/checks/holds-to'
+import { holdingProfile, holdsToAt, type HoldingProfile } from '@shared/checks/holds-to'
 import { justEnough } from '@shared/checks/just-enough'
 import { leaveLevel, type LeaveLevel } from '@shared/checks/leave-level'
 import { whatDecides } from '@shared/checks/what-decides'
@@ -12,6 +13,7 @@ import { isSameButDepth } from '@/quick-check/same-section'
 import { statedHeight } from '@/quick-check/stated-height'
 import { nextTube } from '@/quick-check/tube'
 import { waterMarks } from '@/quick-check/water-marks'
+import { isSameValue } from '@/scenario/same-value'
 import { useDeferred } from './useDeferred'
 
 /**
@@ -20,18 +22,34 @@ import { useDeferred } from './useDeferred'
  */
 export function useSectionCheck(input: Readonly<Ref<CheckedCase>>) {
   const section = computed(() => input.value.section)
-  const evaluation = computed<SectionEvaluation>(() => pageEvaluation(section.value))
+  const bends = computed<Bends | null>((last) => {
+    const next = input.value.bends ?? null
+    return last && next && isSameValue(last, next) ? last : next
+  })
+  const shareFor = computed<GripShareFor>(() => gripShareBeside(bends.value))
+  const gripShare = computed(() => shareFor.value(section.value.barrier.skirtLength))
+  const evaluation = computed<SectionEvaluation>(() =>
+    pageEvaluation(section.value, gripShare.value),
+  )
   const still = computed<SectionCase>((last) =>
     last && isSameButDepth(last, section.value) ? last : section.value,
   )
 
-  const profile = useDeferred(() => still.value, holdingProfile, holdingProfile(still.value))
+  const asked = computed<Asked>((last) => {
+    const isSame = last?.of === still.value && last.shareFor === shareFor.value
+    return isSame ? last : { of: still.value, shareFor: shareFor.value }
+  })
+  const profile = useDeferred(() => asked.value, profileOf, profileOf(asked.value))
   const decides = useDeferred(
-    () => still.value,
-    (of) => whatDecides(of, nextTube(of.barrier.diameter)),
+    () => asked.value,
+    ({ of, shareFor: share }) => whatDecides(of, nextTube(of.barrier.diameter), share),
     null,
   )
-  const enough = useDeferred(() => section.value, justEnough, null)
+  const enough = useDeferred(
+    () => ({ of: section.value, shareFor: shareFor.value }),
+    ({ of, shareFor: share }) => justEnough(of, share),
+    null,
+  )
 
   const holdsTo = computed<HoldsTo>((last) => {
     const next = holdsToAt(profile.result.value, section.value.water.depth)
@@ -58,6 +76,15 @@ export function useSectionCheck(input: Readonly<Ref<CheckedCase>>) {
     enough: enough.result,
     isSkirtless: computed(() => section.value.barrier.skirtLength === 0),
   }
+}
+
+interface Asked {
+  readonly of: SectionCase
+  readonly shareFor: GripShareFor
+}
+
+function profileOf({ of, shareFor }: Asked): HoldingProfile {
+  return holdingProfile(of, shareFor(of.barrier.skirtLength))
 }
 
 function leaveOf(checked: CheckedCase, holdsTo: HoldsTo): LeaveLevel {

@@ -1,3 +1,4 @@
+import type { Bends } from '@shared/checks/bend-loss'
 import type { SectionCase } from '@shared/schemas/section-case'
 import { depthNow, groundLevel, sectionCase, waterLevel, type CaseInput } from './case-input'
 import type { WaterPlace } from './verdict-words'
@@ -16,6 +17,8 @@ export interface CheckedCase {
   readonly statedHeight: number | null
   /** How far the water may be off, either way [m]. */
   readonly uncertainty: number
+  /** Bends of the line beside the section, which take their share of its resistance. */
+  readonly bends?: Bends | null
 }
 
 /** What the Quick check asks. */

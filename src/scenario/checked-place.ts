@@ -27,5 +27,6 @@ export function checkedPlace(content: ScenarioContent, place: PlaceOnLine): Chec
     timeToClear: content.timeToClear,
     statedHeight: run.barrier.statedHeight,
     uncertainty: 0,
+    bends: place.bends,
   }
 }

@@ -1,4 +1,10 @@
-import { groundLevelAt, lineSections, surfaceAt } from '@shared/calc/line/line-sections'
+import {
+  groundLevelAt,
+  lineSections,
+  surfaceAt,
+  type LineSection,
+} from '@shared/calc/line/line-sections'
+import type { Bends } from '@shared/checks/bend-loss'
 import { assumptionOf, sizeAt, type Place } from '@shared/checks/place-case'
 import type { Survey } from '@shared/schemas/line-faults'
 import type { GroundAssumption, ScenarioContent, SizeRun } from '@shared/schemas/scenario'
@@ -15,6 +21,8 @@ export interface PlaceOnLine extends Place {
   readonly runIndex: number
   /** What the scenario assumes of its surface; null where it assumes nothing. */
   readonly assumption: GroundAssumption | null
+  /** Bends at the ends of its section; null where the line goes straight on. */
+  readonly bends: Bends | null
 }
 
 /** Chainages closer than this are one place [m]. */
@@ -37,7 +45,8 @@ export function placeOnLine(
   chainage: number,
   towards?: { readonly from: number; readonly to: number },
 ): PlaceOnLine {
-  const section = sectionAt(line, chainage, towards)
+  const laid = sectionAt(line, chainage, towards)
+  const section = { from: laid.from, to: laid.to }
   const middle = (section.from + section.to) / 2
   const run = sizeAt(content, middle)
   const isEnd = chainage > section.to - SAME_PLACE && line.stations.length > 1
@@ -51,19 +60,24 @@ export function placeOnLine(
     run,
     runIndex: run ? content.sizes.lastIndexOf(run) : -1,
     assumption: assumptionOf(content, surface),
+    bends: bendsOf(laid, line.sectionLength),
   }
 }
 
 function sectionAt(
-  { stations, sectionLength }: SurveyedLine,
+  { stations, sectionLength, marks }: SurveyedLine,
   chainage: number,
   towards?: { readonly from: number; readonly to: number },
-): { from: number; to: number } {
-  const sections = lineSections(stations, sectionLength)
+): LineSection {
+  const sections = lineSections(stations, sectionLength, marks)
   const touching = sections.filter(
     ({ from, to }) => from <= chainage + SAME_PLACE && chainage <= to + SAME_PLACE,
   )
   const wanted = towards && touching.find(({ from }) => Math.abs(from - towards.from) < SAME_PLACE)
-  const { from, to } = wanted ?? touching.at(-1) ?? sections[0]!
-  return { from, to }
+  return wanted ?? touching.at(-1) ?? sections[0]!
+}
+
+function bendsOf({ turnAtStart, turnAtEnd }: LineSection, sectionLength: number): Bends | null {
+  if (turnAtStart === 0 && turnAtEnd === 0) return null
+  return { turnAtStart, turnAtEnd, sectionLength }
 }

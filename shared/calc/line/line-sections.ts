@@ -1,4 +1,5 @@
 import type { Station } from '../../schemas/line'
+import type { LineMark } from '../../schemas/mark'
 import { lineTurns } from './line-turns'
 
 /** A part of a section with one surface, and its lowest ground. */
@@ -18,6 +19,9 @@ export interface LineSection {
   readonly pieces: readonly SectionPiece[]
   /** Least clear width on the wet side in the section [m]; null where it is not known. */
   readonly clearWidth: number | null
+  /** Turns at its ends, positive to the left, away from the water [rad]; 0: straight on. */
+  readonly turnAtStart: number
+  readonly turnAtEnd: number
 }
 
 /** Chainages closer than this are one place [m]. */
@@ -28,25 +32,34 @@ const SAME_PLACE = 1e-6
  * lower chainage in ⌈run / section length⌉ sections. A line with one station is one section.
  *
  * @param stations In order of chainage, one or more.
+ * @param marks Marks of the line; its turns count where x and y are not known.
  */
 export function lineSections(
   stations: readonly Station[],
   sectionLength: number,
+  marks: readonly LineMark[] = [],
 ): readonly LineSection[] {
   const first = stations[0]!
   const last = stations[stations.length - 1]!
   if (stations.length === 1) return [singleSection(first, sectionLength)]
   const bounds = [
-    first.chainage,
-    ...lineTurns(stations).map(({ chainage }) => chainage),
-    last.chainage,
+    { chainage: first.chainage, angle: 0 },
+    ...lineTurns(stations, marks),
+    { chainage: last.chainage, angle: 0 },
   ]
+  const finder = spanFinder(stations)
   return bounds.slice(1).flatMap((end, i) => {
     const start = bounds[i]!
-    const count = Math.max(1, Math.ceil((end - start) / sectionLength - SAME_PLACE))
+    const run = end.chainage - start.chainage
+    const count = Math.max(1, Math.ceil(run / sectionLength - SAME_PLACE))
     return Array.from({ length: count }, (_, n) => {
-      const from = start + n * sectionLength
-      return sectionBetween(stations, from, Math.min(end, from + sectionLength))
+      const from = start.chainage + n * sectionLength
+      const to = Math.min(end.chainage, from + sectionLength)
+      return {
+        ...sectionBetween(finder, from, to),
+        turnAtStart: n === 0 ? start.angle : 0,
+        turnAtEnd: n === count - 1 ? end.angle : 0,
+      }
     })
   })
 }
@@ -62,16 +75,29 @@ function singleSection(station: Station, sectionLength: number): LineSection {
     lowestGround: groundLevel,
     lowestAt: chainage,
   }
-  return { from: chainage, to, pieces: [piece], clearWidth }
+  return { from: chainage, to, pieces: [piece], clearWidth, turnAtStart: 0, turnAtEnd: 0 }
 }
 
-function sectionBetween(stations: readonly Station[], from: number, to: number): LineSection {
-  const spans = stations.slice(0, -1).flatMap((station, i) => {
-    const next = stations[i + 1]!
-    const start = Math.max(from, station.chainage)
-    const end = Math.min(to, next.chainage)
-    return end - start > SAME_PLACE ? [{ station, next, start, end }] : []
-  })
+type FindSpans = (from: number, to: number) => readonly Span[]
+
+/** Finds spans between stations; sections come in order, so the search goes on where it was. */
+function spanFinder(stations: readonly Station[]): FindSpans {
+  let first = 0
+  return (from, to) => {
+    while (first < stations.length - 2 && stations[first + 1]!.chainage <= from) first += 1
+    const spans: Span[] = []
+    for (let i = first; i < stations.length - 1 && stations[i]!.chainage < to; i += 1) {
+      const [station, next] = [stations[i]!, stations[i + 1]!]
+      const start = Math.max(from, station.chainage)
+      const end = Math.min(to, next.chainage)
+      if (end - start > SAME_PLACE) spans.push({ station, next, start, end })
+    }
+    return spans
+  }
+}
+
+function sectionBetween(find: FindSpans, from: number, to: number) {
+  const spans = find(from, to)
   const widths = spans.flatMap(({ station }) => station.clearWidth ?? [])
   return {
     from,

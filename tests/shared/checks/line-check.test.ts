@@ -6,6 +6,7 @@ import { BARRIERS } from '../../../shared/catalogue/barriers'
 import { GROUNDS } from '../../../shared/catalogue/grounds'
 import { checkLine } from '../../../shared/checks/line-check'
 import type { Station } from '../../../shared/schemas/line'
+import { lineMarkSchema } from '../../../shared/schemas/mark'
 import {
   scenarioContentSchema,
   type ScenarioContent,
@@ -40,7 +41,21 @@ const SWUNG: readonly Station[] = LOW_ROAD_STATIONS.map((station) =>
     : station,
 )
 
+const survey = (stations: readonly Station[]) => ({ stations, sectionLength: 10 })
+const turnAt = (chainage: number) =>
+  lineTurns(SWUNG).find((turn) => turn.chainage === chainage)!.angle
+
 describe('sections of a line', () => {
+  it('turn at marks where x and y are not known', () => {
+    const straight = LOW_ROAD_STATIONS.map((station) => ({ ...station, x: null, y: null }))
+    const turn = lineMarkSchema.parse({ kind: 'turn', chainage: 63, angle: 1 })
+    expect(lineTurns(straight, [turn])).toEqual([{ chainage: 63, angle: 1 }])
+    expect(lineTurns(LOW_ROAD_STATIONS, [turn])).toHaveLength(4)
+    const sections = lineSections(straight, 10, [turn])
+    expect(sections.filter(({ turnAtEnd }) => turnAtEnd === 1)).toMatchObject([{ to: 63 }])
+    expect(sections.filter(({ turnAtStart }) => turnAtStart === 1)).toMatchObject([{ from: 63 }])
+  })
+
   it('are bounded by turns of 5° and more and laid from the lower chainage', () => {
     const turns = lineTurns(LOW_ROAD_STATIONS)
     expect(turns.map(({ chainage }) => chainage)).toEqual([40, 60, 120, 150])
@@ -75,6 +90,8 @@ describe('sections of a line', () => {
         from: 0,
         to: 10,
         clearWidth: 5,
+        turnAtStart: 0,
+        turnAtEnd: 0,
         pieces: [{ from: 0, to: 10, surface: 'turf', lowestGround: 2.87, lowestAt: 0 }],
       },
     ])
@@ -90,7 +107,9 @@ describe('sections of a line', () => {
 })
 
 describe('check of a line', () => {
-  const answer = checkLine(SWUNG, 10, CONTENT)
+  // Without x and y no turn is known; its sections are the same, because each run is a multiple of 10 m.
+  const straight = SWUNG.map((station) => ({ ...station, x: null, y: null }))
+  const answer = checkLine(survey(straight), CONTENT)
   const at = (chainage: number) => answer.sections.find(({ from }) => from === chainage)!
   const used = (chainage: number): number => Math.round(100 * at(chainage).utilisation!)
 
@@ -117,25 +136,51 @@ describe('check of a line', () => {
     expect(at(150).verdict).toBe('holds')
   })
 
+  // Figures of the same independent program, with skirt missing at bends.
+  it('loses grip beside a turn away from the water', () => {
+    const bent = checkLine(survey(SWUNG), CONTENT)
+    const used = (from: number) =>
+      Math.round(100 * bent.sections.find((section) => section.from === from)!.utilisation!)
+    expect([used(50), used(60), used(110)]).toEqual([107, 90, 99])
+    expect(bent.sections.find(({ from }) => from === 50)!.gripShare).toBeCloseTo(
+      1 - (3.1 * turnAt(60)) / 40,
+      12,
+    )
+    expect(bent.sections.find(({ from }) => from === 40)!.gripShare).toBe(1)
+    expect(bent.weakest).toMatchObject({ from: 50, limitedBy: 'sliding' })
+  })
+
+  it('cannot be joined at a turn sharper than a joint takes', () => {
+    const stations = [0, 10, 20].map((chainage, i) => ({
+      ...SWUNG[0]!,
+      chainage,
+      x: [0, 10, 5][i]!,
+      y: [0, 0, 8.66][i]!,
+    }))
+    const { sections, verdict } = checkLine(survey(stations), CONTENT)
+    expect(sections.map(({ gap }) => gap)).toEqual(['sharp-turn', 'sharp-turn'])
+    expect(verdict).toBe('fails')
+  })
+
   it('never holds on loose gravel', () => {
-    const onGravel = checkLine(LOW_ROAD_STATIONS, 10, CONTENT)
+    const onGravel = checkLine(survey(LOW_ROAD_STATIONS), CONTENT)
     const section = onGravel.sections.find(({ from }) => from === 140)!
     expect(section).toMatchObject({ verdict: 'fails', governs: 'ground', holdsToLevel: null })
     expect(onGravel.weakest.from).toBe(140)
   })
 
   it('does not rely on a section without size or known ground', () => {
-    const gaps = checkLine(SWUNG, 10, { ...CONTENT, sizes: CONTENT.sizes.slice(1) })
+    const gaps = checkLine(survey(SWUNG), { ...CONTENT, sizes: CONTENT.sizes.slice(1) })
     expect(gaps.sections[0]).toMatchObject({ gap: 'no-size', verdict: 'notChecked' })
     const bare = {
       ...CONTENT,
       grounds: CONTENT.grounds.filter(({ surface }) => surface !== 'turf'),
     }
-    expect(checkLine(SWUNG, 10, bare).sections[6]).toMatchObject({ gap: 'no-ground' })
+    expect(checkLine(survey(SWUNG), bare).sections[6]).toMatchObject({ gap: 'no-ground' })
   })
 
   it('computes no case under more than 1.5 diameters of water', () => {
-    const deep = checkLine(SWUNG, 10, { ...CONTENT, waterLevel: 4.6 })
+    const deep = checkLine(survey(SWUNG), { ...CONTENT, waterLevel: 4.6 })
     expect(deep.sections[0]).toMatchObject({ gap: 'too-deep', verdict: 'fails' })
   })
 })

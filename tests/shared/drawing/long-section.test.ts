@@ -23,7 +23,7 @@ const say = textResolver({ ...texts.en, ...areaTexts.en }, 'metric')
 const start = lowRoadContent({ place: 60, sizes: [sizeRun(0, 90), sizeRun(90, 180, 2)] })
 const grounds = start.grounds.map((ground) => ({ ...ground, suitable: true }))
 const content = { ...start, grounds }
-const answer = checkLine(LOW_ROAD_STATIONS, 10, content)
+const answer = checkLine({ stations: LOW_ROAD_STATIONS, sectionLength: 10 }, content)
 const lowRoad: LongSectionInput = {
   ...drawnScenario(LOW_ROAD_SURVEY, content, answer),
   view: VIEWS[0]!,

@@ -92,7 +92,7 @@ describe('faults of a scenario', () => {
           const sizes = [{ ...size, barrier: { ...size.barrier, diameter, skirtLength } }]
           const content = lowRoadContent({ ...changes, sizes })
           if (scenarioFaults(content, LOW_ROAD_SURVEY).length > 0) return
-          const answer = checkLine(LOW_ROAD_SURVEY.stations, 10, content)
+          const answer = checkLine(LOW_ROAD_SURVEY, content)
           expect(answer.sections).toHaveLength(18)
           answered += 1
           const levels = answer.sections.flatMap(({ holdsToLevel }) => holdsToLevel ?? [])
