@@ -17,6 +17,7 @@ export default {
   clearTextReporter: { logTests: false, allowColor: false },
   concurrency: 1,
   timeoutMS: 10_000,
+  disableTypeChecks: false,
   tempDirName: '.stryker-tmp',
   ignorePatterns: [
     'data',

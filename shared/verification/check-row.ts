@@ -2,10 +2,23 @@
  * Where a check value comes from: the text was seen, it was recalled from memory, it was derived by
  * independent means, or it is common practice without a source.
  */
-export type CheckTag = 'published' | 'memory' | 'derived' | 'practice'
+export const CHECK_TAGS = ['published', 'memory', 'derived', 'practice'] as const
+export type CheckTag = (typeof CHECK_TAGS)[number]
 
-export type CheckTopic =
-  'hydrostatics' | 'stability' | 'movingWater' | 'loadedTube' | 'ground' | 'water' | 'pumps'
+/** Topics in the order in which they are shown. */
+export const CHECK_TOPICS = [
+  'hydrostatics',
+  'stability',
+  'movingWater',
+  'loadedTube',
+  'ground',
+  'water',
+  'pumps',
+  'sandbags',
+  'chance',
+  'sheets',
+] as const
+export type CheckTopic = (typeof CHECK_TOPICS)[number]
 
 /** One figure of a check value, as the source prints it. */
 export interface CheckFigure {
@@ -33,6 +46,7 @@ export interface ReferenceRow {
   readonly topic: CheckTopic
   readonly title: string
   readonly source: string
+  readonly tag: CheckTag
   readonly printed: string
   readonly why: string
 }

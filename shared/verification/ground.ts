@@ -3,7 +3,7 @@ import { groundSeepage } from '../calc/ground/ground-seepage'
 import { criticalGradient } from '../calc/ground/piping-screen'
 import { developingMean, developingMoment } from '../calc/uplift/developing-uplift'
 import { upliftMoments, upliftShare } from '../calc/uplift/uplift-share'
-import { figure, type CheckRow, type ReferenceRow } from './check-row'
+import { figure, type CheckRow } from './check-row'
 
 const DEEP = { model: 'deep', edgeFactor: 1, diffusivity: null, time: null } as const
 const LINEAR = { ...DEEP, model: 'linear' } as const
@@ -11,6 +11,9 @@ const LINEAR = { ...DEEP, model: 'linear' } as const
 /** q/(k h) by B/T_l. */
 const seepageRatio = (ratio: number): number =>
   groundSeepage({ permeability: 1, head: 1, baseWidth: ratio, layerThickness: 1 })
+
+const seepageCase = (): number =>
+  groundSeepage({ permeability: 1e-4, head: 1, baseWidth: 4, layerThickness: 4 })
 
 const SEEPAGE = [
   [0.25, '0.96045'],
@@ -52,16 +55,22 @@ export const GROUND_ROWS: readonly CheckRow[] = [
     ),
   },
   {
+    id: 'seepage-asymptote',
+    topic: 'ground',
+    title: 'Seepage under a very wide base: k h/q less B/T, from q/(k h) → 1/(B/T + 0.88254)',
+    source: 'conformal map: 4 ln 2/π',
+    tag: 'derived',
+    figures: [figure('B/T 40', '0.88254', '–', () => 1 / seepageRatio(40) - 40)],
+  },
+  {
     id: 'seepage-case',
     topic: 'ground',
     title: 'k 1e-4 m/s, h 1 m, B 4 m, T 4 m',
     source: 'conformal map',
     tag: 'derived',
     figures: [
-      figure('per metre and hour', '191.94', 'l', () => {
-        const q = groundSeepage({ permeability: 1e-4, head: 1, baseWidth: 4, layerThickness: 4 })
-        return q * 3600 * 1000
-      }),
+      figure('q', '5.3318', '10⁻⁵ m²/s', () => 1e5 * seepageCase()),
+      figure('per metre and hour', '191.94', 'l', () => 3600 * 1000 * seepageCase()),
     ],
   },
   {
@@ -88,6 +97,7 @@ export const GROUND_ROWS: readonly CheckRow[] = [
     tag: 'memory',
     figures: [
       figure('at 1/4', '0.75', '–', () => upliftShare(LINEAR, 1, 0.25)),
+      figure('at 1/2', '0.5', '–', () => upliftShare(LINEAR, 1, 0.5)),
       figure('at 3/4', '0.25', '–', () => upliftShare(LINEAR, 1, 0.75)),
       figure('centroid from the wet edge', '0.3333', 'B', () => {
         const { mean, moment } = upliftMoments(LINEAR, 1)
@@ -106,6 +116,7 @@ export const GROUND_ROWS: readonly CheckRow[] = [
         figure(`U at ${tau}`, ratio, '–', () => developingMean(tau)),
         figure(`arm at ${tau}`, arm, 'B', () => developingMoment(tau) / developingMean(tau)),
       ]),
+      figure('U at the end', '0.5', '–', () => developingMean(100)),
       figure('c 1e-5 m²/s, B 2.3 m, 24 h', '0.41915', '–', () =>
         developingMean((1e-5 * 86_400) / 2.3 ** 2),
       ),
@@ -136,32 +147,5 @@ export const GROUND_ROWS: readonly CheckRow[] = [
     figures: GAPS.map(([width, printed]) =>
       figure(`${width} mm`, printed, 'l', () => gapPerHour(width)),
     ),
-  },
-]
-
-export const GROUND_REFERENCES: readonly ReferenceRow[] = [
-  {
-    id: 'levee-underseepage',
-    topic: 'ground',
-    title: 'Levee underseepage: k_f 0.1, k_b 1e-4 cm/s, z 8, d 80, L₂ 110, H 20 ft',
-    source: 'ETL 1110-2-556 (from memory)',
-    printed: 'h₀ 9.357 ft, i 1.170',
-    why: 'A temporary barrier stands on the ground as it is; blankets of levees are not modelled.',
-  },
-  {
-    id: 'lane-ratios',
-    topic: 'ground',
-    title: 'Weighted creep ratios after Lane',
-    source: 'Lane 1935 (from memory; two copies differ by 0.1)',
-    printed: 'very fine sand 8.5, fine 7, medium 6, coarse 5, fine gravel 4, clay 1.8 to 3',
-    why: 'Piping is screened, never a gate; the ratios were fitted to permanent weirs.',
-  },
-  {
-    id: 'friction-published',
-    topic: 'ground',
-    title: 'Friction of a bulk bag on gravel road, grass, asphalt and smooth concrete',
-    source: 'Klipalo et al. 2022, Buildings 12(7) 990',
-    printed: '0.74, 0.64, 0.54, 0.40',
-    why: 'No value is published for a coated skirt on wet ground: defaults are judgement.',
   },
 ]

@@ -1,10 +1,12 @@
 import type { CheckRow, ReferenceRow } from './check-row'
-import { GROUND_REFERENCES, GROUND_ROWS } from './ground'
+import { GROUND_ROWS } from './ground'
 import { HYDROSTATICS_ROWS } from './hydrostatics'
-import { LOADED_TUBE_REFERENCES, LOADED_TUBE_ROWS } from './loaded-tube'
-import { MOVING_WATER_REFERENCES, MOVING_WATER_ROWS } from './moving-water'
-import { PUMP_REFERENCES, PUMP_ROWS } from './pumps'
-import { STABILITY_REFERENCES, STABILITY_ROWS } from './stability'
+import { LOADED_TUBE_ROWS } from './loaded-tube'
+import { MOVING_WATER_ROWS } from './moving-water'
+import { PLANNING_REFERENCES } from './planning-references'
+import { PUMP_ROWS } from './pumps'
+import { ENGINEERING_REFERENCES } from './references'
+import { STABILITY_ROWS } from './stability'
 import { WATER_ROWS } from './water'
 
 /** Every check value that the product computes; tests and the Method page read this one list. */
@@ -20,9 +22,6 @@ export const CHECK_ROWS: readonly CheckRow[] = [
 
 /** Values that stand for reference only and are not counted. */
 export const REFERENCE_ROWS: readonly ReferenceRow[] = [
-  ...STABILITY_REFERENCES,
-  ...MOVING_WATER_REFERENCES,
-  ...LOADED_TUBE_REFERENCES,
-  ...GROUND_REFERENCES,
-  ...PUMP_REFERENCES,
+  ...ENGINEERING_REFERENCES,
+  ...PLANNING_REFERENCES,
 ]

@@ -1,7 +1,8 @@
 import { loadedShape, type StandingShape } from '../calc/loaded-shape/loaded-shape'
+import { loadedOutline } from '../calc/loaded-shape/loaded-outline'
 import { weldAngles, type Membrane } from '../calc/loaded-shape/membrane'
 import { wetLengthPlusRun, wetRun } from '../calc/loaded-shape/skin-length'
-import { figure, type CheckRow, type ReferenceRow } from './check-row'
+import { figure, type CheckRow } from './check-row'
 
 const UNIT_WEIGHT = 9810
 
@@ -28,6 +29,27 @@ function wetLengthAtCrest(alpha: number): number {
   const membrane = dam(1, alpha * UNIT_WEIGHT)
   return wetLengthPlusRun(membrane, 0.5, 0) - wetRun(membrane, 0.5, 0)
 }
+
+/** Largest distance of the dry side from the middle of the height, over the height. */
+function drySideRadius(): number {
+  const shape = standing(1, 15_000, 0.6)
+  const outline = { shape, airPressure: 15_000, depth: 0.6, unitWeight: UNIT_WEIGHT }
+  const { drySkin, crest } = loadedOutline(outline)
+  const distances = drySkin.map(({ x, y }) => Math.hypot(x - crest.x, y - crest.y / 2))
+  return Math.max(...distances) / crest.y
+}
+
+/** Cosine of the heel angle with the water at the crest: its sine from the product, second quadrant. */
+function heelCosineAtCrest(alpha: number): number {
+  return -Math.sqrt(1 - Math.min(1, weldAngles(dam(1, alpha * UNIT_WEIGHT), 0.5, 0).sinBeta) ** 2)
+}
+
+/** Printed −1/3 and the like, from 1/α − 1. */
+const HEEL_COSINES = [
+  [1.5, '-0.33333'],
+  [2, '-0.50000'],
+  [3, '-0.66667'],
+] as const
 
 const LOW_DAM = dam(0.8, 20_000)
 
@@ -81,6 +103,30 @@ export const LOADED_TUBE_ROWS: readonly CheckRow[] = [
       figure('α 2', '1.31696', '–', () => wetLengthAtCrest(2)),
       figure('α 3', '1.33676', '–', () => wetLengthAtCrest(3)),
     ],
+  },
+  {
+    id: 'air-dam-theory',
+    topic: 'loadedTube',
+    title: 'Air dam: T = pH/2, dry side a half circle of diameter H',
+    source: 'summary of Anwar 1967',
+    tag: 'published',
+    figures: [
+      figure('T/(pH)', '0.5', '–', () => {
+        const { skinTension, crest } = standing(1, 15_000, 0.6)
+        return skinTension / (15_000 * crest)
+      }),
+      figure('radius of the dry side over H', '0.5', '–', drySideRadius),
+    ],
+  },
+  {
+    id: 'air-dam-heel',
+    topic: 'loadedTube',
+    title: 'Air dam with water at the crest, p = α γ H: heel angle, cos θ = 1/α − 1',
+    source: 'closed form',
+    tag: 'derived',
+    figures: HEEL_COSINES.map(([alpha, printed]) =>
+      figure(`cos θ at α ${alpha}`, printed, '–', () => heelCosineAtCrest(alpha)),
+    ),
   },
   {
     id: 'air-dam-below-crest',
@@ -143,24 +189,4 @@ export const LOADED_TUBE_ROWS: readonly CheckRow[] = [
     ],
   },
   ...CREST_ROWS.map(crestRow),
-]
-
-export const LOADED_TUBE_REFERENCES: readonly ReferenceRow[] = [
-  {
-    id: 'water-filled-tube',
-    topic: 'loadedTube',
-    title:
-      'Water-filled tube on rigid ground, no outside water, perimeter 1, γ 1, top pressure 0.05',
-    source: 'derived, theory of Leshchinsky et al. 1996',
-    printed: 'H 0.202845, W 0.393620, contact 0.264548, T 0.015358',
-    why: 'The product computes air-filled tubes.',
-  },
-  {
-    id: 'coated-fabric',
-    topic: 'loadedTube',
-    title: 'PVC-coated polyester, types I, III and V, warp',
-    source: 'trade table of fabric types; another guide differs',
-    printed: '60, 115, 196 kN/m',
-    why: 'Fabric strength is an input; it comes from the maker of the barrier.',
-  },
 ]

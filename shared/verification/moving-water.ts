@@ -1,6 +1,6 @@
 import { stillWaterThrust } from '../calc/hydrostatics/still-water-thrust'
 import { dragCoefficientOf, dynamicDepth } from '../calc/moving-water/current-thrust'
-import { figure, type CheckRow, type ReferenceRow } from './check-row'
+import { figure, type CheckRow } from './check-row'
 
 /** Ratio of length to depth, and the printed coefficient up to it. */
 const DRAG_ROWS = [
@@ -56,16 +56,5 @@ export const MOVING_WATER_ROWS: readonly CheckRow[] = [
     figures: DRAG_ROWS.map(([ratio, printed]) =>
       figure(ratio > 120 ? 'more' : `up to ${ratio}`, printed, '–', () => dragCoefficientOf(ratio)),
     ),
-  },
-]
-
-export const MOVING_WATER_REFERENCES: readonly ReferenceRow[] = [
-  {
-    id: 'log-impact',
-    topic: 'movingWater',
-    title: 'Log of 1000 lb at 10 ft/s, by method',
-    source: 'several published methods, partly from memory',
-    printed: '311, 2000, 23 400, 22 600 lb',
-    why: 'Methods differ 75-fold: the product takes a force and asks for the method.',
   },
 ]

@@ -2,7 +2,7 @@ import { frictionFactor } from '../calc/pumping/friction-factor'
 import { pumpDuty } from '../calc/pumping/pump-duty'
 import { affinity, cycleTime, pumpPower, sumpVolume } from '../calc/pumping/pump-power'
 import { suctionHeadAvailable } from '../calc/pumping/suction-head'
-import { figure, type CheckRow, type ReferenceRow } from './check-row'
+import { figure, type CheckRow } from './check-row'
 
 /**
  * Pump 20 − 12 000 Q² on a system 6 + 6000 Q²: the loss as a smooth stand-in whose K alone gives it,
@@ -110,30 +110,3 @@ export const PUMP_ROWS: readonly CheckRow[] = [
 function power() {
   return pumpPower({ flow: 0.05, head: 10, efficiency: 0.7, density: 1000, gravity: 9.81 })
 }
-
-export const PUMP_REFERENCES: readonly ReferenceRow[] = [
-  {
-    id: 'suction-us',
-    topic: 'pumps',
-    title: 'Suction head available in feet: open tank, 20 ft lift at 60 °F, 7000 ft altitude',
-    source: 'wastewater handbooks',
-    printed: '46, 11, 35.061 and 14.789 ft',
-    why: 'The handbooks add rounded heads; the product works from pressures and temperature.',
-  },
-  {
-    id: 'pipe-examples',
-    topic: 'pumps',
-    title: 'Pipe examples 6.6 and 6.8',
-    source: 'White, Fluid Mechanics (from memory)',
-    printed: 'h_f 4.44 ft; Q 0.34205 m³/s, V 4.839 m/s, f 0.02011',
-    why: 'Recalled without all of their inputs.',
-  },
-  {
-    id: 'hazen-williams',
-    topic: 'pumps',
-    title: 'Hazen–Williams, 0.02 m³/s, 0.10 m, C 140',
-    source: 'closed form',
-    printed: '5.990 m per 100 m',
-    why: 'The product uses Darcy–Weisbach.',
-  },
-]

@@ -39,8 +39,8 @@ export const WATER_ROWS: readonly CheckRow[] = [
     id: 'water-density',
     topic: 'water',
     title: 'Density of fresh water',
-    source: 'CIPM 2001 (Tanaka et al., Metrologia 38)',
-    tag: 'published',
+    source: 'formula of CIPM 2001 (Tanaka et al., Metrologia 38), recomputed; figures from memory',
+    tag: 'memory',
     figures: byTemperature(
       ['999.843', '999.975', '999.703', '998.207', '995.649'],
       'kg/m³',
@@ -51,8 +51,8 @@ export const WATER_ROWS: readonly CheckRow[] = [
     id: 'water-viscosity',
     topic: 'water',
     title: 'Viscosity of water',
-    source: 'IAPWS, supplementary release on liquid water at 0.1 MPa',
-    tag: 'published',
+    source: 'IAPWS, supplementary release on liquid water at 0.1 MPa (from memory)',
+    tag: 'memory',
     figures: byTemperature(['1791.8', '1567.3', '1305.9', '1001.6', '797.2'], 'µPa·s', (t) => {
       return waterViscosity(t) * 1e6
     }),
@@ -61,8 +61,8 @@ export const WATER_ROWS: readonly CheckRow[] = [
     id: 'vapour-pressure',
     topic: 'water',
     title: 'Vapour pressure of water',
-    source: 'IAPWS-IF97',
-    tag: 'published',
+    source: 'IAPWS-IF97, eq. 30 (from memory)',
+    tag: 'memory',
     figures: byTemperature(['0.6112', '0.8135', '1.2282', '2.3392', '4.2467'], 'kPa', (t) => {
       return vapourPressure(t) / 1000
     }),
@@ -87,8 +87,8 @@ export const WATER_ROWS: readonly CheckRow[] = [
     id: 'gravity',
     topic: 'water',
     title: 'Gravity at 0°, 45° and 90°',
-    source: 'WGS 84',
-    tag: 'published',
+    source: 'WGS 84, formula of Somigliana (from memory)',
+    tag: 'memory',
     figures: [
       figure('0°', '9.780325', 'm/s²', () => gravityAt(0)),
       figure('45°', '9.806198', 'm/s²', () => gravityAt(45)),
@@ -133,7 +133,7 @@ export const WATER_ROWS: readonly CheckRow[] = [
   },
   {
     id: 'wave-growth-book',
-    topic: 'water',
+    topic: 'movingWater',
     title: 'Waves on shallow water: fetch 24.4 km, U_A 22 m/s, depth 11 m (book: 1.5 m, 4.4 s)',
     source: 'Shore Protection Manual 1984, ch. 3 (from memory)',
     tag: 'memory',
@@ -148,7 +148,7 @@ export const WATER_ROWS: readonly CheckRow[] = [
   },
   {
     id: 'wave-growth',
-    topic: 'water',
+    topic: 'movingWater',
     title: 'Waves on shallow water at 20 m/s',
     source: 'closed form',
     tag: 'derived',
@@ -162,7 +162,7 @@ export const WATER_ROWS: readonly CheckRow[] = [
   },
   {
     id: 'overtopping',
-    topic: 'water',
+    topic: 'movingWater',
     title: 'Overtopping of a vertical wall, H_m0 = R_c = 0.10 and 0.20 m',
     source: 'EurOtop 2018, eq. 7.1 (from memory); figures derived',
     tag: 'derived',

@@ -1,0 +1,98 @@
+import type { ReferenceRow } from './check-row'
+
+/** The same for sandbags, chance and sheets. */
+export const PLANNING_REFERENCES: readonly ReferenceRow[] = [
+  {
+    id: 'sandbag-count',
+    topic: 'sandbags',
+    title: 'Sandbags for a wall 1 to 4 ft high, N = (3H + 9H²)/2 per foot',
+    source: 'NDSU AE-626, edition of 2011',
+    tag: 'published',
+    printed: '600, 2100, 4500, 7800 per 100 ft',
+    why: 'Belongs to the plan of deployment, not to the section.',
+  },
+  {
+    id: 'sandbag-count-1997',
+    topic: 'sandbags',
+    title: 'Sandbags for a wall 1 to 3 ft high, older edition',
+    source: 'NDSU AE-626, edition of 1997',
+    tag: 'published',
+    printed: '800, 2000, 3400 per 100 ft',
+    why: 'Superseded; it shows why the edition is kept with the figure.',
+  },
+  {
+    id: 'sandbag-rate',
+    topic: 'sandbags',
+    title: 'Bags that one person fills and lays in an hour, and what one weighs',
+    source: 'NDSU AE-626, edition of 2011',
+    tag: 'published',
+    printed: '12 bags; 35 to 40 lb',
+    why: 'Belongs to the plan of deployment, not to the section.',
+  },
+  {
+    id: 'sandbag-wall',
+    topic: 'sandbags',
+    title: 'Work on a laboratory sandbag wall about 85 ft long and 3 ft high',
+    source: 'ERDC, laboratory tests',
+    tag: 'published',
+    printed: '205.1 man-hours',
+    why: 'Belongs to the plan of deployment, not to the section.',
+  },
+  {
+    id: 'reliability-index',
+    topic: 'chance',
+    title: 'Probability of failure 1e-1 to 1e-5 and reliability index',
+    source: 'EN 1990, Table C1 (rounded there)',
+    tag: 'published',
+    printed: '1.2816, 2.3263, 3.0902, 3.7190, 4.2649',
+    why: 'The product does not compute a chance of failure.',
+  },
+  {
+    id: 'lognormal-index',
+    topic: 'chance',
+    title: 'Lognormal reliability index at F 1.50 and V 17 %',
+    source: 'Duncan 2000 (from memory)',
+    tag: 'memory',
+    printed: 'β 2.318, P_f 1.02 %',
+    why: 'The product does not compute a chance of failure.',
+  },
+  {
+    id: 'underseepage-chance',
+    topic: 'chance',
+    title: 'Underseepage by first-order second moment',
+    source: 'inputs ETL 1110-2-556 (from memory), figures derived',
+    tag: 'derived',
+    printed:
+      'E[i] 1.1696, σ 0.3015, P(i > 0.85) 0.8711; at 5, 10, 15, 20 ft: 7.3e-6, 0.0547, 0.499, 0.871',
+    why: 'The product does not compute a chance of failure.',
+  },
+  {
+    id: 'variation',
+    topic: 'chance',
+    title: 'Coefficients of variation: friction angle, saturated permeability',
+    source: 'Duncan 2000 (from memory)',
+    tag: 'memory',
+    printed: '2 to 13 %, 68 to 90 %',
+    why: 'The product does not compute a chance of failure.',
+  },
+  {
+    id: 'check-categories',
+    topic: 'sheets',
+    title: 'Check categories 0 to 3 of temporary works',
+    source: 'BS 5975-1:2024, Table 2',
+    tag: 'published',
+    printed:
+      '0 standard solutions; 1 simple, another member of the team; 2 more complex or soil-dependent, somebody not involved in the design; 3 complex or novel, another organisation',
+    why: 'A rule for people: it belongs to the calculation sheet.',
+  },
+  {
+    id: 'sheet-cover',
+    topic: 'sheets',
+    title: 'Fields on the cover of a calculation',
+    source: 'public engineering procedures',
+    tag: 'published',
+    printed:
+      'number, revision and reason, status, sheet x of y; prepared, checked, approved with date; purpose, codes with edition, inputs with units and source, assumptions to confirm, method and limits, software and version, open items, references with revision',
+    why: 'A list of fields: it belongs to the calculation sheet.',
+  },
+]
