@@ -1,4 +1,4 @@
-import { open, mkdir, readdir, rename, rm, stat } from 'node:fs/promises'
+import { access, open, mkdir, readdir, rename, rm, stat } from 'node:fs/promises'
 import { join, resolve } from 'node:path'
 import { randomUUID } from 'node:crypto'
 
@@ -10,6 +10,8 @@ export interface FileStore {
   readonly folder: string
   /** Name of a file in the folder. */
   readonly nameOf: (id: string, variant: FileVariant) => string
+  /** Whether the bytes are there. */
+  readonly holds: (id: string, variant: FileVariant) => Promise<boolean>
   /** Writes as a whole or not at all, and survives a power cut once it has resolved. */
   readonly write: (id: string, variant: FileVariant, bytes: Uint8Array) => Promise<void>
   /** Removes a file with its preview; nothing happens where there is none. */
@@ -34,6 +36,7 @@ export function openFileStore(path: string): FileStore {
   return {
     folder,
     nameOf,
+    holds: (id, variant) => isThere(join(folder, nameOf(id, variant))),
     write: (id, variant, bytes) => writeWhole(folder, nameOf(id, variant), bytes),
     remove: async (id) => {
       for (const variant of ['original', 'preview'] as const) {
@@ -41,6 +44,15 @@ export function openFileStore(path: string): FileStore {
       }
     },
     listOlderThan: (moment) => listOlderThan(folder, moment),
+  }
+}
+
+async function isThere(path: string): Promise<boolean> {
+  try {
+    await access(path)
+    return true
+  } catch {
+    return false
   }
 }
 

@@ -1,4 +1,5 @@
 import type { Response } from 'express'
+import { NotFoundError } from '../../errors'
 import type { FileStore, FileVariant } from '../../files/file-store'
 import { nameForType } from '../../files/media-type'
 
@@ -15,9 +16,20 @@ export interface Sending {
 /** Whatever stands in a file: it runs nothing, loads nothing and is no page of ours. */
 const POLICY = "sandbox; default-src 'none'; img-src 'self'; style-src 'unsafe-inline'"
 
-/** Answers with the bytes of a file; whoever asks again is let in again, then spared the bytes. */
-export function sendFile(res: Response, store: FileStore, sending: Sending): Promise<void> {
-  const { id, name, mediaType, variant, shown, checksum } = sending
+/**
+ * Answers with the bytes of a file; whoever asks again is let in again, then spared the bytes.
+ *
+ * @throws NotFoundError where the bytes are gone, as after a restore without the folder of files.
+ */
+export async function sendFile(
+  res: Response,
+  store: FileStore,
+  { id, name, mediaType, variant, shown, checksum }: Sending,
+): Promise<void> {
+  if (!(await store.holds(id, variant))) {
+    res.req.log.error({ fileId: id, variant }, 'the bytes of a file are missing')
+    throw new NotFoundError(`file: the bytes of "${name}" are missing on the server; add it again`)
+  }
   res.attachment(nameForType(name, mediaType))
   if (shown === 'inline') {
     const header = String(res.get('Content-Disposition'))
@@ -31,7 +43,7 @@ export function sendFile(res: Response, store: FileStore, sending: Sending): Pro
     ETag: `"${checksum}${variant === 'preview' ? '-preview' : ''}"`,
   })
   const options = { root: store.folder, cacheControl: false, lastModified: false }
-  return new Promise((resolve, reject) => {
+  await new Promise<void>((resolve, reject) => {
     res.sendFile(store.nameOf(id, variant), { ...options, dotfiles: 'deny' }, (error?: Error) => {
       // Once the answer has begun, an error is a reader who went away.
       if (!error || res.headersSent) resolve()

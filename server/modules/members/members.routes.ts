@@ -8,7 +8,13 @@ import {
 import { defineOperation, type Operation } from '../../http/operation'
 import { parseBody, pathPart } from '../../http/parse-input'
 import type { ProjectWork } from '../projects/deed'
-import { addMember, changeMemberRole, readMembers, removeMember } from './members.service'
+import {
+  addMember,
+  changeMemberRole,
+  leaveProject,
+  readMembers,
+  removeMember,
+} from './members.service'
 
 const PATH = '/api/projects/:projectId/members'
 
@@ -72,6 +78,17 @@ function oneOperations(work: ProjectWork): readonly Operation[] {
       problems: ['conflict'],
       handle: ({ req, actor }) => {
         removeMember(work, actor, placeOf(req))
+      },
+    }),
+    defineOperation({
+      method: 'delete',
+      path: '/api/projects/:projectId/membership',
+      id: 'leaveProject',
+      summary: 'Leave a project; a lead always stays',
+      rule: 'read-project',
+      problems: ['conflict'],
+      handle: ({ req, actor }) => {
+        leaveProject(work, actor, pathPart(req, 'projectId'))
       },
     }),
   ]

@@ -80,13 +80,22 @@ export function changeMemberRole(
 
 /** @throws ConflictError where no lead would be left. */
 export function removeMember(work: ProjectWork, actor: Doer, place: MemberPlace): void {
+  endMembership(work, actor, place, 'member.removed')
+}
+
+/** Whatever somebody made stays. @throws ConflictError for the only lead. */
+export function leaveProject(work: ProjectWork, actor: Doer, projectId: string): void {
+  endMembership(work, actor, { projectId, accountId: actor.accountId }, 'member.left')
+}
+
+function endMembership(work: ProjectWork, actor: Doer, place: MemberPlace, action: string): void {
   change(work, actor, (deed) => {
     const before = memberAt(deed.tx, place)
     assertLeadStays(deed.tx, place, before)
     deleteMember(deed.tx, place.projectId, place.accountId)
     noteChange(deed, place.projectId, {
       ...subject({ id: before.accountId, name: before.name }),
-      action: 'member.removed',
+      action,
       detail: { role: before.role },
     })
   })

@@ -109,6 +109,21 @@ describe('a document', { timeout: 30_000 }, () => {
 })
 
 describe('files', { timeout: 30_000 }, () => {
+  it('say that their bytes are gone, and nothing of what they were', async () => {
+    const { server, lead, path, add } = await started()
+    const file = await add(await photograph(), 'quay.jpeg')
+    await openFileStore(server.filesFolder).remove(file.id)
+    for (const variant of ['content', 'preview']) {
+      const { body, headers } = await lead.get(`${path}/${file.id}/${variant}`).expect(404)
+      expect(problemSchema.parse(body)).toMatchObject({
+        code: 'not-found',
+        message: expect.stringContaining('the bytes of "quay.jpeg" are missing') as string,
+      })
+      expect(headers['content-type']).toContain('application/json')
+      expect(headers).not.toHaveProperty('content-disposition')
+    }
+  })
+
   it('are listed, renamed, captioned and deleted, row and bytes', async () => {
     const { server, lead, path, send } = await started()
     const { id } = (await send(PDF, 'a.pdf', ' Plan ').expect(201)).body as ProjectFile

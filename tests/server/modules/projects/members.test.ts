@@ -75,6 +75,27 @@ describe('members', { timeout: 30_000 }, () => {
     ])
   })
 
+  it('leave by themselves, readers too, and no longer see the project', async () => {
+    const { server, lead, projectPath } = await started()
+    const own = `${projectPath}/membership`
+    for (const role of ['editor', 'reader'] as const) {
+      await addMember(server, projectPath, 'engineerB', role)
+      await as(server, 'engineerB').delete(own).expect(204)
+      await as(server, 'engineerB').get(projectPath).expect(404)
+      await as(server, 'engineerB').delete(own).expect(404)
+      expect(auditOf(server.db).at(-1)).toMatchObject({
+        action: 'member.left',
+        actorName: 'Engineer B',
+        subjectName: 'Engineer B',
+        detail: { role },
+      })
+    }
+    const { body } = await lead.delete(own).expect(409)
+    expect(problemSchema.parse(body).message).toContain('Engineer A is the only lead')
+    await addMember(server, projectPath, 'engineerB', 'lead')
+    await lead.delete(own).expect(204)
+  })
+
   it('always include a lead who can sign in', async () => {
     const { server, lead, projectPath, path } = await started()
     const mine = `${path}/${engineerA.id}`
