@@ -1,8 +1,7 @@
 import type { z } from 'zod'
 import type { fileChangeSchema, ProjectFile, projectFilesSchema } from '@shared/schemas/project'
-import type { Problem } from '@shared/schemas/problem'
 import { projectPath } from './projects'
-import { ApiError, getJson, sendJson } from './request'
+import { ApiError, errorOf, getJson, sendJson, withSession } from './request'
 
 export type FileChange = z.input<typeof fileChangeSchema>
 
@@ -38,7 +37,8 @@ export function filePreview(projectId: string, fileId: string): string {
 }
 
 /**
- * Sends a file and tells how far it is. Only the older way of asking a server reports that.
+ * Sends a file and tells how far it is; once more from its beginning where the session had ended and
+ * the person has signed in again.
  *
  * @param tell Share that is sent, 0 to 1.
  */
@@ -47,34 +47,28 @@ export function uploadFile(
   file: File,
   tell: (share: number) => void,
 ): Promise<ProjectFile> {
+  return withSession(() => {
+    tell(0)
+    return sendFile(path(projectId), file, tell)
+  })
+}
+
+/** Only the older way of asking a server reports how much is sent. */
+function sendFile(to: string, file: File, tell: (share: number) => void): Promise<ProjectFile> {
   const form = new FormData()
   form.append('file', file)
   const request = new XMLHttpRequest()
-  request.open('POST', path(projectId))
+  request.open('POST', to)
   request.setRequestHeader('accept', 'application/json')
   request.upload.addEventListener('progress', ({ loaded, total }) => tell(loaded / total))
   return new Promise((resolve, reject) => {
     request.addEventListener('load', () => {
-      const answer = jsonOf(request.responseText)
-      if (request.status < 300) resolve(answer as ProjectFile)
-      else
-        reject(new ApiError(`${file.name}: ${request.status}`, request.status, problemOf(answer)))
+      const { status, responseText: text } = request
+      const retryAfter = request.getResponseHeader('retry-after')
+      if (status < 300) resolve(JSON.parse(text) as ProjectFile)
+      else reject(errorOf(file.name, { status, text, retryAfter }))
     })
     request.addEventListener('error', () => reject(new ApiError(`${file.name}: no answer`, null)))
     request.send(form)
   })
-}
-
-function jsonOf(text: string): unknown {
-  try {
-    return JSON.parse(text)
-  } catch {
-    return null
-  }
-}
-
-function problemOf(answer: unknown): Problem | null {
-  return typeof answer === 'object' && answer !== null && 'code' in answer
-    ? (answer as Problem)
-    : null
 }

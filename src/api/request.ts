@@ -65,18 +65,33 @@ export function whenSessionEnds(ask: SignInAgain): void {
 export const SESSION_PATH = '/api/session'
 
 /** Sends a request; once more after the person has signed in again. */
-async function ask(path: string, init: RequestInit): Promise<Response> {
-  const first = await send(path, init)
-  if (first.ok) return first
-  const error = await errorOf(first, path)
-  const isSessionOver = error.code === 'sign-in-required' && path !== SESSION_PATH
-  if (!isSessionOver || !(await signInAgain())) throw error
-  const second = await send(path, init)
-  if (second.ok) return second
-  throw await errorOf(second, path)
+function ask(path: string, init: RequestInit): Promise<Response> {
+  const once = () => send(path, init)
+  return path === SESSION_PATH ? once() : withSession(once)
+}
+
+/** Does what needs a session; once more where it had ended and the person has signed in again. */
+export async function withSession<Answer>(attempt: () => Promise<Answer>): Promise<Answer> {
+  try {
+    return await attempt()
+  } catch (error) {
+    const isSessionOver = error instanceof ApiError && error.code === 'sign-in-required'
+    if (!isSessionOver || !(await signInAgain())) throw error
+    return attempt()
+  }
 }
 
 async function send(path: string, init: RequestInit): Promise<Response> {
+  const response = await reach(path, init)
+  if (response.ok) return response
+  throw errorOf(path, {
+    status: response.status,
+    text: await response.text(),
+    retryAfter: response.headers.get('retry-after'),
+  })
+}
+
+async function reach(path: string, init: RequestInit): Promise<Response> {
   const headers = { accept: 'application/json', ...init.headers }
   try {
     return await fetch(path, { credentials: 'same-origin', ...init, headers })
@@ -90,11 +105,18 @@ async function answerOf(response: Response): Promise<unknown> {
   return text === '' ? undefined : JSON.parse(text)
 }
 
-async function errorOf(response: Response, path: string): Promise<ApiError> {
-  const { status } = response
-  const wait = Number(response.headers.get('retry-after') ?? NaN)
-  const retryAfter = Number.isFinite(wait) ? wait : null
-  return new ApiError(`${path}: ${status}`, status, problemOf(await response.text()), retryAfter)
+/** An answer that is not the one that was asked for, however it arrived. */
+interface Refusal {
+  readonly status: number
+  readonly text: string
+  readonly retryAfter: string | null
+}
+
+/** The error of an answer. `subject` names what was asked for, where the server says nothing. */
+export function errorOf(subject: string, { status, text, retryAfter }: Refusal): ApiError {
+  const wait = Number(retryAfter ?? NaN)
+  const seconds = Number.isFinite(wait) ? wait : null
+  return new ApiError(`${subject}: ${status}`, status, problemOf(text), seconds)
 }
 
 /** A proxy between browser and server may answer in a shape of its own. */
