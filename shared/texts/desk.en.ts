@@ -15,26 +15,6 @@ export const deskTexts = {
   emptyMemberText:
     'Whoever leads a project can add you by your address. The Quick check is open to you now.',
   quickCheck: 'To the Quick check',
-  change: '{who} {did} {what}',
-  subject: {
-    project: 'the project',
-    member: 'a member',
-    gauge: 'the gauge',
-    line: 'the line',
-    scenario: 'the scenario',
-    file: 'the file',
-  },
-  did: {
-    created: 'made',
-    changed: 'changed',
-    saved: 'saved',
-    duplicated: 'copied',
-    archived: 'archived',
-    restored: 'restored',
-    removed: 'removed',
-    deleted: 'deleted',
-    added: 'added',
-    other: 'worked on',
-  },
+  change: '{who} {did}',
   crumbs: 'Where you are',
 } as const

@@ -1,5 +1,6 @@
 import { accountTexts } from './account.en'
 import { adminTexts } from './admin.en'
+import { deedsTexts } from './deeds.en'
 import { deskTexts } from './desk.en'
 import { lineTexts } from './line.en'
 import { projectTexts } from './project.en'
@@ -11,6 +12,7 @@ export const areaTexts = {
   en: {
     account: accountTexts,
     admin: adminTexts,
+    deeds: deedsTexts,
     desk: deskTexts,
     linePage: lineTexts,
     projectPage: projectTexts,

@@ -33,3 +33,8 @@ export async function changeMember(
 export async function removeMember(projectId: string, accountId: string): Promise<void> {
   await sendJson('DELETE', one(projectId, accountId))
 }
+
+/** Ends the membership of whoever asks. */
+export async function leaveProject(projectId: string): Promise<void> {
+  await sendJson('DELETE', `${projectPath(projectId)}/membership`)
+}

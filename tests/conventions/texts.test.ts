@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest'
 import { texts } from '../../shared/texts'
 import { areaTexts } from '../../shared/texts/member-area'
+import { sectionDetails } from '../../shared/texts/section-details.en'
 import { sourceFiles } from '../support/source-files'
 
 /** Every text by its full key. */
@@ -15,16 +16,16 @@ function leaves(node: object, prefix = ''): Map<string, string> {
 }
 
 /** What is loaded at once and what comes with the area behind the sign-in. */
-const all = { ...texts.en, ...areaTexts.en }
+const all = { ...texts.en, ...areaTexts.en, ...sectionDetails.en }
 const keys = [...leaves(all).keys()]
 const AREAS = Object.keys(all).join('|')
 
 const sources = [...sourceFiles('src', /\.(ts|vue)$/), ...sourceFiles('shared', /\.ts$/)].filter(
   ({ path }) => !path.startsWith('shared/texts'),
 )
-/** Names with a dot stand in keys with a dash. */
+/** Names with a dot stand in keys with a dash. The server names the deeds of the audit trail. */
 const words = new Set(
-  sources.flatMap(({ text }) => text.replace(/(\d)\.(\d)/g, '$1-$2').match(/[\w-]+/g) ?? []),
+  [...sources, ...sourceFiles('server', /\.ts$/)].flatMap(({ text }) => text.replace(/(\d)\.(\d)/g, '$1-$2').match(/[\w-]+/g) ?? []),
 )
 
 interface UsedKey {

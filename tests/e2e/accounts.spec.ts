@@ -145,7 +145,7 @@ test('an administrator invites somebody, who accepts and signs in', async ({ bro
   await page.goto('/admin/audit')
   await page.getByLabel('About').selectOption('Invitations')
   const trail = page.getByRole('table', { name: 'Audit trail' })
-  await expect(trail.getByText('invitation.accepted')).toBeVisible()
+  await expect(trail.getByText('accepted the invitation')).toBeVisible()
   await expect(page).toHaveURL('/admin/audit?about=invitation')
   const csv = page.waitForEvent('download')
   await page.getByRole('link', { name: 'Download as CSV' }).click()
@@ -214,7 +214,7 @@ test('whoever is deactivated hands over to a named person, and their address goe
   await expect(page.getByRole('row', { name: /Leaver/ })).toContainText('address erased')
 
   await page.goto('/admin/audit?about=project')
-  await expect(page.getByRole('row', { name: /project\.handed-over/ })).toContainText('Left behind')
+  await expect(page.getByRole('row', { name: /handed over the project/ })).toContainText('Left behind')
 })
 
 test('the administration is closed to everybody else', async ({ page }) => {

@@ -101,23 +101,27 @@ describe('the audit trail', () => {
     projectId: null,
     fromVersion: 1,
     toVersion: 2,
-    detail: { role: { from: 'viewer', to: 'trainer' }, fields: ['name', 'units'] },
+    detail: {
+      role: { from: 'viewer', to: 'trainer' },
+      fields: ['name', 'unitSystem'],
+      mayCheck: { from: false, to: true },
+    },
   }
 
   it('shows who did what, from which version to which', async () => {
     fakeApi({ ...base, 'GET /api/admin/audit': () => pageOf([entry]) })
     await openPage('/admin/audit')
-    const row = await screen.findByRole('row', { name: /person\.changed/ })
+    const row = await screen.findByRole('row', { name: /changed the person/ })
     const cells = within(row)
       .getAllByRole('cell')
       .map(({ textContent }) => textContent?.trim())
     expect(cells).toEqual([
       '29 Mar 2026, 12:00',
       'nobody signed in',
-      'person.changed',
+      'changed the person',
       'Trainer',
       '1 to 2',
-      'role: viewer to trainer · fields: name, units',
+      'role: viewer to trainer · changed: name, unit system · may check: no to yes',
     ])
   })
 
