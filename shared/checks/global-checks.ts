@@ -1,3 +1,4 @@
+import { frictionResistance } from '../calc/section/friction-resistance'
 import type { DemandAndResistance } from './compare'
 import type { SectionState } from './section-state'
 
@@ -14,7 +15,8 @@ export interface StabilityPairs {
  * Pairs for a basis with global factors of safety.
  *
  *     sliding      μ N against F cos β + (W_b − V_lift − V_dry) sin β, with
- *                  N = ρg(L_w h − ½ L_w² sin β) + (W_b − V_lift − V_dry) cos β − F sin β − U
+ *                  N = ρg(L_w h − ½ L_w² sin β) + (W_b − V_lift − V_dry) cos β − F sin β − U;
+ *                  on soft ground at most c_u B and 0.4 N
  *     overturning  M_Ww + M_Wb − M_U against M_F, about the dry toe: the two faces of one membrane
  *                  are one source (EN 1997-1, single source), so the ratio is net
  *     flotation    W against U
@@ -31,7 +33,7 @@ export function globalPairs(state: SectionState): StabilityPairs {
   return {
     sliding: {
       demand: force * cosFall + afloat * sinFall,
-      resistance: section.ground.friction * normal,
+      resistance: frictionResistance(section.ground, { normal, length: geometry.base }),
     },
     overturning: {
       demand: moment,

@@ -1,17 +1,24 @@
+import { frictionResistance, type StrengthFactors } from '../calc/section/friction-resistance'
 import { isWorse, compare, type DemandAndResistance } from './compare'
 import { skinDemand, type StabilityPairs } from './global-checks'
 import type { SectionState } from './section-state'
 
-/** Partial factors on permanent and variable actions, and on tan φ. */
+/** Partial factors on permanent and variable actions, on tan φ and on c_u (1 where left out). */
 export interface Combination {
   readonly permanent: number
   readonly variable: number
   readonly friction: number
+  readonly cohesion?: number
 }
 
 /** EN 1997-1:2004, tables A.3 and A.4: sets A1 + M1 and A2 + M2. */
 export const COMBINATION_1: Combination = { permanent: 1.35, variable: 1.5, friction: 1 }
-export const COMBINATION_2: Combination = { permanent: 1, variable: 1.3, friction: 1.25 }
+export const COMBINATION_2: Combination = {
+  permanent: 1,
+  variable: 1.3,
+  friction: 1.25,
+  cohesion: 1.4,
+}
 
 /** Loss of equilibrium. EN 1997-1:2004, table A.1. */
 export const EQU = { permanent: 1.1, variable: 1.5, favourable: 0.9 }
@@ -28,7 +35,8 @@ const FABRIC_FACTOR = 3
  * water that holds carry the same factor.
  */
 export function partialSliding(state: SectionState, which: 1 | 2): DemandAndResistance {
-  const { permanent, variable, friction } = which === 1 ? COMBINATION_1 : COMBINATION_2
+  const combination = which === 1 ? COMBINATION_1 : COMBINATION_2
+  const { permanent, variable } = combination
   const { geometry, vertical, section } = state
   const { sinFall, cosFall } = geometry
   const effect = factoredThrust(state, permanent, variable)
@@ -39,8 +47,16 @@ export function partialSliding(state: SectionState, which: 1 | 2): DemandAndResi
     effect * sinFall
   return {
     demand: effect * cosFall + (vertical.self - permanent * lifts) * sinFall,
-    resistance: (section.ground.friction / friction) * normal,
+    resistance: frictionResistance(
+      section.ground,
+      { normal, length: geometry.base },
+      strengthFactors(combination),
+    ),
   }
+}
+
+function strengthFactors({ friction, cohesion = 1 }: Combination): StrengthFactors {
+  return { friction, cohesion }
 }
 
 function factoredThrust({ horizontal }: SectionState, permanent: number, variable: number): number {
@@ -59,7 +75,7 @@ function factoredThrust({ horizontal }: SectionState, permanent: number, variabl
  * @see EN 1997-1:2004+A1:2013, 2.4.6.1(6)P and Annex A.
  */
 export function partialPairs(state: SectionState): StabilityPairs {
-  const { section, horizontal, vertical, grip } = state
+  const { section, horizontal, vertical } = state
   const { still, dry, current, wave, debris } = horizontal
   const first = partialSliding(state, 1)
   const second = partialSliding(state, 2)
@@ -81,7 +97,7 @@ export function partialPairs(state: SectionState): StabilityPairs {
     },
     skirt: {
       demand: factoredThrust(state, COMBINATION_2.permanent, COMBINATION_2.variable),
-      resistance: grip / COMBINATION_2.friction,
+      resistance: state.gripWith(strengthFactors(COMBINATION_2)),
     },
     fabric: {
       demand: COMBINATION_1.permanent * skinDemand(state),

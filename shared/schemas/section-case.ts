@@ -24,6 +24,14 @@ function absent(path: NumericPath) {
   return z.number().nullable().default(null).meta(describe(path))
 }
 
+/** A number that most cases do not have: left out, it stays left out. */
+function seldom(path: NumericPath) {
+  return z
+    .number()
+    .nullish()
+    .meta({ ...describe(path), default: null })
+}
+
 function describe(path: NumericPath) {
   const { min, max, minExcluded, unit, meaning } = fieldRange(path)
   const upper = typeof max === 'number' ? max : `${max.times} × ${max.of}`
@@ -55,6 +63,7 @@ export const sectionCaseSchema = z
       suitable: z.boolean().default(true).meta({ description: 'False: loose gravel, bare mud' }),
       permeability: absent('ground.permeability'),
       layerThickness: absent('ground.layerThickness'),
+      undrainedStrength: seldom('ground.undrainedStrength'),
     }),
     uplift: z
       .strictObject({

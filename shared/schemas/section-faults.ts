@@ -46,7 +46,7 @@ export function sectionFaults(section: SectionCase): readonly Fault[] {
   const read = (path: NumericPath): unknown => valueAt(section, path)
   const outside = NUMERIC_PATHS.flatMap((path) => {
     const value = read(path)
-    if (value === null && fieldRange(path).default === null) return []
+    if ((value ?? null) === null && fieldRange(path).default === null) return []
     const range = resolveRange(path, read)
     return isInRange(value as number, range) ? [] : [rangeFault(path, value, range)]
   })

@@ -94,6 +94,14 @@ export const SECTION_RANGES = {
     default: null,
     meaning: 'Thickness of the pervious layer; needed for seepage',
   },
+  'ground.undrainedStrength': {
+    min: 0,
+    max: 1_000_000,
+    minExcluded: true,
+    unit: 'Pa',
+    default: null,
+    meaning: 'Undrained strength of soft ground; left out: sliding is friction alone',
+  },
   'uplift.edgeFactor': {
     min: 0,
     max: 1,

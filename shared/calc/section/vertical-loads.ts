@@ -1,6 +1,7 @@
 import type { SectionCase } from '../../schemas/section-case'
 import { tubeOverhang } from '../hydrostatics/tube-overhang'
-import { upliftForce, type Uplift } from '../uplift/uplift-force'
+import { modelledPressure, type BasePressure } from '../uplift/base-pressure'
+import type { Uplift } from '../uplift/uplift-force'
 import type { SectionGeometry } from './section-geometry'
 
 /** What holds the barrier down and what lifts it, per metre run. */
@@ -24,27 +25,25 @@ export interface VerticalLoads {
 }
 
 /**
- * Vertical loads and their moments about the dry toe:
+ * Vertical loads and their moments about the dry toe, with the pressure under the base as the case
+ * models it, or as it was found elsewhere:
  *
  *     M_Ww = ρ g [h (b L_w + L_w²/2) − sin β (b L_w²/2 + L_w³/3)] − ρ g M_o
  *     M_Wb = W_b b / 2
  */
-export function verticalLoads(section: SectionCase, geometry: SectionGeometry): VerticalLoads {
-  const { barrier, water, uplift, gravity } = section
-  const { unitWeight, depth: h, sinFall, wettedSkirt: l, edgeDepth, base } = geometry
+export function verticalLoads(
+  section: SectionCase,
+  geometry: SectionGeometry,
+  pressure: BasePressure = modelledPressure(section, geometry),
+): VerticalLoads {
+  const { barrier, water, gravity } = section
+  const { unitWeight, depth: h, sinFall, wettedSkirt: l } = geometry
   const { diameter, contactWidth: b } = barrier
   const wet = tubeOverhang(diameter, b, h)
   const lift = unitWeight * wet.area
   const dryLift = unitWeight * tubeOverhang(diameter, b, water.dryDepth).area
   const skirtWater = unitWeight * (l * h - 0.5 * l ** 2 * sinFall)
   const self = barrier.mass * gravity
-  const pressedUp = upliftForce({
-    uplift,
-    edgeDepth,
-    dryDepth: water.dryDepth,
-    base,
-    unitWeight,
-  })
   const onSkirt = h * (b * l + l ** 2 / 2) - sinFall * ((b * l ** 2) / 2 + l ** 3 / 3)
   return {
     skirtWater,
@@ -52,8 +51,8 @@ export function verticalLoads(section: SectionCase, geometry: SectionGeometry): 
     lift,
     dryLift,
     self,
-    uplift: pressedUp,
-    net: skirtWater - lift + self - dryLift - pressedUp.force,
+    uplift: pressure.uplift,
+    net: skirtWater - lift + self - dryLift - pressure.uplift.force,
     waterMoment: unitWeight * (onSkirt - wet.moment),
     selfMoment: (self * b) / 2,
   }
