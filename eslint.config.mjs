@@ -95,6 +95,22 @@ export default tseslint.config(
     },
   },
   {
+    files: ['shared/derivation/**/*.ts'],
+    rules: {
+      'no-restricted-imports': [
+        'error',
+        {
+          patterns: [
+            {
+              regex: '^(?!zod$|mathjs$|\\.)',
+              message: 'shared/derivation imports only zod, mathjs and shared/',
+            },
+          ],
+        },
+      ],
+    },
+  },
+  {
     files: ['server/**/*.ts'],
     ignores: ['server/auth/**', 'server/db/**', 'server/**/*.queries.ts'],
     rules: { 'no-restricted-imports': ['error', { patterns: [noLucia, noDrizzle] }] },

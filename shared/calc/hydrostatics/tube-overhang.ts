@@ -23,17 +23,37 @@ export interface TubeOverhang {
 export function tubeOverhang(diameter: number, contactWidth: number, depth: number): TubeOverhang {
   const radius = diameter / 2
   const halfStrip = contactWidth / 2
-  const reach = Math.sqrt(Math.max(0, radius ** 2 - halfStrip ** 2))
-  const lower = -reach
-  const upper = Math.min(Math.min(depth, diameter) - radius, reach)
-  if (upper <= lower) return { area: 0, moment: 0 }
+  const bounds = overhangBounds(diameter, contactWidth, depth)
+  if (bounds === null) return { area: 0, moment: 0 }
 
+  const { lower, upper, underArc } = bounds
   const span = upper - lower
-  const underArc = arcIntegral(radius, upper) - arcIntegral(radius, lower)
   const area = underArc - halfStrip * span
   const squared =
     (radius ** 2 + halfStrip ** 2) * span - (upper ** 3 - lower ** 3) / 3 - contactWidth * underArc
   return { area, moment: contactWidth * area + squared / 2 }
+}
+
+/** The part of the circle that hangs over the weld line under water, from its centre up [m]. */
+export interface OverhangBounds {
+  readonly lower: number
+  readonly upper: number
+  /** Area between the upright axis and the circle from `lower` to `upper` [m²]. */
+  readonly underArc: number
+}
+
+/** Bounds of the overhang; null where the water does not reach it. */
+export function overhangBounds(
+  diameter: number,
+  contactWidth: number,
+  depth: number,
+): OverhangBounds | null {
+  const radius = diameter / 2
+  const reach = Math.sqrt(Math.max(0, radius ** 2 - (contactWidth / 2) ** 2))
+  const upper = Math.min(Math.min(depth, diameter) - radius, reach)
+  if (upper <= -reach) return null
+  const underArc = arcIntegral(radius, upper) - arcIntegral(radius, -reach)
+  return { lower: -reach, upper, underArc }
 }
 
 /** ∫ √(R² − s²) ds. */

@@ -1,0 +1,36 @@
+import { evaluateSection } from '../checks/evaluate-section'
+import type { SectionCase } from '../schemas/section-case'
+
+/** Right sides of the lines that a search over all checks gives. */
+export const LARGEST_HOLDING = 'largest(h, u(h) <= 1)'
+export const SMALLEST_HOLDING = 'smallest(h, u(h) <= 1)'
+
+/** The search ends when it has the edge to 1e-7 m; a little beyond it the section must fail. */
+const BEYOND = 1.05e-7
+
+/** How far the utilisation at the edge may be from 1, unless the resistance ends there. */
+const UTILISATION_BOUND = 1e-3
+
+function at(section: SectionCase, depth: number) {
+  const evaluation = evaluateSection({ ...section, water: { ...section.water, depth } })
+  const governing = evaluation[evaluation.governs]
+  return { holds: evaluation.verdict !== 'fails', used: governing?.utilisation ?? null }
+}
+
+/**
+ * Substitutes a depth into all checks: at it they are met, 0.1 µm beyond it one is not, and the one
+ * that governs is used 1 ± 1e-3 there, or has no resistance left beyond.
+ *
+ * @param depth Depth of water [m].
+ * @param towards 1: the upper end of what holds; −1: the lower end.
+ * @returns null where it agrees, else what does not.
+ */
+export function holdsToFault(section: SectionCase, depth: number, towards: 1 | -1): string | null {
+  const here = at(section, depth)
+  const beyond = at(section, depth + towards * BEYOND)
+  if (!here.holds) return 'the checks are not met at this depth'
+  if (beyond.holds) return 'the checks are still met beyond this depth'
+  const isContinuous = here.used !== null && Math.abs(here.used - 1) <= UTILISATION_BOUND
+  if (isContinuous || beyond.used === null || beyond.used > 1 + UTILISATION_BOUND) return null
+  return 'the utilisation at this depth is not 1'
+}

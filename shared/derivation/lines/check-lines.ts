@@ -1,0 +1,46 @@
+import type { CheckId } from '../../schemas/check-ids'
+import type { GroupId } from '../line'
+import type { SourceId } from '../sources'
+import type { LineContext } from './context'
+
+/** What one check compares, as expressions. */
+export interface ComparedAs {
+  readonly check: Exclude<CheckId, 'freeboard' | 'ground'>
+  readonly group: GroupId
+  readonly resistance: string
+  readonly demand: string
+  /** Endings of the symbols `FS_…`, `n_…`, `u_…`. */
+  readonly suffix: string
+  readonly source?: SourceId
+}
+
+/**
+ * Factor and utilisation of a check: FS = R / E, u = n E / R. Where nothing acts, or nothing
+ * resists, or the basis does not ask, the line is left out and the summary says why.
+ */
+export function writeCheck({ book, result }: LineContext, compared: ComparedAs): void {
+  const { check, group, resistance, demand, suffix, source = 'basis' } = compared
+  const answer = result[check]
+  if (answer.factor !== null) {
+    book.line(group, {
+      id: `${check}Factor`,
+      symbol: `FS_${suffix}`,
+      formula: `${resistance} / ${demand}`,
+      value: answer.factor,
+      kind: 'ratio',
+      source,
+      check,
+    })
+  }
+  if (answer.required === null || answer.utilisation === null || answer.factor === null) return
+  book.given(`n_${suffix}`, answer.required, 'ratio')
+  book.line(group, {
+    id: `${check}Used`,
+    symbol: `u_${suffix}`,
+    formula: `n_${suffix} * ${demand} / ${resistance}`,
+    value: answer.utilisation,
+    kind: 'ratio',
+    source,
+    check,
+  })
+}
