@@ -50,6 +50,15 @@ const DISPLAY_UNITS = {
     metric: { label: 'kN·m/m', factor: 1000, decimals: 2 },
     us: { label: 'lbf·ft/ft', factor: POUND_FORCE, decimals: 0 },
   },
+  /** One addend of a sum of forces, fine enough to be added up by hand. */
+  forceTerm: {
+    metric: { label: 'N/m', factor: 1, decimals: 1 },
+    us: { label: 'lbf/ft', factor: POUND_FORCE / FOOT, decimals: 2 },
+  },
+  momentTerm: {
+    metric: { label: 'N·m/m', factor: 1, decimals: 1 },
+    us: { label: 'lbf·ft/ft', factor: POUND_FORCE, decimals: 2 },
+  },
   mass: {
     metric: { label: 'kg', factor: 1, decimals: 0 },
     us: { label: 'lb', factor: POUND, decimals: 0 },

@@ -1,6 +1,7 @@
 import type { HorizontalLoads } from '../calc/section/horizontal-loads'
 import type { SectionCase } from '../schemas/section-case'
 import { compare, isWorse } from './compare'
+import { globalPairs } from './global-checks'
 import {
   COMBINATION_1,
   COMBINATION_2,
@@ -50,6 +51,8 @@ export interface CheckTerms {
   readonly friction: number
   /** What it is divided by: the partial factor on tan φ; 1 with global factors. */
   readonly frictionFactor: number
+  /** What soft ground bears at most [N/m], where that is less: then it is the resistance. */
+  readonly softGround: number | null
 }
 
 /** Checks that are sums of terms. */
@@ -61,7 +64,8 @@ const GLOBAL: Combination = { permanent: 1, variable: 1, friction: 1 }
 /**
  * Every term that enters demand and resistance of a check, in the form in which `globalPairs` and
  * `partialPairs` compute them: the sum of `adds` is the demand; that of the resistance, times
- * friction over its factor, is the resistance. Terms that are zero are left out.
+ * friction over its factor, is the resistance, unless soft ground bears less. Terms that are zero are
+ * left out.
  *
  * @remarks Expects a case inside `SECTION_RANGES`.
  */
@@ -139,10 +143,27 @@ function slidingTerms(state: SectionState): CheckTerms {
     ]),
     friction: section.ground.friction,
     frictionFactor: friction,
+    softGround: softGroundLimit(state, combination),
   }
 }
 
-const UNMULTIPLIED = { combination: null, friction: 1, frictionFactor: 1 } as const
+/** The resistance where the undrained strength of soft ground bounds it. */
+function softGroundLimit(state: SectionState, combination: 1 | 2 | null): number | null {
+  const { ground } = state.section
+  const pairOf = (of: SectionState) =>
+    combination === null ? globalPairs(of).sliding : partialSliding(of, combination)
+  if ((ground.undrainedStrength ?? null) === null) return null
+  const rubbing = { ...state.section, ground: { ...ground, undrainedStrength: null } }
+  const { resistance } = pairOf(state)
+  return resistance < pairOf({ ...state, section: rubbing }).resistance ? resistance : null
+}
+
+const UNMULTIPLIED = {
+  combination: null,
+  friction: 1,
+  frictionFactor: 1,
+  softGround: null,
+} as const
 
 function overturningTerms(state: SectionState): CheckTerms {
   const { basis, horizontal, vertical } = state
@@ -182,12 +203,16 @@ function flotationTerms(state: SectionState): CheckTerms {
   }
 }
 
+/** On soft ground the grip already carries its partial factors. */
 function skirtTerms(state: SectionState): CheckTerms {
-  const factors = state.basis.format === 'partial' ? COMBINATION_2 : GLOBAL
+  const { basis, grip, gripWith, section, horizontal } = state
+  const factors = basis.format === 'partial' ? COMBINATION_2 : GLOBAL
+  const isSoft = (section.ground.undrainedStrength ?? null) !== null
+  const { friction, cohesion = 1 } = factors
   return {
     ...UNMULTIPLIED,
-    demand: termsOf(state, loadDrafts(state.horizontal, 'force', factors)),
-    resistance: termsOf(state, [['grip', state.grip, 1]]),
-    frictionFactor: factors.friction,
+    demand: termsOf(state, loadDrafts(horizontal, 'force', factors)),
+    resistance: termsOf(state, [['grip', isSoft ? gripWith({ friction, cohesion }) : grip, 1]]),
+    frictionFactor: isSoft ? 1 : friction,
   }
 }

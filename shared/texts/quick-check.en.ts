@@ -126,16 +126,12 @@ export const quickCheckTexts = {
   },
   working: {
     sliding: 'The loads along the ground come to {demand}; friction resists with {resistance}.',
-    slidingFrom:
-      'Thrust {thrust}. Water on the skirt {onSkirt}, own weight {self}, less water under the skirt {uplift}: {net} on the ground, times friction {friction}.',
     overturning:
       'Moment of the loads {demand}; moment that resists {resistance}, about the dry toe.',
     overturningFrom:
       'As gross ratio, for information: {gross}. The method compares net moments, because the two faces of one skirt are one source.',
     flotation:
       'Water under the skirt lifts with {demand}; water and weight press with {resistance}.',
-    flotationFrom:
-      'Water on the skirt {onSkirt}, of which the tube’s own lift of {lift} is already taken off.',
     skirt: 'The loads pull with {demand}; the skirt that stays flat resists with {resistance}.',
     skirtFrom: 'Of {skirt} of skirt {free} lifts off the ground with the tube.',
     fabric: 'The skin pulls with {demand}; the fabric carries {resistance}.',

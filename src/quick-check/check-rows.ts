@@ -1,5 +1,6 @@
 import type { SectionEvaluation } from '@shared/checks/evaluate-section'
 import { checkBasis } from '@shared/catalogue/check-bases'
+import type { SummedCheck } from '@shared/checks/check-terms'
 import type { SectionCase } from '@shared/schemas/section-case'
 import type { CheckId, Verdict } from '@shared/schemas/section-result'
 import type { Message } from '@shared/texts/format-text'
@@ -16,8 +17,16 @@ export interface CheckRow {
   readonly required: Quantity | null
   /** Share of what is allowed; null where nothing resists. */
   readonly utilisation: number | null
-  /** Demand, resistance and where they come from. */
-  readonly workings: readonly Message[]
+  /** Demand, resistance and where they come from; asked for once the check is opened. */
+  readonly workings: () => readonly Message[]
+  /** The check as sums of terms; null where it is none. */
+  readonly sums: SummedRow | null
+}
+
+/** What the sums of a check are worked out from. */
+export interface SummedRow {
+  readonly check: SummedCheck
+  readonly section: SectionCase
 }
 
 const ORDER: readonly CheckId[] = [
@@ -42,9 +51,16 @@ export function checkRows(evaluation: SectionEvaluation, section: SectionCase): 
       main: mainFigure(evaluation, id, section),
       required: required === null ? null : { value: required, kind },
       utilisation,
-      workings: workingsOf(evaluation, section, id),
+      workings: () => workingsOf(evaluation, section, id),
+      sums: isSummed(id) && !isReversed(section) ? { check: id, section } : null,
     }
   })
+}
+
+const SUMMED: readonly CheckId[] = ['sliding', 'overturning', 'flotation', 'skirt']
+
+function isSummed(id: CheckId): id is SummedCheck {
+  return SUMMED.includes(id)
 }
 
 /** A check that passes says nothing about a barrier whose skirt is off. */
@@ -118,36 +134,23 @@ function freeboardWorkings(evaluation: SectionEvaluation, section: SectionCase):
 
 type Explained = Exclude<CheckId, 'freeboard' | 'ground'>
 
+/** What the sums of a check do not say. */
 function sourceOf(
-  { thrust, vertical, loadedShape, overturningGross }: SectionEvaluation,
-  { ground, barrier }: SectionCase,
+  { loadedShape, overturningGross }: SectionEvaluation,
+  { barrier }: SectionCase,
   id: Explained,
 ): Message[] {
-  const force = (value: number): Quantity => ({ value, kind: 'forcePerLength' })
+  if (id === 'sliding' || id === 'flotation') return []
   const key = `quickCheck.working.${id}From`
-  const { net, uplift, waterOnSkirt, self, lift } = vertical
-  if (id === 'sliding')
-    return [
-      {
-        key,
-        values: {
-          thrust: force(thrust.total),
-          onSkirt: force(waterOnSkirt),
-          self: force(self),
-          uplift: force(uplift),
-          net: force(net),
-          friction: { value: ground.friction, kind: 'ratio' },
-        },
-      },
-    ]
-  if (id === 'flotation')
-    return [{ key, values: { onSkirt: force(waterOnSkirt), lift: force(lift) } }]
   if (id === 'overturning')
     return overturningGross === null
       ? []
       : [{ key, values: { gross: { value: overturningGross, kind: 'ratio' } } }]
   if (!loadedShape.solved) return [{ key: 'quickCheck.working.notStanding' }]
-  if (id === 'fabric') return [{ key, values: { tension: force(loadedShape.skinTension) } }]
+  if (id === 'fabric')
+    return [
+      { key, values: { tension: { value: loadedShape.skinTension, kind: 'forcePerLength' } } },
+    ]
   const skirt: Quantity = { value: barrier.skirtLength, kind: 'length' }
   return [{ key, values: { skirt, free: { value: loadedShape.freeSkirt, kind: 'length' } } }]
 }

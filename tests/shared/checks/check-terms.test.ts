@@ -9,8 +9,11 @@ import type { SectionCase } from '../../../shared/schemas/section-case'
 const CHECKS: readonly SummedCheck[] = ['sliding', 'overturning', 'flotation', 'skirt']
 
 /** Everything at once: slope, dry water, current, waves and debris. */
-function caseOf(basis: BasisId, change: { fall?: number; depth?: number } = {}): SectionCase {
-  const { fall = 0.04, depth = 0.42 } = change
+function caseOf(
+  basis: BasisId,
+  change: { fall?: number; depth?: number; soft?: number | null } = {},
+): SectionCase {
+  const { fall = 0.04, depth = 0.42, soft = null } = change
   return parseSectionCase({
     barrier: {
       diameter: 0.7,
@@ -20,7 +23,7 @@ function caseOf(basis: BasisId, change: { fall?: number; depth?: number } = {}):
       airPressure: 15_000,
       fabricStrength: 60_000,
     },
-    ground: { friction: 0.45, fall },
+    ground: { friction: 0.45, fall, undrainedStrength: soft },
     uplift: { edgeFactor: 0.8 },
     water: { depth, dryDepth: 0.06, currentSpeed: 0.8, waveHeight: 0.08, wavePeriod: 2 },
     debris: { force: 2000 },
@@ -29,10 +32,10 @@ function caseOf(basis: BasisId, change: { fall?: number; depth?: number } = {}):
 }
 
 function addedUp(section: SectionCase, check: SummedCheck) {
-  const { demand, resistance, friction, frictionFactor } = checkTerms(section, check)
+  const { demand, resistance, friction, frictionFactor, softGround } = checkTerms(section, check)
   return {
     demand: sumOfTerms(demand),
-    resistance: (sumOfTerms(resistance) * friction) / frictionFactor,
+    resistance: softGround ?? (sumOfTerms(resistance) * friction) / frictionFactor,
   }
 }
 
@@ -44,8 +47,9 @@ describe('the terms of a check', () => {
         fc.constantFrom(...CHECKS),
         fc.double({ min: -0.1, max: 0.1, noNaN: true }),
         fc.double({ min: 0.08, max: 1, noNaN: true }),
-        (basis, check, fall, depth) => {
-          const section = caseOf(basis, { fall, depth })
+        fc.option(fc.double({ min: 1, max: 2000, noNaN: true })),
+        (basis, check, fall, depth, soft) => {
+          const section = caseOf(basis, { fall, depth, soft })
           const { demand, resistance } = evaluateSection(section).workings[check]
           const sums = addedUp(section, check)
           expect(sums.demand).toBeCloseTo(demand, 6)

@@ -1,0 +1,45 @@
+import { describe, expect, it } from 'vitest'
+import { textResolver } from '../../../shared/texts/format-text'
+import { sectionDetails } from '../../../shared/texts/section-details.en'
+import { INITIAL_VALUES } from '../../../src/quick-check/address'
+import { sectionCase, type FieldValues } from '../../../src/quick-check/case-input'
+import { checkSums } from '../../../src/quick-check/check-sums'
+import { INITIAL_CHOICES, type Choices } from '../../../src/quick-check/choices'
+import { givenText } from '../../../src/quick-check/field-text'
+
+const say = textResolver(sectionDetails.en, 'metric')
+
+function linesOf(values: Partial<FieldValues>, choices: Partial<Choices> = {}) {
+  const section = sectionCase({
+    values: { ...INITIAL_VALUES, ...values },
+    choices: { ...INITIAL_CHOICES, ...choices },
+  })
+  const sums = checkSums(section, 'sliding', (value, kind) => givenText(value, kind, 'metric'))
+  const line = ({ name, how, adds }: (typeof sums.sides)[number]['rows'][number]) =>
+    [say(name), how.map(say).join(' × '), say(adds)].join('|').replace(/\u00a0/g, ' ')
+  return {
+    lines: sums.sides.flatMap(({ rows, totals }) => [...rows, ...totals].map(line)),
+    notes: sums.notes.map(say),
+  }
+}
+
+describe('the sums behind sliding', () => {
+  it('list plain figures on level ground with global factors', () => {
+    // Thrust ½ ρ g h² = 865.24 N/m (hydrostatics); own weight 4.8 × 9.81 = 47.09 N/m.
+    const { lines, notes } = linesOf({})
+    expect(lines[0]).toBe('Still water||865.2 N/m')
+    expect(lines).toContain('Own weight||47.1 N/m')
+    expect(lines.at(-1)).toMatch(/^times friction 0\.45\|\|/)
+    expect(notes).toEqual([])
+  })
+
+  it('name the factors and the slope where there are any', () => {
+    const { lines, notes } = linesOf({ fall: 0.03, dryDepth: 0.05 }, { basis: 'partial-ec7' })
+    const of = (name: string) => lines.filter((line) => line.startsWith(name))
+    expect(of('Lift of the tube by the water on the dry side')).toHaveLength(2)
+    expect(of('Still water')[0]).toMatch(/865\.2 N\/m × cos β/)
+    expect(lines.at(-1)).toMatch(/^times friction 0\.45 \/ 1\.25\|\|/)
+    expect(notes[0]).toMatch(/^Combination 2 of EN 1997-1/)
+    expect(notes[1]).toContain('tan β = 3')
+  })
+})
