@@ -1,7 +1,7 @@
 import { computed, shallowReadonly, shallowRef, watch, type Ref } from 'vue'
 import type { ScenarioContent } from '@shared/schemas/scenario'
 import type { UnitSystem } from '@shared/units'
-import { inputAtPlace, withInputAtPlace, type NameTube } from '@/scenario/place-input'
+import { inputAtPlace, withInputAtPlace } from '@/scenario/place-input'
 import { placeOnLine, type PlaceOnLine, type SurveyedLine } from '@/scenario/place-on-line'
 import type { ScenarioState } from '@/scenario/scenario-state'
 import type { CaseInput, FieldValues } from '@/quick-check/case-input'
@@ -9,12 +9,13 @@ import { groupOf } from '@/quick-check/draft-fields'
 import { FIELD_IDS } from '@/quick-check/fields'
 import { useCaseDraft } from './useCaseDraft'
 import { useStepHistory } from './useStepHistory'
+import type { TubeBook } from '@/scenario/tube-book'
 
 export interface ScenarioDraftParts {
   readonly line: Readonly<Ref<SurveyedLine>>
   readonly initial: ScenarioState
   readonly units: Ref<UnitSystem>
-  readonly nameTube: NameTube
+  readonly tubes: TubeBook
   readonly isReadonly: Readonly<Ref<boolean>>
   readonly now?: () => number
 }
@@ -25,7 +26,7 @@ export interface ScenarioDraftParts {
  * whoever changed it.
  */
 export function useScenarioDraft(parts: ScenarioDraftParts) {
-  const { line, initial, units, nameTube, isReadonly, now } = parts
+  const { line, initial, units, tubes, isReadonly, now } = parts
   const history = useStepHistory<ScenarioState>(initial, now)
   const state = history.present
   const content = computed(() => state.value.content)
@@ -45,7 +46,7 @@ export function useScenarioDraft(parts: ScenarioDraftParts) {
 
   // Panels → scenario: the last input without a fault.
   watch(fields.valid, (input) => {
-    const next = withInputAtPlace(content.value, place.value, input, nameTube)
+    const next = withInputAtPlace(content.value, place.value, input, tubes)
     if (next !== content.value) changeState({ content: next }, changedFields(content.value, next))
   })
   // Scenario → panels: another place, an undone step, somebody else's version.

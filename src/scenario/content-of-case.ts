@@ -8,8 +8,9 @@ import {
   type CaseInput,
 } from '@/quick-check/case-input'
 import { assumptionFor, newContent, surfacesOf } from './new-content'
-import { namedBarrier, type NameTube } from './place-input'
+import { namedBarrier } from './place-input'
 import type { SurveyedLine } from './place-on-line'
+import type { TubeBook } from './tube-book'
 
 /** A line of one station, for a case without a survey. */
 export function lineOfCase(input: CaseInput, ground: number): SurveyedLine {
@@ -35,9 +36,9 @@ export const groundOfCase = groundLevel
 export function contentOfCase(
   input: CaseInput,
   line: SurveyedLine,
-  nameTube: NameTube,
+  tubes: TubeBook,
 ): ScenarioContent {
-  const start = newContent(line, nameTube)
+  const start = newContent(line, tubes)
   const section = sectionCase(input)
   const lowest = Math.min(...line.stations.map((station) => station.groundLevel))
   const ground = groundLevel(input) ?? lowest
@@ -49,7 +50,7 @@ export function contentOfCase(
     waterLevel: tidy(waterLevel(input) ?? lowest + depth),
     levelNow: now === null ? null : tidy(ground + now),
     dryLevel: dryDepth > 0 ? tidy(ground + dryDepth) : null,
-    sizes: start.sizes.map((run) => ({ ...run, barrier: barrierOfCase(input, nameTube) })),
+    sizes: start.sizes.map((run) => ({ ...run, barrier: barrierOfCase(input, tubes) })),
     grounds: surfacesOf(line).map((surface) =>
       surface === input.choices.surface ? { surface, ...assumed } : assumptionFor(surface),
     ),
@@ -65,9 +66,9 @@ export function contentOfCase(
   }
 }
 
-function barrierOfCase(input: CaseInput, nameTube: NameTube): ScenarioBarrier {
+function barrierOfCase(input: CaseInput, tubes: TubeBook): ScenarioBarrier {
   const { barrier } = sectionCase(input)
   const { statedHeight } = input.values
   const unnamed = { ...barrier, statedHeight, name: '', catalogueId: null, catalogueRevision: null }
-  return namedBarrier(unnamed, nameTube)
+  return namedBarrier(unnamed, tubes)
 }

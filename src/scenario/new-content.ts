@@ -4,12 +4,13 @@ import type { ScenarioBarrier, ScenarioContent } from '@shared/schemas/scenario'
 import { SECTION_RANGES } from '@shared/schemas/section-ranges'
 import { INITIAL_VALUES } from '@/quick-check/address'
 import { chainageRange, type SurveyedLine } from './place-on-line'
-import type { NameTube } from './place-input'
+import type { TubeBook } from './tube-book'
 
 /** A tube of the catalogue as a scenario keeps it. */
-export function barrierOf(tube: CatalogueBarrier, nameTube: NameTube): ScenarioBarrier {
+export function barrierOf(tube: CatalogueBarrier, tubes: TubeBook): ScenarioBarrier {
   const { id, isExample: _, ...figures } = tube
-  return { ...figures, name: nameTube(tube.diameter), catalogueId: id, catalogueRevision: null }
+  const name = tubes.nameOf(tube.diameter)
+  return { ...figures, name, catalogueId: id, catalogueRevision: tubes.revisionOf(tube) }
 }
 
 /** What is assumed of a surface until somebody says otherwise. */
@@ -33,7 +34,7 @@ export function surfacesOf({ stations }: SurveyedLine): readonly string[] {
 export const FIRST_DEPTH = INITIAL_VALUES.depth!
 
 /** A first scenario of a line: one size from end to end, the water just over its lowest ground. */
-export function newContent(line: SurveyedLine, nameTube: NameTube): ScenarioContent {
+export function newContent(line: SurveyedLine, tubes: TubeBook): ScenarioContent {
   const { from, to } = chainageRange(line)
   const lowest = line.stations.reduce((a, b) => (b.groundLevel < a.groundLevel ? b : a))
   const tube = BARRIERS.find(({ diameter }) => diameter > FIRST_DEPTH * 1.5) ?? BARRIERS.at(-1)!
@@ -42,7 +43,7 @@ export function newContent(line: SurveyedLine, nameTube: NameTube): ScenarioCont
     levelNow: null,
     dryLevel: null,
     place: lowest.chainage,
-    sizes: [{ from, to, barrier: barrierOf(tube, nameTube), edgeFactor: null }],
+    sizes: [{ from, to, barrier: barrierOf(tube, tubes), edgeFactor: null }],
     grounds: surfacesOf(line).map(assumptionFor),
     fall: SECTION_RANGES['ground.fall'].default,
     uplift: { model: 'linear', edgeFactor: 1, diffusivity: null, time: null },

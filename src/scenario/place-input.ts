@@ -1,3 +1,4 @@
+import type { CatalogueBarrier } from '@shared/catalogue/barriers'
 import type { ScenarioBarrier, ScenarioContent, SizeRun } from '@shared/schemas/scenario'
 import { INITIAL_VALUES } from '@/quick-check/address'
 import type { CaseInput, FieldValues } from '@/quick-check/case-input'
@@ -5,6 +6,7 @@ import { CHOICES, INITIAL_CHOICES, OWN_SURFACE, type Choices } from '@/quick-che
 import { FIELD_IDS, type FieldId } from '@/quick-check/fields'
 import { matchingTube } from '@/quick-check/tube'
 import type { PlaceOnLine } from './place-on-line'
+import type { TubeBook } from './tube-book'
 
 /**
  * A scenario at a place as the panels of the Quick check show it. The water is not in it: a scenario
@@ -74,9 +76,6 @@ function choicesAt(content: ScenarioContent, { surface, assumption }: PlaceOnLin
   }
 }
 
-/** Names a barrier by its diameter [m], as it is kept. */
-export type NameTube = (diameter: number) => string
-
 /** Where a number of the panels goes in a scenario. */
 type Write = (content: ScenarioContent, value: number | null, place: PlaceOnLine) => ScenarioContent
 
@@ -117,7 +116,7 @@ export function withInputAtPlace(
   content: ScenarioContent,
   place: PlaceOnLine,
   input: CaseInput,
-  nameTube: NameTube,
+  tubes: TubeBook,
 ): ScenarioContent {
   const before = inputAtPlace(content, place)
   const changed = FIELD_IDS.filter((id) => input.values[id] !== before.values[id])
@@ -125,7 +124,7 @@ export function withInputAtPlace(
     (next, id) => WRITES[id]?.(next, input.values[id], place) ?? next,
     content,
   )
-  const named = written.sizes === content.sizes ? written : withName(written, place, nameTube)
+  const named = written.sizes === content.sizes ? written : withName(written, place, tubes)
   return withChoices(named, place, { from: before.choices, to: input.choices })
 }
 
@@ -201,22 +200,29 @@ function withRun(
 function withName(
   content: ScenarioContent,
   { runIndex }: PlaceOnLine,
-  nameTube: NameTube,
+  tubes: TubeBook,
 ): ScenarioContent {
   return withRun(content, runIndex, (run) => ({
     ...run,
-    barrier: namedBarrier(run.barrier, nameTube),
+    barrier: namedBarrier(run.barrier, tubes),
   }))
 }
 
 /** Name and origin of a barrier by its figures. */
-export function namedBarrier(barrier: ScenarioBarrier, nameTube: NameTube): ScenarioBarrier {
+export function namedBarrier(barrier: ScenarioBarrier, tubes: TubeBook): ScenarioBarrier {
   const tube = matchingTube((id) => barrier[id as keyof ScenarioBarrier] as number | null)
-  const isSame = tube !== null && tube.id === barrier.catalogueId
+  const origin = tube
+    ? originOf(tube, barrier, tubes)
+    : { catalogueId: null, catalogueRevision: null }
   return {
     ...barrier,
-    name: nameTube(barrier.diameter),
-    catalogueId: tube?.id ?? null,
-    catalogueRevision: isSame ? barrier.catalogueRevision : null,
+    name: tubes.nameOf(barrier.diameter),
+    ...origin,
   }
+}
+
+/** A tube that was in the scenario keeps the revision that it came with. */
+function originOf(tube: CatalogueBarrier, barrier: ScenarioBarrier, tubes: TubeBook) {
+  const kept = tube.id === barrier.catalogueId ? barrier.catalogueRevision : null
+  return { catalogueId: tube.id, catalogueRevision: kept ?? tubes.revisionOf(tube) }
 }

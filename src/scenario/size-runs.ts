@@ -1,8 +1,8 @@
 import { BARRIERS } from '@shared/catalogue/barriers'
 import type { ScenarioContent, SizeRun } from '@shared/schemas/scenario'
 import { assumptionFor, barrierOf } from './new-content'
-import type { NameTube } from './place-input'
 import type { PlaceOnLine } from './place-on-line'
+import type { TubeBook } from './tube-book'
 
 /** The runs with one of them changed. */
 export function withRunAt(
@@ -17,9 +17,9 @@ export function withRunAt(
 export function withTubeAt(
   { sizes }: ScenarioContent,
   { section, run }: PlaceOnLine,
-  nameTube: NameTube,
+  tubes: TubeBook,
 ): SizeRun[] {
-  const barrier = run?.barrier ?? sizes.at(-1)?.barrier ?? barrierOf(BARRIERS[0]!, nameTube)
+  const barrier = run?.barrier ?? sizes.at(-1)?.barrier ?? barrierOf(BARRIERS[0]!, tubes)
   return [...sizes, { from: section.from, to: section.to, barrier, edgeFactor: null }]
 }
 
@@ -28,10 +28,10 @@ export function withCatalogueTube(
   sizes: readonly SizeRun[],
   index: number,
   tubeId: string,
-  nameTube: NameTube,
+  tubes: TubeBook,
 ): SizeRun[] {
   const tube = BARRIERS.find(({ id }) => id === tubeId)
-  return tube ? withRunAt(sizes, index, { barrier: barrierOf(tube, nameTube) }) : [...sizes]
+  return tube ? withRunAt(sizes, index, { barrier: barrierOf(tube, tubes) }) : [...sizes]
 }
 
 /** Assumptions with one for a surface that had none. */

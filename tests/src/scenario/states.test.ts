@@ -1,4 +1,5 @@
 import { describe, expect, it } from 'vitest'
+import { BARRIERS } from '../../../shared/catalogue/barriers'
 import type { CaseInput } from '../../../src/quick-check/case-input'
 import { disagreements, mergedState, reasonablePicks } from '../../../src/scenario/merge-states'
 import { contentOfCase, lineOfCase } from '../../../src/scenario/content-of-case'
@@ -8,6 +9,8 @@ import { placeOnLine } from '../../../src/scenario/place-on-line'
 import { checkedPlace, gapAt } from '../../../src/scenario/checked-place'
 import { differingFields } from '../../../src/scenario/scenario-fields'
 import type { ScenarioState } from '../../../src/scenario/scenario-state'
+import { withCatalogueTube } from '../../../src/scenario/size-runs'
+import { tubeBook } from '../../../src/scenario/tube-book'
 import { readAddress } from '../../../src/quick-check/address'
 import { sectionCase } from '../../../src/quick-check/case-input'
 import { assumptionOf, caseAt } from '../../../shared/checks/place-case'
@@ -16,6 +19,8 @@ import { scenarioFaults } from '../../../shared/schemas/scenario-faults'
 import { LOW_ROAD_SURVEY, lowRoadContent, sizeRun } from '../../support/ferry-quay'
 
 const name = (diameter: number) => `Tube ${diameter.toFixed(2)} m`
+const entries = BARRIERS.map((tube) => ({ ...tube, source: 'Example', revision: 3 }))
+const tubes = tubeBook(name, { barriers: entries })
 const base: ScenarioState = { name: 'Tonight', note: '', content: lowRoadContent() }
 const withContent = (change: Partial<ScenarioState['content']>): ScenarioState => ({
   ...base,
@@ -116,7 +121,7 @@ describe('a scenario at a place', () => {
 
   it('changes nothing where nothing was changed in the panels', () => {
     const place = at(45)
-    expect(withInputAtPlace(content, place, inputAtPlace(content, place), name)).toBe(content)
+    expect(withInputAtPlace(content, place, inputAtPlace(content, place), tubes)).toBe(content)
   })
 
   it.each([
@@ -130,7 +135,7 @@ describe('a scenario at a place', () => {
   ] as const)('keeps %s where it belongs and nowhere else', (field, value, path) => {
     const place = at(45)
     const input = inputAtPlace(content, place)
-    const next = withInputAtPlace(content, place, change(input, { [field]: value }), name)
+    const next = withInputAtPlace(content, place, change(input, { [field]: value }), tubes)
     const parts = path.split(/[.[\]]+/).filter(Boolean)
     const read = (of: unknown) =>
       parts.reduce<unknown>((node, key) => (node as Record<string, unknown>)[key], of)
@@ -144,7 +149,7 @@ describe('a scenario at a place', () => {
       content,
       at(45),
       change(inputAtPlace(content, at(45)), { edgeFactor: 0.2 }),
-      name,
+      tubes,
     )
     expect(own.sizes[1]?.edgeFactor).toBe(0.2)
     expect(own.uplift.edgeFactor).toBe(1)
@@ -152,7 +157,7 @@ describe('a scenario at a place', () => {
       content,
       at(20),
       change(inputAtPlace(content, at(20)), { edgeFactor: 0.2 }),
-      name,
+      tubes,
     )
     expect(rest.uplift.edgeFactor).toBe(0.2)
     expect(rest.sizes).toEqual(content.sizes)
@@ -164,17 +169,46 @@ describe('a scenario at a place', () => {
       content,
       place,
       change(inputAtPlace(content, place), { diameter: 0.8 }),
-      name,
+      tubes,
     )
     expect(own.sizes[0]?.barrier).toMatchObject({ name: 'Tube 0.80 m', catalogueId: null })
-    const back = withInputAtPlace(own, at(20, own), inputAtPlace(content, place), name)
+    const back = withInputAtPlace(own, at(20, own), inputAtPlace(content, place), tubes)
     expect(back.sizes[0]?.barrier).toMatchObject({ name: 'Tube 0.70 m', catalogueId: 'tube-0.70' })
+    expect(own.sizes[0]?.barrier.catalogueRevision).toBeNull()
+    expect(back.sizes[0]?.barrier.catalogueRevision).toBe(3)
+  })
+
+  it('keeps the revision that a tube came with, and notes that of a tube newly chosen', () => {
+    const chosen = withCatalogueTube(content.sizes, 0, 'tube-1.00', tubes)
+    expect(chosen.map(({ barrier }) => barrier.catalogueRevision)).toEqual([
+      3,
+      ...content.sizes.slice(1).map(() => 1),
+    ])
+    const place = at(45)
+    const next = withInputAtPlace(
+      content,
+      place,
+      change(inputAtPlace(content, place), { edgeFactor: 0.2 }),
+      tubes,
+    )
+    expect(next.sizes[1]?.barrier.catalogueRevision).toBe(1)
+  })
+
+  it('notes no revision where the catalogue has other figures, or has not answered', () => {
+    const heavier = entries.map((tube) => ({ ...tube, mass: tube.mass + 1 }))
+    for (const catalogue of [{ barriers: heavier }, undefined]) {
+      const made = newContent(LOW_ROAD_SURVEY, tubeBook(name, catalogue))
+      expect(made.sizes[0]?.barrier).toMatchObject({
+        catalogueId: 'tube-0.70',
+        catalogueRevision: null,
+      })
+    }
   })
 })
 
 describe('a new scenario', () => {
   it('can be computed on the line and begins at its lowest ground', () => {
-    const content = newContent(LOW_ROAD_SURVEY, name)
+    const content = newContent(LOW_ROAD_SURVEY, tubes)
     expect(scenarioContentSchema.parse(content)).toEqual(content)
     expect(scenarioFaults(content, LOW_ROAD_SURVEY)).toEqual([])
     expect(content).toMatchObject({ place: 45, waterLevel: 3.21 })
@@ -185,7 +219,7 @@ describe('a new scenario', () => {
       'v=1&water=level&level=3.35&groundlevel=2.87&friction=0.41&drydepth=0.1&wave=0.1&period=3',
     )
     const line = lineOfCase(input, 2.87)
-    const content = contentOfCase(input, line, name)
+    const content = contentOfCase(input, line, tubes)
     expect(scenarioContentSchema.parse(content)).toEqual(content)
     const section = checkedPlace(content, placeOnLine(line, content, 0))!.section
     const wanted = sectionCase(input)
@@ -200,7 +234,7 @@ describe('a new scenario', () => {
   })
 
   it('made of a depth counts it at the lowest ground of the line', () => {
-    const content = contentOfCase(readAddress('v=1&depth=0.5'), LOW_ROAD_SURVEY, name)
+    const content = contentOfCase(readAddress('v=1&depth=0.5'), LOW_ROAD_SURVEY, tubes)
     expect(content.waterLevel).toBe(3.29)
     expect(content.grounds.map(({ surface }) => surface).sort()).toEqual([
       'asphalt',
