@@ -8,6 +8,7 @@ import { openDatabase } from './db/client'
 import type { DemoSeed } from './db/demo-seed'
 import { prepareDatabase } from './db/prepare-database'
 import { ferryQuaySeed } from './demo/ferry-quay'
+import { ferryQuayStoreSeed } from './demo/ferry-quay-store'
 import { type Env, EnvironmentError, readEnv } from './env'
 import { createLogger } from './logger'
 import { startMailWorker } from './mail/mail-worker'
@@ -69,7 +70,7 @@ function start(): void {
 
 /** In this order: projects name the people who made them. */
 function demoSeeds({ passwords, now }: RouteParts): readonly DemoSeed[] {
-  return [demoPeopleSeed(passwords), ferryQuaySeed(now)]
+  return [demoPeopleSeed(passwords), ferryQuaySeed(now), ferryQuayStoreSeed(now)]
 }
 
 /** Their password stands on the sign-in page of every demonstration. */

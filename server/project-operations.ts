@@ -1,4 +1,5 @@
 import type { Operation } from './http/operation'
+import { depotsOperations } from './modules/depots/depots.routes'
 import { deskOperations } from './modules/desk/desk.routes'
 import { filesOperations } from './modules/files/files.routes'
 import type { FileWork } from './modules/files/files.service'
@@ -22,5 +23,6 @@ export function projectOperations(work: FileWork): readonly Operation[] {
     ...linesOperations(work),
     ...scenariosOperations(work),
     ...filesOperations(work),
+    ...depotsOperations(work),
   ]
 }

@@ -69,4 +69,5 @@ export const meta = sqliteTable('meta', {
 })
 
 export * from './tables/accounts'
+export * from './tables/depots'
 export * from './tables/projects'

@@ -1,5 +1,6 @@
 import type { MemberRole } from '../../shared/access/roles'
 import type { Station } from '../../shared/schemas/line'
+import type { LineEnds, LineMark } from '../../shared/schemas/mark'
 import type { Clock } from '../clock'
 import type { DemoSeed } from '../db/demo-seed'
 import { makeGauge } from '../modules/gauges/gauges.service'
@@ -14,6 +15,7 @@ import {
   LOW_ROAD_STATIONS,
   OFF_THE_GRAVEL_STATIONS,
 } from './ferry-quay-lines'
+import { JOINED_ENDS, LOW_ROAD_ENDS, LOW_ROAD_MARKS } from './ferry-quay-marks'
 import {
   BEHIND_THE_KERB_SCENARIOS,
   type DemoScenario,
@@ -45,6 +47,8 @@ interface DemoLine {
   readonly name: string
   readonly note: string
   readonly stations: readonly Station[]
+  readonly marks: readonly LineMark[]
+  readonly ends: LineEnds
   readonly scenarios: readonly DemoScenario[]
 }
 
@@ -54,6 +58,8 @@ const LINES: readonly DemoLine[] = [
     name: 'Low road',
     note: 'From the flood wall along the quay and Low road to high ground. Gravel at ch 142 to 148.',
     stations: LOW_ROAD_STATIONS,
+    marks: LOW_ROAD_MARKS,
+    ends: LOW_ROAD_ENDS,
     scenarios: LOW_ROAD_SCENARIOS,
   },
   {
@@ -61,6 +67,8 @@ const LINES: readonly DemoLine[] = [
     name: 'Low road, off the gravel',
     note: 'Low road as it can be laid: swung 3 m landward at ch 142 to 148, onto asphalt.',
     stations: OFF_THE_GRAVEL_STATIONS,
+    marks: LOW_ROAD_MARKS,
+    ends: LOW_ROAD_ENDS,
     scenarios: LOW_ROAD_SCENARIOS,
   },
   {
@@ -68,6 +76,8 @@ const LINES: readonly DemoLine[] = [
     name: 'Behind the kerb',
     note: 'Leaves Low road at ch 30 and meets it again at ch 70, landward of the lowest ground.',
     stations: BEHIND_THE_KERB_STATIONS,
+    marks: [],
+    ends: JOINED_ENDS,
     scenarios: BEHIND_THE_KERB_SCENARIOS,
   },
 ]
@@ -111,9 +121,10 @@ function seedGauges(deed: Deed): void {
   noteMade(deed, 'gauge', FERRY_QUAY.boardGauge, board.name)
 }
 
-function seedLine(deed: Deed, { id, name, note, stations, scenarios }: DemoLine): void {
-  const survey = { stations: [...stations], sectionLength: 10 }
-  makeLine(deed, FERRY_QUAY.project, { name, note, ...survey }, id)
+function seedLine(deed: Deed, line: DemoLine): void {
+  const { id, name, note, stations, scenarios, ends } = line
+  const survey = { stations: [...stations], sectionLength: 10, marks: [...line.marks] }
+  makeLine(deed, FERRY_QUAY.project, { name, note, ...survey, ends, background: null }, id)
   noteMade(deed, 'line', id, name)
   for (const { key, ...text } of scenarios) {
     const scenarioId = makeScenario(deed, { id, ...survey }, text, `${id}-${key}`)

@@ -37,6 +37,10 @@ export const ACCESS_RULES = {
     member: ['lead'],
     meaning: 'Leads look after members, archive and deletion',
   },
+  'keep-store': {
+    account: ['admin', 'engineer'],
+    meaning: 'Administrators and engineers keep the depots of their organisation',
+  },
   administer: {
     account: ['admin'],
     meaning: 'Administrators: people, organisations, audit trail, mail',

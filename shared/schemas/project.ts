@@ -3,6 +3,7 @@ import { MEMBER_ROLES } from '../access/roles'
 import { VERDICTS } from './section-result'
 import { timeZoneSchema } from './account'
 import { stationsSchema, stationSchema } from './line'
+import { backgroundSchema, DEFAULT_ENDS, lineEndsSchema, marksSchema } from './mark'
 import {
   listQuerySchema,
   momentSchema,
@@ -117,10 +118,16 @@ const lineFields = z.strictObject({
   note: noteSchema,
   sectionLength: z.number().min(1).max(100).meta({ unit: 'm' }),
   stations: stationsSchema,
+  marks: marksSchema,
+  ends: lineEndsSchema,
+  background: backgroundSchema.nullable(),
 })
 export const newLineSchema = lineFields.extend({
   note: noteSchema.default(''),
   sectionLength: lineFields.shape.sectionLength.default(10),
+  marks: marksSchema.default([]),
+  ends: lineEndsSchema.default(DEFAULT_ENDS),
+  background: lineFields.shape.background.default(null),
 })
 /** `PATCH …/lines/:lineId`; stations replace all that were there. */
 export const lineChangeSchema = lineFields.partial().extend({ version: versionSchema })
@@ -131,6 +138,9 @@ export const lineSchema = z
     note: z.string(),
     sectionLength: z.number(),
     stations: z.array(stationSchema),
+    marks: marksSchema,
+    ends: lineEndsSchema,
+    background: backgroundSchema.nullable(),
     scenarios: z.number().int(),
     warnings: z
       .array(z.strictObject({ path: z.string(), message: z.string() }))
@@ -139,10 +149,12 @@ export const lineSchema = z
   })
   .meta({ id: 'Line' })
 export type Line = z.output<typeof lineSchema>
-export const lineListItemSchema = lineSchema.omit({ stations: true, warnings: true }).extend({
-  stationCount: z.number().int(),
-  length: z.number().meta({ unit: 'm' }),
-})
+export const lineListItemSchema = lineSchema
+  .omit({ stations: true, marks: true, ends: true, background: true, warnings: true })
+  .extend({
+    stationCount: z.number().int(),
+    length: z.number().meta({ unit: 'm' }),
+  })
 export const linesQuerySchema = listQuerySchema.extend({
   sort: z.enum(['name', 'updated', 'created']).default('name'),
 })

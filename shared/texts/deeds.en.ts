@@ -12,6 +12,11 @@ export const deedsTexts = {
       'signed-in': 'signed in',
       'signed-out-everywhere': 'signed out everywhere',
     },
+    depot: {
+      changed: 'changed the depot',
+      created: 'added the depot',
+      removed: 'removed the depot',
+    },
     file: { added: 'added the file', changed: 'changed the file', deleted: 'deleted the file' },
     gauge: {
       changed: 'changed the gauge',

@@ -1,5 +1,11 @@
 import { index, integer, primaryKey, real, sqliteTable, text } from 'drizzle-orm/sqlite-core'
 import { MEMBER_ROLES } from '../../../shared/access/roles'
+import {
+  DEFAULT_ENDS,
+  type Background,
+  type LineEnds,
+  type LineMark,
+} from '../../../shared/schemas/mark'
 import type { ScenarioContent, ScenarioSummary } from '../../../shared/schemas/scenario'
 import { accounts } from './accounts'
 
@@ -79,6 +85,11 @@ export const lines = sqliteTable(
     note: text().notNull().default(''),
     /** All sizes offered on one line have the same section length [m]. */
     sectionLength: real('section_length').notNull().default(10),
+    /** Wells, drains, gates and whatever else stands beside the line. */
+    marks: text({ mode: 'json' }).$type<LineMark[]>().notNull().default([]),
+    ends: text({ mode: 'json' }).$type<LineEnds>().notNull().default(DEFAULT_ENDS),
+    /** Picture under the plan. */
+    background: text({ mode: 'json' }).$type<Background>(),
     ...keptColumns(),
   },
   (table) => [index('lines_by_project').on(table.projectId)],

@@ -7,16 +7,20 @@ import { listScenarioContents } from '../scenarios/scenarios.queries'
 import { insertLine, replaceStations } from './lines.queries'
 import { lineAt, type LinePlace } from './open-line'
 
+type LineText = z.output<typeof newLineSchema>
+
 /** Writes a line with its survey; the caller has checked it and writes the audit trail. */
 export function makeLine(
   { tx, by, at }: Deed,
   projectId: string,
-  { stations, name, note, sectionLength }: z.output<typeof newLineSchema>,
+  { stations, ...line }: LineText,
   id = randomUUID() as string,
 ): string {
   const { accountId } = by
   const kept = { createdAt: at, createdBy: accountId, updatedAt: at, updatedBy: accountId }
-  insertLine(tx, { id, projectId, name, note, sectionLength, ...kept })
+  const { name, note, sectionLength, marks, ends, background } = line
+  const row = { id, projectId, name, note, sectionLength, marks: [...marks], ends, background }
+  insertLine(tx, { ...row, ...kept })
   replaceStations(tx, id, stations)
   return id
 }
@@ -28,7 +32,9 @@ export function copyLine(
   to: { readonly projectId: string; readonly name: string },
 ): string {
   const line = lineAt(deed.tx, from)
-  const id = makeLine(deed, to.projectId, { ...line, name: to.name })
+  // A picture belongs to the project whose file it is.
+  const background = to.projectId === from.projectId ? line.background : null
+  const id = makeLine(deed, to.projectId, { ...line, background, name: to.name })
   for (const text of listScenarioContents(deed.tx, line.id)) {
     makeScenario(deed, { ...line, id }, text)
   }

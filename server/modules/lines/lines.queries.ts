@@ -32,6 +32,13 @@ const selection = {
   ...keptSelection(lines),
 }
 
+const oneSelection = {
+  ...selection,
+  marks: lines.marks,
+  ends: lines.ends,
+  background: lines.background,
+}
+
 const listSelection = {
   ...selection,
   stationCount: sql<number>`(select count(*) ${ofLine})`,
@@ -65,7 +72,7 @@ export function countLines(db: Db, projectId: string, query: LinesQuery): number
 
 export function findLine(db: Db, projectId: string, lineId: string) {
   return db
-    .select(selection)
+    .select(oneSelection)
     .from(lines)
     .innerJoin(makers, eq(makers.id, lines.createdBy))
     .innerJoin(changers, eq(changers.id, lines.updatedBy))

@@ -1,6 +1,7 @@
 import type { z } from 'zod'
-import { OutOfRangeError } from '../../../shared/errors'
+import { type Fault, OutOfRangeError, showValue } from '../../../shared/errors'
 import { lineFaults, lineWarnings, type Survey } from '../../../shared/schemas/line-faults'
+import { markFaults } from '../../../shared/schemas/mark'
 import { PAGE_SIZE } from '../../../shared/schemas/paging'
 import type {
   Line,
@@ -10,7 +11,9 @@ import type {
   newLineSchema,
 } from '../../../shared/schemas/project'
 import type { Db } from '../../db/client'
+import { isImage } from '../../files/media-type'
 import { listGrounds } from '../catalogue/catalogue.queries'
+import { findFile } from '../files/files.queries'
 import { change, type Deed, type Doer, noteChange, type ProjectWork } from '../projects/deed'
 import { assertVersion, changedFields, openProject } from '../projects/open-project'
 import { recomputeScenarios } from '../scenarios/scenario-rows'
@@ -41,9 +44,24 @@ export function readLine(db: Db, place: LinePlace): Line {
   return { ...line, warnings: [...lineWarnings(line.stations, known)] }
 }
 
-function assertSurvey(survey: Survey): void {
-  const faults = lineFaults(survey)
+type Whole = Survey & Pick<Line, 'marks' | 'ends' | 'background'>
+
+/** @throws OutOfRangeError for a survey, a mark or a picture that cannot be used. */
+function assertSurvey(db: Db, projectId: string, line: Whole): void {
+  const surveyed = lineFaults(line)
+  if (surveyed.length > 0) throw new OutOfRangeError(surveyed)
+  const faults = [...markFaults(line), ...pictureFaults(db, projectId, line.background)]
   if (faults.length > 0) throw new OutOfRangeError(faults)
+}
+
+function pictureFaults(db: Db, projectId: string, background: Line['background']): Fault[] {
+  if (background === null) return []
+  const file = findFile(db, projectId, background.fileId)
+  if (file && isImage(file.mediaType)) return []
+  const [path, value] = ['background.fileId', background.fileId]
+  const allowed = 'a picture among the files of the project'
+  const message = `${path}: ${showValue(value)} is not allowed; it must be ${allowed}`
+  return [{ path, value, allowed, unit: '–', message }]
 }
 
 const subject = (id: string, name: string) => ({
@@ -61,7 +79,7 @@ export function createLine(
 ): Line {
   return change(work, actor, (deed) => {
     openProject(deed.tx, projectId)
-    assertSurvey(input)
+    assertSurvey(deed.tx, projectId, input)
     const lineId = makeLine(deed, projectId, input)
     noteChange(deed, projectId, {
       ...subject(lineId, input.name),
@@ -90,7 +108,7 @@ export function changeLine(
     assertVersion(before, version)
     const { stations, ...fields } = input
     const survey = { ...before, ...input }
-    assertSurvey(survey)
+    assertSurvey(deed.tx, place.projectId, survey)
     const isNewSurvey = JSON.stringify(surveyOf(before)) !== JSON.stringify(surveyOf(survey))
     const { at, by } = deed
     const changed = { version: version + 1, updatedAt: at, updatedBy: by.accountId }
@@ -113,7 +131,11 @@ export function changeLine(
   })
 }
 
-const surveyOf = ({ stations, sectionLength }: Survey) => ({ stations, sectionLength })
+const surveyOf = ({ stations, sectionLength, marks }: Survey) => ({
+  stations,
+  sectionLength,
+  turns: marks?.filter(({ kind }) => kind === 'turn'),
+})
 
 /** A copy of the line in the same project, with its survey and its scenarios as they stand. */
 export function duplicateLine(

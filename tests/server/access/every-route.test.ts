@@ -79,6 +79,7 @@ const SAID: Readonly<
   'edit-project': (role, member) =>
     role !== null && role !== 'viewer' && (member === 'lead' || member === 'editor'),
   'lead-project': (role, member) => role !== null && role !== 'viewer' && member === 'lead',
+  'keep-store': (role) => role === 'admin' || role === 'engineer',
   administer: (role) => role === 'admin',
 }
 
