@@ -34,8 +34,8 @@ function escapeXml(text: string): string {
 }
 
 /**
- * The scene as one SVG file that needs nothing else: same scene, same options, same bytes. It holds no
- * date, no program name and no script.
+ * The scene as one SVG file that needs nothing else: same scene, same options, same bytes. It adds no
+ * date, no program name and no script of its own; a caption is part of the scene.
  */
 export function sceneToSvg(scene: Scene, options: SvgOptions): string {
   const { resolve } = options

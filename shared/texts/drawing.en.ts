@@ -27,6 +27,7 @@ export const drawingTexts = {
   edgePartly: 'edge {share} open',
   needed: 'needed {force}',
   scaleValue: '{value}',
+  verbatim: '{text}',
 
   waves: 'waves {height}',
   current: 'current {speed}',

@@ -124,6 +124,24 @@ export const quickCheckTexts = {
     stale:
       'These figures belong to the last valid input, {water}. They will follow once the marked field is corrected.',
   },
+  hours: {
+    cold: {
+      limp: 'In the coldest hour ({temperature}) the tube is limp: no air pressure is left. Top it up, or do not rely on it then.',
+      down: 'In the coldest hour ({temperature}) the tube gives way with the {air} that are left. Top it up, or do not rely on it then.',
+      fails:
+        'In the coldest hour ({temperature}), with the {air} that are left, it does not hold. Top it up, or do not rely on it then.',
+      soft: 'In the coldest hour ({temperature}) only {air} are left: too little to keep the seat closed against this water. Top it up.',
+      fabric: 'In the coldest hour ({temperature}, {air}) the fabric is strained too far.',
+    },
+    hot: {
+      limp: 'In the hottest hour ({temperature}) the tube is limp: no air pressure is left.',
+      soft: 'In the hottest hour ({temperature}) the tube has {air}: too little to keep the seat closed against this water.',
+      down: 'In the hottest hour ({temperature}) the tube gives way with {air}.',
+      fails: 'In the hottest hour ({temperature}), with {air}, it does not hold.',
+      fabric:
+        'In the hottest hour ({temperature}) the air rises to {air} and the fabric is strained too far. Let air out before.',
+    },
+  },
   working: {
     sliding: 'The loads along the ground come to {demand}; friction resists with {resistance}.',
     overturning:

@@ -1,5 +1,17 @@
-/** Texts of what a cross-section shows once it is opened: the sums behind a check. */
+/** Texts of what a cross-section shows once it is opened, and of what its picture says. */
 export const sectionDetailsTexts = {
+  caption: {
+    datum: 'Levels above {datum}.',
+    restsOn:
+      'Rests on: tube {diameter}, skirt {skirt}, {mass}, air {air}, sections of {length}; {surface}, friction {friction}, {edge}; check basis “{basis}”{loads}.',
+    holdsOnlyIf:
+      'Holds only if the tube keeps {air} of air, the skirt lies flat and finds the friction {friction} on firm ground of this kind, the water under it is as assumed ({edge}), and {dry}.',
+    standsOnlyIf:
+      'These figures stand only if the tube keeps {air} of air, the skirt lies flat and finds the friction {friction} on firm ground of this kind, the water under it is as assumed ({edge}), and {dry}.',
+    dryNone: 'no water stands on the dry side',
+    drySome: 'no more than {depth} of water stands on the dry side',
+    made: 'Toehold {version}, Quick check, {date}.',
+  },
   sums: {
     caption: 'To add up by hand: {check}',
     demand: 'What drives',

@@ -1,13 +1,15 @@
 import { shallowReadonly, shallowRef } from 'vue'
 import type { ThemeName } from '@shared/drawing/paints'
+import type { CaptionParagraph } from '@shared/drawing/captioned-scene'
 import type { Scene } from '@shared/drawing/scene'
-import { sceneToSvg } from '@shared/drawing/scene-to-svg'
 import type { ResolveText } from '@shared/texts/format-text'
 
 export type SceneFormat = 'svg' | 'png'
 
 export interface SceneExport {
   readonly scene: Scene
+  /** What the picture says under the drawing; most important first. */
+  readonly caption?: readonly CaptionParagraph[] | undefined
   readonly format: SceneFormat
   readonly theme: ThemeName
   readonly resolve: ResolveText
@@ -41,8 +43,10 @@ export function useSceneExport() {
   return { state: shallowReadonly(state), save }
 }
 
-async function fileOf({ scene, format, theme, resolve }: SceneExport): Promise<Blob> {
-  const { sceneFontFaces } = await import('./scene-fonts')
+async function fileOf(wanted: SceneExport): Promise<Blob> {
+  const { format, theme, resolve, caption = [] } = wanted
+  const { captionedScene, sceneFontFaces, sceneToSvg } = await import('./scene-file')
+  const scene = caption.length === 0 ? wanted.scene : captionedScene(wanted.scene, caption)
   const svg = sceneToSvg(scene, { resolve, theme, fontFaces: sceneFontFaces })
   const file = new Blob([svg], { type: 'image/svg+xml' })
   return format === 'svg' ? file : toPng(file, scene)

@@ -14,6 +14,8 @@ export interface TextOfCase {
   readonly section: SectionCase
   readonly surface: string
   readonly link: string
+  /** What the coldest and the hottest hour make of it. */
+  readonly hours: readonly Message[]
   /** The figures belong to an older input: something typed since is refused. */
   readonly isStale: boolean
 }
@@ -21,11 +23,15 @@ export interface TextOfCase {
 /** Shows a figure as it was given. */
 type Given = (value: number, kind: QuantityKind) => string
 
-/** Two lines for a message: the answer, and what it rests on with the link. */
-export function caseAsText(say: ResolveText, given: Given, text: TextOfCase): string {
-  const { section, surface, verdict, governs, water, holdsTo, leave, link } = text
-  const { barrier, ground, uplift, basis } = section
-  const first = say({
+/** What the answer is made of. */
+type Answer = Pick<TextOfCase, 'verdict' | 'governs' | 'water' | 'holdsTo' | 'leave'>
+
+/** The answer in one line: verdict, water, holds-to and leave level, what governs. */
+export function answerLine(
+  say: ResolveText,
+  { verdict, governs, water, holdsTo, leave }: Answer,
+): string {
+  return say({
     key: 'quickCheck.asText.first',
     values: {
       verdict: say({ key: `checks.verdict.${verdict}` }),
@@ -35,6 +41,12 @@ export function caseAsText(say: ResolveText, given: Given, text: TextOfCase): st
       leave,
     },
   })
+}
+
+/** Two lines for a message: the answer, and what it rests on with the link. */
+export function caseAsText(say: ResolveText, given: Given, text: TextOfCase): string {
+  const { section, surface, link } = text
+  const { barrier, ground, uplift, basis } = section
   const second = say({
     key: 'quickCheck.asText.second',
     values: {
@@ -52,17 +64,19 @@ export function caseAsText(say: ResolveText, given: Given, text: TextOfCase): st
     },
   })
   const stale = text.isStale ? `${say({ key: 'quickCheck.asText.stale' })} ` : ''
-  return `${stale}${first}\n${second}`
+  const hours = text.hours.map((hour) => ` ${say(hour)}`).join('')
+  return `${stale}${answerLine(say, text)}${hours}\n${second}`
 }
 
-function edgeMessage(uplift: SectionCase['uplift'], given: Given): Message {
+/** The skirt edge as the text says it. */
+export function edgeMessage(uplift: SectionCase['uplift'], given: Given): Message {
   if (uplift.model === 'none') return { key: 'quickCheck.asText.edge.none' }
   const values = { edge: given(uplift.edgeFactor, 'percent') }
   return { key: 'quickCheck.asText.edge.open', values }
 }
 
 /** Everything that is not as in plain still water on level ground. */
-function loadMessages(section: SectionCase, given: Given): readonly Message[] {
+export function loadMessages(section: SectionCase, given: Given): readonly Message[] {
   const { water, debris, ground, requiredFreeboard } = section
   const load = (id: string, value = ''): Message => ({
     key: `quickCheck.asText.load.${id}`,

@@ -1,6 +1,7 @@
 // @vitest-environment jsdom
 import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest'
 import { sectionFileName, useSceneExport } from '../../../src/composables/useSceneExport'
+import type { CaptionParagraph } from '../../../shared/drawing/captioned-scene'
 import { draw, say, tube } from '../../shared/drawing/drawn-case'
 
 let files: Blob[]
@@ -38,6 +39,13 @@ describe('saving a drawing', () => {
     expect(svg).toContain('<svg xmlns=')
     expect(svg.match(/@font-face/g)).toHaveLength(2)
     expect(state.value).toBe('idle')
+  })
+
+  it('writes the caption into the picture, its title and its description', async () => {
+    const line = { text: 'Holds: 0.420 m of water.', role: 'labelHolds', size: 16, weight: 600 }
+    await useSceneExport().save({ ...wanted, caption: [line as CaptionParagraph], format: 'svg' })
+    const svg = await textOf(files[0]!)
+    expect(svg.match(/Holds: 0\.420 m of water\./g)).toHaveLength(3)
   })
 
   it('gives a picture of two pixels for each of the drawing', async () => {
