@@ -39,7 +39,7 @@ export interface Book {
 function figuresIn(system: UnitSystem) {
   return (symbol: string, value: number, kind: FigureKind, isGiven: boolean): SheetFigure => {
     const { unit, factor } = sheetUnit(kind, system)
-    return { symbol, value: value / factor, unit, kind, isGiven }
+    return { symbol, value: value / factor, unit, kind, isGiven, rounding: 'nearest' }
   }
 }
 
@@ -63,7 +63,6 @@ function lineOf(
     source: spec.source,
     note: spec.hasNote ? { key: `derivation.note.${spec.id}` } : null,
     check: spec.check ?? null,
-    rounding: spec.rounding ?? 'nearest',
   }
 }
 
@@ -77,7 +76,7 @@ export function openBook(section: SectionCase, system: UnitSystem): Book {
   const figure = figuresIn(system)
 
   function inputsOf(spec: LineSpec): readonly SheetFigure[] {
-    const names = symbolsIn(`(${spec.left ?? '1'}) + (${spec.formula})`)
+    const names = [...new Set([...symbolsIn(spec.left ?? spec.symbol), ...symbolsIn(spec.formula)])]
     return names
       .filter((name) => name !== spec.symbol)
       .map((name) => {
@@ -90,7 +89,8 @@ export function openBook(section: SectionCase, system: UnitSystem): Book {
 
   function write(group: GroupId, spec: LineSpec): void {
     const inputs = inputsOf(spec)
-    const result = figure(spec.symbol, spec.value, spec.kind, false)
+    const rounding = spec.rounding ?? ('nearest' as const)
+    const result = { ...figure(spec.symbol, spec.value, spec.kind, false), rounding }
     known.set(spec.symbol, result)
     lines.push(lineOf(spec, group, inputs, result))
   }

@@ -5,6 +5,11 @@ import type { SectionCase } from '../schemas/section-case'
 export const LARGEST_HOLDING = 'largest(h, u(h) <= 1)'
 export const SMALLEST_HOLDING = 'smallest(h, u(h) <= 1)'
 
+/** True for a formula that stands for a search over all checks. */
+export function isSearch(formula: string): boolean {
+  return formula === LARGEST_HOLDING || formula === SMALLEST_HOLDING
+}
+
 /** The search ends when it has the edge to 1e-7 m; a little beyond it the section must fail. */
 const BEYOND = 1.05e-7
 

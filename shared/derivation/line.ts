@@ -15,6 +15,8 @@ export interface SheetFigure {
   readonly kind: FigureKind
   /** An input as entered, printed as it is; else a figure of a line, printed to three figures. */
   readonly isGiven: boolean
+  /** `down` for what a section holds to and is left at. */
+  readonly rounding: 'nearest' | 'down'
 }
 
 /**
@@ -42,7 +44,6 @@ export interface DerivationLine {
   readonly note: Message | null
   /** The check whose factor or utilisation this line gives. */
   readonly check: CheckId | null
-  readonly rounding: 'nearest' | 'down'
 }
 
 export const GROUP_IDS = [

@@ -8,6 +8,7 @@ import {
   coshDependencies,
   create,
   type FactoryFunctionMap,
+  type MathNode,
   divideDependencies,
   expDependencies,
   maxDependencies,
@@ -61,3 +62,14 @@ const isPart = (part: unknown): part is FactoryFunctionMap => part !== undefined
 export const math = create(Object.assign({}, ...Object.values(PARTS).filter(isPart)))
 
 math.import({ agm, integral, series }, {})
+
+const parsed = new Map<string, MathNode>()
+
+/** Parses a formula once: a sheet uses each several times, and there are a few dozen of them. */
+export function parseFormula(expression: string): MathNode {
+  const known = parsed.get(expression)
+  if (known) return known
+  const node = math.parse(expression)
+  parsed.set(expression, node)
+  return node
+}

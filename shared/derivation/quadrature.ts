@@ -1,7 +1,7 @@
-/** Half the reach of the transformed variable: beyond it the weights are below 1e-17. */
-const REACH = 3.3
+/** Half the reach of the transformed variable: beyond it the weights are below 1e-16, even of a root that is infinite at its end. */
+const REACH = 3.9
 /** Steps on each side of the middle. */
-const STEPS = 36
+const STEPS = 44
 
 interface Node {
   /** Distance from the nearer end, as a share of the interval. */

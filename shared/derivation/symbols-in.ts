@@ -1,5 +1,5 @@
 import type { FunctionNode, MathNode, SymbolNode } from 'mathjs'
-import { math } from './math'
+import { parseFormula } from './math'
 
 /** Functions whose second argument is a variable of their own. */
 const BINDING = new Set(['integral', 'series', 'largest', 'smallest'])
@@ -8,7 +8,7 @@ const CONSTANTS = new Set(['pi'])
 /** Names of the quantities in an expression, in the order in which they stand. */
 export function symbolsIn(expression: string): readonly string[] {
   const found = new Set<string>()
-  collect(math.parse(expression), new Set(CONSTANTS), found)
+  collect(parseFormula(expression), new Set(CONSTANTS), found)
   return [...found]
 }
 

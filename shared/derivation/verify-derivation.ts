@@ -1,15 +1,15 @@
 import { DerivationDisagreementError, type DisagreementReason } from './disagreement'
 import { inSi, type Evaluated } from './expression-functions'
-import { holdsToFault, LARGEST_HOLDING, SMALLEST_HOLDING } from './holds-to-proof'
+import { holdsToFault, isSearch, LARGEST_HOLDING } from './holds-to-proof'
 import { proofCounts, type Derivation, type DerivationLine, type ProofCounts } from './line'
 import type { SheetFigure } from './line'
-import { math } from './math'
+import { math, parseFormula } from './math'
 import { sheetUnit } from './sheet-units'
 
 /** Relative difference that two routes in double precision may have. */
 const BOUND = 1e-9
-/** Where a figure is zero: share of the largest input of that dimension. */
-const ZERO_BOUND = 1e-12
+/** What rounding leaves where large terms cancel: share of the largest figure of the line. */
+const CANCELLATION = 4e-15
 
 /**
  * Computes a finished derivation a second time, from its own lines: direct lines by mathjs with
@@ -51,7 +51,7 @@ function assertLine(line: DerivationLine, { section, system }: Derivation): void
   if (sheetUnit(result.kind, system).unit !== result.unit) {
     fail(line, 'unit', `${result.unit} is not the unit of this figure`)
   }
-  if (line.formula === LARGEST_HOLDING || line.formula === SMALLEST_HOLDING) {
+  if (isSearch(line.formula)) {
     const depth = result.value * sheetUnit(result.kind, system).factor
     const fault = holdsToFault(section, depth, line.formula === LARGEST_HOLDING ? 1 : -1)
     if (fault !== null) fail(line, 'figure', fault)
@@ -82,7 +82,7 @@ function evaluate(line: DerivationLine, expression: string, scope: Map<string, u
   const inputs = new Map(scope)
   if (line.proof === 'recomputed' && expression === line.formula) inputs.delete(line.symbol)
   try {
-    return math.parse(expression).compile().evaluate(inputs) as Evaluated
+    return parseFormula(expression).compile().evaluate(inputs) as Evaluated
   } catch (error) {
     const reason = error instanceof Error ? error.message : String(error)
     return fail(line, 'expression', `${expression} cannot be evaluated: ${reason}`)
@@ -95,9 +95,9 @@ function assertEqual(line: DerivationLine, left: Evaluated, right: Evaluated): v
     fail(line, 'unit', 'the two sides do not have the same dimension')
   }
   const [a, b] = [inSi(left), inSi(right)]
+  if (!Number.isFinite(a) || !Number.isFinite(b)) fail(line, 'figure', `${a} against ${b} (SI)`)
   const scale = Math.max(Math.abs(a), Math.abs(b))
-  const allowed = Math.min(Math.abs(a), Math.abs(b)) === 0 ? zeroBound(line) : BOUND * scale
-  if (Math.abs(a - b) <= allowed) return
+  if (Math.abs(a - b) <= BOUND * scale + CANCELLATION * largestFigure(line)) return
   fail(line, 'figure', `${a} against ${b} (SI)`)
 }
 
@@ -106,9 +106,9 @@ function isSameDimension(left: Evaluated, right: Evaluated): boolean {
   return (left as unknown as { equalBase: (other: unknown) => boolean }).equalBase(right)
 }
 
-function zeroBound(line: DerivationLine): number {
+function largestFigure(line: DerivationLine): number {
   const sizes = [...line.inputs, line.result].map((figure) =>
     Math.abs(inSi(withUnit(line, figure))),
   )
-  return ZERO_BOUND * Math.max(...sizes)
+  return Math.max(...sizes)
 }

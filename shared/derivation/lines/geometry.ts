@@ -15,6 +15,8 @@ export function writeGeometry(context: LineContext, { groundLevel }: GroundPlace
   book.given('L', barrier.skirtLength, 'length')
   book.given('b', barrier.contactWidth, 'length')
   book.given('m', barrier.mass, 'massPerLength')
+  book.given('V', water.currentSpeed, 'speed')
+  book.given('H_s', water.waveHeight, 'length')
   book.given('mu', section.ground.friction, 'ratio')
   book.line('geometry', {
     id: 'unitWeight',

@@ -1,6 +1,7 @@
 import { globalPairs } from '../../checks/global-checks'
 import { writeCheck } from './check-lines'
 import { sum, type LineContext } from './context'
+import { resistanceText } from './friction'
 
 /** Sliding, overturning and flotation with global factors. */
 export function writeGlobalStability(context: LineContext): void {
@@ -45,7 +46,7 @@ function writeSliding(context: LineContext): void {
         ['P_s', `(${afloat}) * cos(beta)`],
         [`${names.force} * sin(beta)`, names.uplift],
       ),
-      value: resistance / context.section.ground.friction,
+      value: normalForce(context),
     })
     book.line('stability', {
       ...force,
@@ -59,11 +60,18 @@ function writeSliding(context: LineContext): void {
     ...force,
     id: 'slidingResistance',
     symbol: 'R_s',
-    formula: names.isSloped ? 'mu * N_s' : 'mu * N',
+    formula: resistanceText(context, names.isSloped ? 'N_s' : 'N', 'B'),
     value: resistance,
     hasNote: true,
   })
   const against = names.isSloped ? 'E_s' : names.force
   const common = { check: 'sliding', group: 'stability', suffix: 's' } as const
   writeCheck(context, { ...common, resistance: 'R_s', demand: against })
+}
+
+/** Normal force on the ground, from the friction that it has without soft ground. */
+function normalForce({ state }: LineContext): number {
+  const ground = { ...state.section.ground, undrainedStrength: null }
+  const firm = { ...state, section: { ...state.section, ground } }
+  return globalPairs(firm).sliding.resistance / ground.friction
 }

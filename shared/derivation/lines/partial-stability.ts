@@ -2,12 +2,13 @@ import { compare, isWorse } from '../../checks/compare'
 import { partialPairs, partialSliding } from '../../checks/partial-checks'
 import { writeCheck } from './check-lines'
 import { sum, type LineContext } from './context'
+import { FACTORED_STRENGTH, resistanceText, UNFACTORED_STRENGTH } from './friction'
 import { writeRestoring } from './global-stability'
 
 /** Factors on permanent and variable actions, and on friction. */
 const COMBINATIONS = {
-  1: { permanent: '1.35', variable: '1.5', friction: 'mu' },
-  2: { permanent: '', variable: '1.3', friction: 'mu / 1.25' },
+  1: { permanent: '1.35', variable: '1.5', strength: UNFACTORED_STRENGTH },
+  2: { permanent: '', variable: '1.3', strength: FACTORED_STRENGTH },
 } as const
 
 const times = (factor: string, what: string) => (factor === '' ? what : `${factor} * (${what})`)
@@ -48,7 +49,7 @@ function writeEffect(context: LineContext, which: 1 | 2): void {
 
 function writeCombination(context: LineContext, which: 1 | 2): void {
   const { book, state, names } = context
-  const { permanent, friction } = COMBINATIONS[which]
+  const { permanent, strength } = COMBINATIONS[which]
   const pair = partialSliding(state, which)
   const force = { kind: 'forcePerLength', source: 'ec7' } as const
   writeEffect(context, which)
@@ -56,11 +57,12 @@ function writeCombination(context: LineContext, which: 1 | 2): void {
   const lifts = sum([names.lift, names.dryLift])
   const lifted = lifts === '' ? null : names.isSloped ? `(${lifts}) * cos(beta)` : `(${lifts})`
   const own = names.isSloped ? `W_b * cos(beta) - ${effect} * sin(beta)` : 'W_b'
+  const normal = `(${times(permanent, sum(['P_s'], [lifted, names.uplift]))} + ${own})`
   book.line('stability', {
     ...force,
     id: `resistance${which}`,
     symbol: `R_${which}`,
-    formula: `${friction} * (${times(permanent, sum(['P_s'], [lifted, names.uplift]))} + ${own})`,
+    formula: resistanceText(context, normal, 'B', strength),
     value: pair.resistance,
   })
   if (!names.isSloped) return

@@ -63,7 +63,7 @@ function writeLoaded(context: LineContext, shape: StandingShape): void {
     id: 'freeSkirt',
     symbol: 'ell_f',
     isSubstituted: true,
-    formula: 'integral(1 / sqrt(1 - (1 - y / h)^4), y, 0, y_A)',
+    formula: 'integral(1 / sqrt(y / h * (2 - y / h) * (1 + (1 - y / h)^2)), y, 0, y_A)',
     value: shape.freeSkirt,
   })
 }

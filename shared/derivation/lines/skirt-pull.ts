@@ -2,6 +2,7 @@ import { upliftSharePartial } from '../../calc/uplift/uplift-share'
 import { partialPairs } from '../../checks/partial-checks'
 import { writeCheck } from './check-lines'
 import { sum, type LineContext } from './context'
+import { FACTORED_STRENGTH, isSoft, resistanceText } from './friction'
 import { developing, upliftSource } from './uplift'
 
 /** Does the part of the skirt that stays flat hold the tube? Nothing to write where no shape stands. */
@@ -19,19 +20,20 @@ export function writeSkirtPull(context: LineContext): void {
     source: 'membrane',
   })
   const under = writeUnderSkirt(context, geometry.wettedSkirt - shape.freeSkirt)
+  const normal = under === null ? '(gamma * h * L_f)' : `(gamma * h * L_f - ${under})`
   book.line('skirt', {
     id: 'skirtGrip',
     symbol: 'R_k',
-    formula: under === null ? 'mu * gamma * h * L_f' : `mu * (gamma * h * L_f - ${under})`,
+    formula: resistanceText(context, normal, 'L_f'),
     value: result.loadedShape.skirtGrip,
     kind: 'forcePerLength',
     source: 'equilibrium',
     hasNote: true,
   })
-  if (!state.isReversed) writeSkirtCheck(context)
+  if (!state.isReversed) writeSkirtCheck(context, normal)
 }
 
-function writeSkirtCheck(context: LineContext): void {
+function writeSkirtCheck(context: LineContext, normal: string): void {
   const { book, state, names } = context
   const common = { check: 'skirt', group: 'skirt', suffix: 'k' } as const
   if (state.basis.format === 'global') {
@@ -41,7 +43,9 @@ function writeSkirtCheck(context: LineContext): void {
   book.line('skirt', {
     id: 'skirtResistance',
     symbol: 'R_d',
-    formula: 'R_k / 1.25',
+    formula: isSoft(context)
+      ? resistanceText(context, normal, 'L_f', FACTORED_STRENGTH)
+      : 'R_k / 1.25',
     value: partialPairs(state).skirt.resistance,
     kind: 'forcePerLength',
     source: 'ec7',

@@ -32,7 +32,6 @@ export function writeThrust(context: LineContext): void {
 
 function writeCurrent({ book, section, state, result, names }: LineContext): void {
   const { currentSpeed, dragCoefficient } = section.water
-  book.given('V', currentSpeed, 'speed')
   book.given('C_d', dragCoefficient, 'ratio')
   book.line('thrust', {
     id: 'dynamicDepth',

@@ -10,7 +10,6 @@ export function writeWaves(context: LineContext): void {
   const crest = state.shape.solved ? state.shape.crest : section.barrier.diameter
   const attack = { height: water.waveHeight, period, depth: water.depth, crest, gravity }
   const waves = waveThrust({ ...attack, unitWeight: state.geometry.unitWeight })
-  book.given('H_s', water.waveHeight, 'length')
   book.given('T_w', period, 'seconds')
   book.line('thrust', {
     id: 'waveHeight',
