@@ -9,6 +9,9 @@ import { sectionState } from './section-state'
 
 export type JustEnough = SectionResult['justEnough']
 
+/** What rounding leaves of a root [N/m]. */
+const ROUNDING = 1e-6
+
 const NONE: JustEnough = { skirtLength: null, friction: null, edgeFactor: null }
 
 /**
@@ -55,12 +58,17 @@ function enoughSkirt(section: SectionCase, share: GripShareFor): number | null {
 }
 
 function enoughFriction(section: SectionCase, share: GripShareFor): number | null {
-  const spare = (friction: number): readonly number[] =>
-    slidingSpare({ ...section, ground: { ...section.ground, friction } }, share)
-  const without = spare(0)
-  const perUnit = spare(1).map((value, i) => value - without[i]!)
+  const spare = (friction: number, soft = section.ground.undrainedStrength ?? null) =>
+    slidingSpare(
+      { ...section, ground: { ...section.ground, friction, undrainedStrength: soft } },
+      share,
+    )
+  // Linear as long as friction decides; what soft ground allows is asked for afterwards.
+  const without = spare(0, null)
+  const perUnit = spare(1, null).map((value, i) => value - without[i]!)
   const needed = without.map((value, i) => needAlong(value, perUnit[i]!))
   const most = Math.max(...needed)
+  if (isSoft(section) && spare(most).some((value) => value < -ROUNDING)) return null
   return most <= (fieldRange('ground.friction').max as number) ? most : null
 }
 
@@ -76,6 +84,19 @@ function enoughEdge(section: SectionCase, share: GripShareFor): number | null {
   const sealed = spare(0)
   const open = spare(1)
   if (sealed.some((value) => value < 0)) return null
+  if (isSoft(section)) return enoughEdgeOnSoftGround(spare)
   const limits = sealed.map((value, i) => (value > open[i]! ? value / (value - open[i]!) : 1))
   return Math.min(...limits)
+}
+
+/** On soft ground the resistance is the least of three, so the edge factor is a root. */
+function enoughEdgeOnSoftGround(spare: (edgeFactor: number) => readonly number[]): number {
+  const least = (edgeFactor: number): number => Math.min(...spare(edgeFactor))
+  const atHigh = least(1)
+  if (atHigh >= 0) return 1
+  return findRoot(least, { low: 0, high: 1, atLow: least(0), atHigh })
+}
+
+function isSoft({ ground }: SectionCase): boolean {
+  return (ground.undrainedStrength ?? null) !== null
 }

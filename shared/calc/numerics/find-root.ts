@@ -58,8 +58,9 @@ interface Points {
 function nextFraction({ a, b, c, fa, fb, fc }: Points): number {
   const xi = (a - b) / (c - b)
   const phi = (fa - fb) / (fc - fb)
-  if (phi ** 2 >= xi || (1 - phi) ** 2 >= 1 - xi) return 0.5
-  return (
+  if (!(phi ** 2 < xi && (1 - phi) ** 2 < 1 - xi)) return 0.5
+  const fraction =
     (fa / (fb - fa)) * (fc / (fb - fc)) + ((c - a) / (b - a)) * (fa / (fc - fa)) * (fb / (fc - fb))
-  )
+  // Values too small to divide by leave nothing to interpolate with.
+  return Number.isFinite(fraction) ? fraction : 0.5
 }

@@ -66,7 +66,7 @@ export function upliftAtTime(
   const parts = partsBefore(readings, time)
   const share = (xi: number): number => base.edgeFactor * headAt(parts, base, xi)
   const crossings = crossingsOf(share, parts.depth)
-  if (crossings.length === 0) {
+  if (crossings === null) {
     const { base: width, edgeFactor } = base
     return {
       force: edgeFactor * width * sumOf(parts, base, STEP_MEAN, RAMP_MEAN),
@@ -172,13 +172,15 @@ function rampShare(tau: number, xi: number): number {
 /** Places along the base that are looked at for a crossing. */
 const LOOKS = 96
 
-/** Fractions ξ at which the head passes the depth; empty where it stays below it. */
-function crossingsOf(head: (xi: number) => number, depth: number): readonly number[] {
+/** Fractions ξ at which the head passes the depth; null where it stays below it everywhere. */
+function crossingsOf(head: (xi: number) => number, depth: number): readonly number[] | null {
   // The edge itself equals the depth for η = 1: a hair above it is no crossing.
   const above = (xi: number): number => head(xi) - depth * (1 + 1e-12)
   const places = Array.from({ length: LOOKS + 1 }, (_, i) => (i / LOOKS) ** 2)
   places[0] = 1e-9
   const values = places.map(above)
+  // Above it everywhere, such as when the water has just gone: no crossing, and all of it vents.
+  if (!values.some((value) => value > 0)) return null
   return places.slice(1).flatMap((high, i) => {
     const [low, atLow, atHigh] = [places[i]!, values[i]!, values[i + 1]!]
     if (Math.sign(atLow) === Math.sign(atHigh)) return []

@@ -42,6 +42,12 @@ const OF_SLOPE = Float64Array.from(NUMBERS, (n) => 2 / n ** 3)
 /** A mode that has fallen by e⁻³⁰ within one step needs no memory. */
 const SETTLED = 30
 
+/** A mode that moves no further than this has settled [m]. */
+const STILL = 1e-13
+
+/** Durations are told apart to the microsecond [s]. */
+const TICK = 1e-6
+
 /** Decay factors are kept for so many lengths of step. */
 const MOST_KEPT_STEPS = 8
 
@@ -62,6 +68,7 @@ const MOST_KEPT_STEPS = 8
 export class GrowingUplift {
   private readonly unit: number
   private readonly modes: Float64Array
+  private moving: number
   private heads: EndHeads
   private slopes: EndHeads = { edge: 0, toe: 0 }
   /** Highest head that either end has seen: no point under the base can be above it. */
@@ -76,6 +83,7 @@ export class GrowingUplift {
     if (start instanceof GrowingUplift) {
       this.unit = start.unit
       this.modes = start.modes.slice()
+      this.moving = start.moving
       this.heads = start.heads
       this.slopes = start.slopes
       this.highest = start.highest
@@ -86,6 +94,7 @@ export class GrowingUplift {
     assertStart(ground, start)
     this.unit = ground.base ** 2 / ground.diffusivity
     this.modes = new Float64Array(modesFor(start.shortestStep / this.unit))
+    this.moving = 0
     this.heads = { edge: start.toe, toe: start.toe }
     this.highest = start.toe
     this.decays = new Map()
@@ -106,7 +115,8 @@ export class GrowingUplift {
     const toe = (to.toe - this.heads.toe) / duration
     this.turn({ edge, toe })
     const decay = this.decayOf(duration)
-    for (let i = 0; i < this.modes.length; i += 1) this.modes[i]! *= decay[i]!
+    for (let i = 0; i < this.moving; i += 1) this.modes[i]! *= decay[i]!
+    while (this.moving > 0 && Math.abs(this.modes[this.moving - 1]!) < STILL) this.moving -= 1
     this.reach(to)
   }
 
@@ -118,6 +128,7 @@ export class GrowingUplift {
       const both = i % 2 === 0 ? edge + toe : edge - toe
       this.modes[i]! -= OF_JUMP[i]! * both
     }
+    this.moving = this.modes.length
     this.reach(to)
   }
 
@@ -155,6 +166,7 @@ export class GrowingUplift {
       edgeDrift: this.unit * this.slopes.edge,
       toeDrift: this.unit * this.slopes.toe,
       modes: this.modes,
+      moving: this.moving,
     }
   }
 
@@ -168,10 +180,12 @@ export class GrowingUplift {
       const both = i % 2 === 0 ? edge + toe : edge - toe
       this.modes[i]! += OF_SLOPE[i]! * both
     }
+    this.moving = this.modes.length
   }
 
   private settle(heads: EndHeads): void {
     this.modes.fill(0)
+    this.moving = 0
     this.reach(heads)
   }
 
@@ -181,11 +195,12 @@ export class GrowingUplift {
   }
 
   private decayOf(duration: number): Float64Array {
-    const kept = this.decays.get(duration)
+    const ticks = Math.round(duration / TICK)
+    const kept = this.decays.get(ticks)
     if (kept) return kept
     const tau = (Math.PI ** 2 * duration) / this.unit
     const decay = this.modes.map((_, i) => Math.exp(-((i + 1) ** 2) * tau))
-    if (this.decays.size < MOST_KEPT_STEPS) this.decays.set(duration, decay)
+    if (this.decays.size < MOST_KEPT_STEPS) this.decays.set(ticks, decay)
     return decay
   }
 }

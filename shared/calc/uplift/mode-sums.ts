@@ -15,11 +15,13 @@ export interface ModeState {
   readonly toeDrift: number
   /** w_1 … w_N [m]. */
   readonly modes: Float64Array
+  /** Modes that still matter; those beyond are settled. */
+  readonly moving: number
 }
 
 /** Head at ξ [m]. */
 export function headOf(state: ModeState, xi: number): number {
-  return settledHead(state, xi) + sines(state.modes, xi)
+  return settledHead(state, xi) + sines(state, xi)
 }
 
 /** Head at ξ without what the modes still have to go [m]. */
@@ -30,13 +32,13 @@ export function settledHead({ edge, toe, edgeDrift, toeDrift }: ModeState, xi: n
 }
 
 /** Σ w_n sin(nθ), θ = πξ, by the recurrence sin(n+1)θ = 2 cos θ sin nθ − sin(n−1)θ. */
-function sines(modes: Float64Array, xi: number): number {
+function sines({ modes, moving }: ModeState, xi: number): number {
   const twice = 2 * Math.cos(Math.PI * xi)
   let before = 0
   let now = Math.sin(Math.PI * xi)
   let sum = 0
-  for (const mode of modes) {
-    sum += mode * now
+  for (let i = 0; i < moving; i += 1) {
+    sum += modes[i]! * now
     const next = twice * now - before
     before = now
     now = next
@@ -57,7 +59,7 @@ export function cumulative(state: ModeState, xi: number): Cumulative {
   const x3 = x2 * xi
   const x4 = x2 * x2
   const x5 = x4 * xi
-  const waves = waveIntegrals(state.modes, xi)
+  const waves = waveIntegrals(state, xi)
   return {
     area:
       edge * (xi - x2 / 2) +
@@ -74,14 +76,14 @@ export function cumulative(state: ModeState, xi: number): Cumulative {
   }
 }
 
-function waveIntegrals(modes: Float64Array, xi: number): Cumulative {
+function waveIntegrals({ modes, moving }: ModeState, xi: number): Cumulative {
   const theta = Math.PI * xi
   const twice = 2 * Math.cos(theta)
   let [sineBefore, cosineBefore] = [0, 1]
   let [sine, cosine] = [Math.sin(theta), Math.cos(theta)]
   let area = 0
   let moment = 0
-  for (let i = 0; i < modes.length; i += 1) {
+  for (let i = 0; i < moving; i += 1) {
     const scaled = modes[i]! / ((i + 1) * Math.PI)
     area += scaled * (1 - cosine)
     moment += scaled * (sine / ((i + 1) * Math.PI) - xi * cosine)
@@ -97,10 +99,10 @@ function waveIntegrals(modes: Float64Array, xi: number): Cumulative {
 
 /** The same integrals over the whole base: the even modes have no area. */
 export function wholeBase(state: ModeState): Cumulative {
-  const { edge, toe, edgeDrift, toeDrift, modes } = state
+  const { edge, toe, edgeDrift, toeDrift, modes, moving } = state
   let area = (edge + toe) / 2 - (edgeDrift + toeDrift) / 24
   let moment = edge / 6 + toe / 3 - edgeDrift * (7 / 360) - toeDrift / 45
-  for (let i = 0; i < modes.length; i += 1) {
+  for (let i = 0; i < moving; i += 1) {
     const scaled = modes[i]! / ((i + 1) * Math.PI)
     if (i % 2 === 0) {
       area += 2 * scaled

@@ -24,10 +24,10 @@ export class LookTable {
   /** Head at the place i [m]. */
   headAt(state: ModeState, i: number): number {
     const table = (this.table ??= sinesAtPlaces(this.modes))
-    const { modes } = state
+    const { modes, moving } = state
     const row = i * this.modes
     let sum = settledHead(state, PLACES[i]!)
-    for (let n = 0; n < modes.length; n += 1) sum += modes[n]! * table[row + n]!
+    for (let n = 0; n < moving; n += 1) sum += modes[n]! * table[row + n]!
     return sum
   }
 }

@@ -93,6 +93,18 @@ describe('water under the skirt while the level changes', () => {
     expect(isVented).toBe(true)
   })
 
+  it('is gone with the last of the water, where the ground has not drained yet', () => {
+    const drained = upliftAtTime(
+      [
+        { time: 0, depth: 0.5 },
+        { time: 7200, depth: 0 },
+      ],
+      { base: 0.85, diffusivity: 1e-6, edgeFactor: 0.1 },
+      7200,
+    )
+    expect(drained).toEqual({ force: 0, moment: 0, isVented: true })
+  })
+
   it('agrees with finite differences on a triangular flood, rising and falling', () => {
     const flood: readonly DepthReading[] = [
       { time: 0, depth: 0 },
