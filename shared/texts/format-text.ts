@@ -26,8 +26,15 @@ export function showValues(values: TextValues, system: UnitSystem): Record<strin
 
 /** A resolver without a framework, for SVG files, PDFs and plain text; `{name}` is filled in. */
 export function textResolver(texts: object, system: UnitSystem): ResolveText {
+  const found = new Map<string, string>()
+  const templateOf = (key: string): string => {
+    const template = found.get(key) ?? lookUp(texts, key)
+    // Areas add their texts later: what is not there yet is looked for again.
+    if (template !== key) found.set(key, template)
+    return template
+  }
   return ({ key, values }) => {
-    const template = lookUp(texts, key)
+    const template = templateOf(key)
     if (!values) return template
     const shown = showValues(values, system)
     return template.replace(/\{(\w+)\}/g, (placeholder, name: string) => shown[name] ?? placeholder)

@@ -1,18 +1,18 @@
-import { computed, type Ref } from 'vue'
-import {
-  holdsToWords,
-  leaveWords,
-  shapeWords,
-  waterWords,
-  type WaterPlace,
-} from '@/quick-check/verdict-words'
+import { computed } from 'vue'
+import { holdsToWords, leaveWords, shapeWords, waterWords } from '@/quick-check/verdict-words'
 import type { SectionCheck } from './useSectionCheck'
 import { useWords } from './useWords'
 
+/** What the words need to know of a check. */
+export type Worded = Pick<
+  SectionCheck,
+  'section' | 'evaluation' | 'water' | 'holdsTo' | 'leave' | 'isSkirtless'
+>
+
 /** The verdict in words: water, what it holds to, when to leave, and the same in one sentence. */
-export function useVerdictWords(check: SectionCheck) {
+export function useVerdictWords(check: Worded) {
   const { t, say } = useWords()
-  const place: Ref<WaterPlace> = check.water
+  const place = check.water
   const water = computed(() => waterWords(say, place.value))
   const holdsTo = computed(() =>
     holdsToWords(say, check.holdsTo.value, place.value, check.isSkirtless.value),

@@ -118,8 +118,8 @@ describe('the Quick check', () => {
   it('says low, expected and high water, each with its verdict', async () => {
     const user = await open()
     await enter(user, 'Give or take ±', '0.1')
-    const marks = screen.getByRole('table', { name: 'Low, expected, high' })
-    expect(within(marks).getByRole('row', { name: /Low.*Holds/ })).toBeTruthy()
+    const marks = await screen.findByRole('table', { name: 'Low, expected, high' })
+    expect(await within(marks).findByRole('row', { name: /Low.*Holds/ })).toBeTruthy()
     expect(within(marks).getByRole('row', { name: /High.*Does not hold/ })).toBeTruthy()
   })
 
@@ -133,7 +133,9 @@ describe('the Quick check', () => {
   it('says to leave now once the water has reached the leave level', async () => {
     const user = await open()
     await enter(user, 'Water now', '0.44')
-    expect(band().textContent).toContain('Leave now.')
+    await waitFor(() => {
+      expect(band().textContent).toContain('Leave now.')
+    })
   })
 
   it('says that it holds but must be left before it', async () => {
