@@ -31,6 +31,7 @@ export function gripShareOf(
   skirtLength: number,
   sectionLength: number,
 ): number {
+  if (turnAtStart === 0 && turnAtEnd === 0) return 1
   const lost = [turnAtStart, turnAtEnd].map(
     (angle) =>
       bend({

@@ -8,7 +8,10 @@ import { evaluateSection } from '../../shared/checks/evaluate-section'
 import { globalPairs } from '../../shared/checks/global-checks'
 import { holdingProfile } from '../../shared/checks/holds-to'
 import { sectionState } from '../../shared/checks/section-state'
+import { GROUNDS } from '../../shared/catalogue/grounds'
+import { scenarioContentSchema, type ScenarioBarrier } from '../../shared/schemas/scenario'
 import type { SectionCase } from '../../shared/schemas/section-case'
+import { bestLayout } from '../../shared/checks/layout/best-layout'
 import { exampleSection } from '../../shared/verification/example-section'
 
 interface Task {
@@ -24,6 +27,42 @@ const sections: readonly SectionCase[] = Array.from({ length: 97 }, (_, i) =>
 )
 const sectionAt = (i: number): SectionCase => sections[i % sections.length]!
 const first = sectionState(sectionAt(0))
+
+/** Five tubes that grow with their diameter. */
+const fiveTubes: readonly ScenarioBarrier[] = [0.5, 0.6, 0.7, 0.85, 1].map((diameter) => ({
+  diameter,
+  skirtLength: 3.1 * diameter,
+  contactWidth: 0.17 * diameter,
+  mass: 7.2 * diameter,
+  airPressure: 12_000 + 8000 * (diameter - 0.4),
+  sectionLength: 10,
+  fabricStrength: 60_000,
+  name: String(diameter),
+  statedHeight: diameter,
+  catalogueId: String(diameter),
+  catalogueRevision: 1,
+}))
+
+const lineContent = scenarioContentSchema.parse({
+  waterLevel: 3.42,
+  place: 0,
+  sizes: [{ from: 0, to: 20_000, barrier: fiveTubes[0] }],
+  grounds: GROUNDS.map(({ id, friction }) => ({ surface: id, friction })),
+})
+
+/** 20 km of waves in the ground, on three surfaces. */
+function longLine(shift: number) {
+  const stations = Array.from({ length: 2001 }, (_, i) => ({
+    chainage: 10 * i,
+    x: null,
+    y: null,
+    groundLevel: 2.8 + 0.4 * Math.sin((i + shift) / 7) + 0.05 * Math.cos(1.3 * i),
+    surface: ['turf', 'concrete', 'asphalt'][Math.floor(i / 40) % 3]!,
+    clearWidth: null,
+    note: '',
+  }))
+  return { stations, sectionLength: 10 }
+}
 
 /** Everything but the loaded shape: loads, moments, ratios. */
 function rigidCheck(section: SectionCase): readonly unknown[] {
@@ -54,6 +93,11 @@ const TASKS: readonly Task[] = [
   },
   { name: 'rigid check', gate: 5, run: (i) => rigidCheck(sectionAt(i)) },
   { name: 'check with loaded shape', gate: 30, run: (i) => evaluateSection(sectionAt(i)) },
+  {
+    name: 'best layout, 2000 sections, 5 sizes',
+    gate: 200_000,
+    run: (i) => bestLayout(longLine(i), lineContent, fiveTubes),
+  },
   { name: 'holds-to, whole profile', gate: null, run: (i) => holdingProfile(sectionAt(i)) },
 ]
 
