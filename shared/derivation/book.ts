@@ -67,7 +67,7 @@ function lineOf(
 }
 
 /** An empty book for one case. */
-export function openBook(section: SectionCase, system: UnitSystem): Book {
+export function openBook(section: SectionCase, system: UnitSystem, gripShare = 1): Book {
   const known = new Map<string, SheetFigure>()
   const used = new Set<SheetFigure>()
   const unknowns: SheetFigure[] = []
@@ -108,7 +108,14 @@ export function openBook(section: SectionCase, system: UnitSystem): Book {
       return figure.value * sheetUnit(figure.kind, system).factor
     },
     line: write,
-    finish: () => ({ section, system, givens: [...used], unknowns, lines: numbered(lines) }),
+    finish: () => ({
+      section,
+      system,
+      gripShare,
+      givens: [...used],
+      unknowns,
+      lines: numbered(lines),
+    }),
   }
 }
 

@@ -23,6 +23,8 @@ export interface DerivationOptions {
   /** Ground level at the weld line [m]; null: depths only. */
   readonly groundLevel?: number | null
   readonly leave?: LeaveTerms
+  /** Share of friction resistance and skirt grip that bends leave, 0 to 1; 1 away from bends. */
+  readonly gripShare?: number
 }
 
 const NO_RISE: LeaveTerms = { rateOfRise: null, timeToClear: 0 }
@@ -39,10 +41,17 @@ export function deriveSection(
   result: SectionResult,
   options: DerivationOptions = {},
 ): Derivation {
-  const { system = 'metric', groundLevel = null, leave = NO_RISE } = options
+  const { system = 'metric', groundLevel = null, leave = NO_RISE, gripShare = 1 } = options
   const state = sectionState(section)
-  const book = openBook(section, system)
-  const context: LineContext = { book, section, state, result, names: firstNames() }
+  const book = openBook(section, system, gripShare)
+  const context: LineContext = {
+    book,
+    section,
+    state,
+    result,
+    gripShare,
+    names: firstNames(),
+  }
   writeGeometry(context, { groundLevel })
   // Waves reach up to the loaded crest, so that the shape comes before them.
   const hasWaves = result.thrust.wave > 0

@@ -16,8 +16,14 @@ const BEYOND = 1.05e-7
 /** How far the utilisation at the edge may be from 1, unless the resistance ends there. */
 const UTILISATION_BOUND = 1e-3
 
-function at(section: SectionCase, depth: number) {
-  const evaluation = evaluateSection({ ...section, water: { ...section.water, depth } })
+interface Scanned {
+  readonly section: SectionCase
+  readonly gripShare: number
+}
+
+function at({ section, gripShare }: Scanned, depth: number) {
+  const water = { ...section.water, depth }
+  const evaluation = evaluateSection({ ...section, water }, gripShare)
   const governing = evaluation[evaluation.governs]
   return { holds: evaluation.verdict !== 'fails', used: governing?.utilisation ?? null }
 }
@@ -30,9 +36,9 @@ function at(section: SectionCase, depth: number) {
  * @param towards 1: the upper end of what holds; −1: the lower end.
  * @returns null where it agrees, else what does not.
  */
-export function holdsToFault(section: SectionCase, depth: number, towards: 1 | -1): string | null {
-  const here = at(section, depth)
-  const beyond = at(section, depth + towards * BEYOND)
+export function holdsToFault(scanned: Scanned, depth: number, towards: 1 | -1): string | null {
+  const here = at(scanned, depth)
+  const beyond = at(scanned, depth + towards * BEYOND)
   if (!here.holds) return 'the checks are not met at this depth'
   if (beyond.holds) return 'the checks are still met beyond this depth'
   const isContinuous = here.used !== null && Math.abs(here.used - 1) <= UTILISATION_BOUND

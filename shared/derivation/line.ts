@@ -64,6 +64,8 @@ export type GroupId = (typeof GROUP_IDS)[number]
 export interface Derivation {
   readonly section: SectionCase
   readonly system: UnitSystem
+  /** Share of friction resistance and skirt grip that bends leave. */
+  readonly gripShare: number
   /** What was entered, in the order in which it is first used. */
   readonly givens: readonly SheetFigure[]
   /** Roots that stand in lines before their own. */

@@ -45,7 +45,7 @@ function assertInputs(line: DerivationLine, known: ReadonlyMap<string, SheetFigu
   }
 }
 
-function assertLine(line: DerivationLine, { section, system }: Derivation): void {
+function assertLine(line: DerivationLine, { section, system, gripShare }: Derivation): void {
   const { result, symbol } = line
   if (result.symbol !== symbol) fail(line, 'expression', `the result is ${result.symbol}`)
   if (sheetUnit(result.kind, system).unit !== result.unit) {
@@ -53,7 +53,11 @@ function assertLine(line: DerivationLine, { section, system }: Derivation): void
   }
   if (isSearch(line.formula)) {
     const depth = result.value * sheetUnit(result.kind, system).factor
-    const fault = holdsToFault(section, depth, line.formula === LARGEST_HOLDING ? 1 : -1)
+    const fault = holdsToFault(
+      { section, gripShare },
+      depth,
+      line.formula === LARGEST_HOLDING ? 1 : -1,
+    )
     if (fault !== null) fail(line, 'figure', fault)
     return
   }

@@ -154,6 +154,7 @@ export const derivationTexts = {
     L: 'Skirt, weld line to wet edge',
     b: 'Nominal contact strip',
     m: 'Mass per metre run',
+    s_g: 'Share of the friction that the bend leaves',
     mu: 'Friction, skirt on ground',
     V: 'Current against the line',
     H_s: 'Significant wave height',

@@ -16,10 +16,14 @@ export interface ComparedAs {
 
 /**
  * Factor and utilisation of a check: FS = R / E, u = n E / R. Where nothing acts, or nothing
- * resists, or the basis does not ask, the line is left out and the summary says why.
+ * resists, or the basis does not ask, the line is left out and the summary says why. Beside a bend
+ * part of the skirt is missing, and friction counts with the share that is left.
  */
-export function writeCheck({ book, result }: LineContext, compared: ComparedAs): void {
-  const { check, group, resistance, demand, suffix, source = 'basis' } = compared
+export function writeCheck({ book, result, gripShare }: LineContext, compared: ComparedAs): void {
+  const { check, group, demand, suffix, source = 'basis' } = compared
+  const isShared = gripShare < 1 && (check === 'sliding' || check === 'skirt')
+  const resistance = isShared ? `(s_g * ${compared.resistance})` : compared.resistance
+  if (isShared) book.given('s_g', gripShare, 'ratio')
   const answer = result[check]
   if (answer.factor !== null) {
     book.line(group, {

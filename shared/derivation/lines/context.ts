@@ -9,6 +9,8 @@ export interface LineContext {
   readonly section: SectionCase
   readonly state: SectionState
   readonly result: SectionResult
+  /** Share of friction resistance and skirt grip that bends leave, 0 to 1. */
+  readonly gripShare: number
   /** Names that the lines before have made known, where a case may do without. */
   readonly names: Names
 }
