@@ -15,6 +15,9 @@ export function createQueryClient(): QueryClient {
     defaultOptions: {
       queries: {
         staleTime: 10_000,
+        // Answers are replaced, never changed in place: watching each figure of a survey of two
+        // thousand stations takes seconds.
+        shallow: true,
         // Without a network the question is asked all the same: its failure is what the page shows.
         networkMode: 'always',
         retry: (failures, error) => failures < RETRIES && mayPass(error),

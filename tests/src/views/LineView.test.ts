@@ -15,7 +15,22 @@ afterEach(clearPage)
 
 const PATH = '/projects/p/lines/l'
 const SCENARIOS = `GET /api${PATH}/scenarios`
-const press = async (name: string) => userEvent.click(await screen.findByRole('button', { name }))
+/** Queries by role compute the name of every cell of a survey, which takes seconds in jsdom. */
+const cell = (name: string) =>
+  document.querySelector<HTMLInputElement>(`input[aria-label="${name}"]`) ??
+  expect.fail(`No cell is called "${name}"`)
+const button = (name: string) =>
+  [...document.querySelectorAll('button')].find(({ textContent }) => textContent.trim() === name) ??
+  expect.fail(`No button says "${name}"`)
+const press = async (name: string) => userEvent.click(await vi.waitFor(() => button(name)))
+
+const manyStations = (): Line['stations'] =>
+  Array.from({ length: 2000 }, (_, i) => ({
+    ...line().stations[0]!,
+    chainage: i,
+    x: null,
+    y: null,
+  }))
 
 describe('all scenarios in one table', () => {
   it('says level, assumptions, verdict in words, weakest place, limit and who changed it', async () => {
@@ -106,9 +121,9 @@ describe('the survey', () => {
     })
     await openPage(PATH)
     await press('Change the survey')
-    const cell = screen.getByRole('textbox', { name: 'Ground, row 6' })
-    await userEvent.clear(cell)
-    await userEvent.type(cell, '2,81')
+    const ground = cell('Ground, row 6')
+    await userEvent.clear(ground)
+    await userEvent.type(ground, '2,81')
     await press('Save the survey')
     expect(await screen.findByText(/Survey saved/)).toBeTruthy()
     const [sent] = api.sent(`PATCH /api${PATH}`) as [
@@ -123,12 +138,29 @@ describe('the survey', () => {
     fakeApi(projectRoutes())
     await openPage(PATH)
     await press('Change the survey')
-    await userEvent.click(screen.getByRole('textbox', { name: 'Ground, row 27' }))
+    await userEvent.click(cell('Ground, row 27'))
     await userEvent.paste('3,40\tturf\n3,60\tturf\n3,70\tturf')
-    const read = (name: string) => screen.getByRole<HTMLInputElement>('textbox', { name }).value
+    const read = (name: string) => cell(name).value
     expect(read('Ground, row 28')).toBe('3,60')
     expect(read('Ground, row 29')).toBe('3,70')
     expect(screen.getByText('Row 29, Chainage: nothing entered')).toBeTruthy()
+  })
+
+  it('of two thousand stations is typed into page by page, with the keys of a spreadsheet', async () => {
+    fakeApi({ ...projectRoutes(), [`GET /api${PATH}`]: () => line({ stations: manyStations() }) })
+    await openPage(PATH)
+    expect(await screen.findByText('1 to 50 of 2000')).toBeTruthy()
+    await press('Change the survey')
+    expect(document.querySelectorAll('[aria-label^="Ground, row"]')).toHaveLength(50)
+    await userEvent.type(cell('Ground, row 50'), '{ArrowDown}')
+    expect(document.activeElement).toBe(cell('Ground, row 51'))
+    expect(screen.getByText('51 to 100 of 2000')).toBeTruthy()
+    await userEvent.type(cell('Ground, row 51'), 'low{ArrowUp}')
+    expect(document.activeElement).toBe(cell('Ground, row 50'))
+    await press('Row 51, Ground: not a number')
+    expect(document.activeElement).toBe(cell('Ground, row 51'))
+    await press('Add a station')
+    expect(document.activeElement).toBe(cell('Chainage, row 2001'))
   })
 
   it('shows what the server refused and keeps what was typed', async () => {
@@ -139,22 +171,22 @@ describe('the survey', () => {
     })
     await openPage(PATH)
     await press('Change the survey')
-    const cell = screen.getByRole<HTMLInputElement>('textbox', { name: 'Note, row 1' })
-    await userEvent.type(cell, ', checked')
+    const note = cell('Note, row 1')
+    await userEvent.type(note, ', checked')
     await press('Save the survey')
     expect(await screen.findByText('Something does not fit yet')).toBeTruthy()
-    expect(cell.value).toContain(', checked')
+    expect(note.value).toContain(', checked')
   })
 
   it('warns of what looks like a slip and lets it stand', async () => {
     fakeApi(projectRoutes())
     await openPage(PATH)
     await press('Change the survey')
-    const cell = screen.getByRole('textbox', { name: 'x, row 2' })
-    await userEvent.clear(cell)
-    await userEvent.type(cell, '14')
+    const x = cell('x, row 2')
+    await userEvent.clear(x)
+    await userEvent.type(x, '14')
     expect(screen.getByText(/^Row 2: 10 is 10\.00 m from the station before it/)).toBeTruthy()
-    const save = screen.getByRole<HTMLButtonElement>('button', { name: 'Save the survey' })
+    const save = button('Save the survey')
     expect(save.disabled).toBe(false)
   })
 })
