@@ -36,6 +36,8 @@ function ownFaults(content: ScenarioContent, { stations, sectionLength }: Survey
   return [
     ...faultOutside('waterLevel', content.waterLevel, LEVEL),
     ...faultOutside('levelNow', content.levelNow, LEVEL),
+    ...faultOutside('levelLow', content.levelLow, LEVEL),
+    ...faultOutside('levelHigh', content.levelHigh, LEVEL),
     ...faultOutside('dryLevel', content.dryLevel, LEVEL),
     ...faultOutside('place', content.place, place),
     ...faultOutside('rateOfRise', content.rateOfRise, RATE_OF_RISE),
@@ -43,8 +45,9 @@ function ownFaults(content: ScenarioContent, { stations, sectionLength }: Survey
   ]
 }
 
-function faultOutside(field: string, value: number | null, range: AllowedRange): Fault[] {
-  if (value === null || isInRange(value, range)) return []
+function faultOutside(field: string, value: number | null | undefined, range: AllowedRange): Fault[] {
+  // Contents that were stored before a field was there lack it.
+  if (value === null || value === undefined || isInRange(value, range)) return []
   return [rangeFault(`content.${field}`, value, range)]
 }
 

@@ -37,6 +37,8 @@ export type GroundAssumption = z.output<typeof groundAssumptionSchema>
 export const scenarioContentSchema = z.strictObject({
   waterLevel: metres('Level that is checked, in the datum of the line'),
   levelNow: metres('Level at this moment').nullable().default(null),
+  levelLow: metres('Low end of the band of the level').nullable().default(null),
+  levelHigh: metres('High end of the band of the level').nullable().default(null),
   dryLevel: metres('Level of water standing on the dry side').nullable().default(null),
   place: metres('Chainage that the workbench looks at'),
   sizes: z.array(sizeRunSchema).min(1).max(2000),

@@ -41,6 +41,8 @@ export function newContent(line: SurveyedLine, tubes: TubeBook): ScenarioContent
   return {
     waterLevel: Number((lowest.groundLevel + FIRST_DEPTH).toFixed(3)),
     levelNow: null,
+    levelLow: null,
+    levelHigh: null,
     dryLevel: null,
     place: lowest.chainage,
     sizes: [{ from, to, barrier: barrierOf(tube, tubes), edgeFactor: null }],
