@@ -225,7 +225,9 @@ const LEAKS: readonly Formula[] = [
       tex`Q \le \ell\left(\tfrac{2}{3}\right)^{1.5}\sqrt{g}\,h^{1.5}, \qquad Q_\text{first rush} = \ell\,\tfrac{8}{27}\sqrt{g}\,h^{1.5}`,
     ],
     symbols: [symbol(tex`\ell`, 'Length of one section', 'm', '1 to 100 m'), h, g],
-    assumptions: ['The whole section is gone at once, and the ground behind it is dry.'],
+    assumptions: [
+      'The whole section is gone at once, and the ground behind it is dry. The first rush is the smaller of both: still water must first be set in motion.',
+    ],
     source: 'critical depth; Ritter 1892 for the first rush (from memory)',
     tag: 'memory',
     worked: worked(

@@ -79,14 +79,14 @@ const LEVELS: readonly Formula[] = [
     worked: worked(
       {
         holds: [tex`h_\text{holds}`, 0.489, 'm'],
-        rise: [tex`\text{rise}`, 0.1 / 3600, 'm/s'],
+        rise: [tex`\text{rise}`, 0.1, 'm/h'],
         time: [tex`t_\text{clear}`, 1200, 's'],
       },
       (x) => {
         const leave = leaveLevel({
           holdsToDepth: x.holds,
           depth: 0.4,
-          rateOfRise: x.rise,
+          rateOfRise: x.rise / 3600,
           timeToClear: x.time,
         })
         return [[tex`h_\text{leave}`, leave.depth ?? 0, 'm']]

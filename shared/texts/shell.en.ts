@@ -5,6 +5,7 @@ export const shellTexts = {
   skip: 'Skip to the page',
   menu: 'Places',
   desk: 'Desk',
+  method: 'Method',
   signIn: 'Sign in',
   signOut: 'Sign out',
   notSignedOut: 'Not signed out: the server did not answer. Try again.',

@@ -76,7 +76,8 @@ async function toPng(svg: Blob, { width, height }: Scene): Promise<Blob> {
 /** Long enough for the browser to have taken the file over [ms]. */
 const KEPT = 10_000
 
-function download(file: Blob, name: string): void {
+/** Hands a file to the browser, which asks where to put it. */
+export function download(file: Blob, name: string): void {
   const address = URL.createObjectURL(file)
   const link = document.createElement('a')
   link.href = address

@@ -1,6 +1,7 @@
 import { createRouter, createWebHistory, type RouteRecordRaw } from 'vue-router'
 import QuickCheckView from '@/views/QuickCheckView.vue'
 import { memberRoutes } from './member-routes'
+import { methodRoute } from './method-route'
 
 declare module 'vue-router' {
   interface RouteMeta {
@@ -16,6 +17,7 @@ export const routes: RouteRecordRaw[] = [
     component: QuickCheckView,
     meta: { titleKey: 'quickCheck.title' },
   },
+  methodRoute,
   ...memberRoutes,
   {
     path: '/:path(.*)*',
@@ -29,6 +31,9 @@ export function createAppRouter(history = createWebHistory()) {
   return createRouter({
     history,
     routes,
-    scrollBehavior: (to, from, saved) => (to.path === from.path ? false : (saved ?? { top: 0 })),
+    scrollBehavior: (to, from, saved) => {
+      if (to.path === from.path) return false
+      return saved ?? (to.hash ? { el: to.hash } : { top: 0 })
+    },
   })
 }

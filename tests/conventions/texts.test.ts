@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest'
 import { texts } from '../../shared/texts'
 import { areaTexts } from '../../shared/texts/member-area'
+import { methodAreaTexts } from '../../shared/texts/method-area'
 import { sectionDetails } from '../../shared/texts/section-details.en'
 import { sourceFiles } from '../support/source-files'
 
@@ -15,8 +16,8 @@ function leaves(node: object, prefix = ''): Map<string, string> {
   return found
 }
 
-/** What is loaded at once and what comes with the area behind the sign-in. */
-const all = { ...texts.en, ...areaTexts.en, ...sectionDetails.en }
+/** What is loaded at once, and what comes with the area behind the sign-in and the Method page. */
+const all = { ...texts.en, ...areaTexts.en, ...sectionDetails.en, ...methodAreaTexts.en }
 const keys = [...leaves(all).keys()]
 const AREAS = Object.keys(all).join('|')
 
