@@ -24,6 +24,8 @@ function recordModules(): Plugin {
   }
 }
 
+const ENGINE_TESTS = ['tests/shared/**/*.test.ts']
+
 /** Parts of vue-i18n that are not used: options API, global components, message compiler. */
 const WITHOUT_I18N_EXTRAS = {
   __VUE_I18N_LEGACY_API__: false,
@@ -50,10 +52,23 @@ export default defineConfig({
     assetsInlineLimit: (file) => (/\.(woff2?|ttf)$/.test(file) ? false : undefined),
   },
   test: {
-    include: ['tests/**/*.test.ts'],
-    exclude: ['tests/e2e/**'],
     environment: 'node',
     setupFiles: ['tests/support/fixed-seed.ts'],
     server: { deps: { inline: ['element-plus'] } },
+    // A property test draws thousands of cases, also on a machine that has other work.
+    testTimeout: 30_000,
+    maxWorkers: 2,
+    projects: [
+      // Pure functions leave nothing behind, so their files share what is loaded.
+      { extends: true, test: { name: 'engine', include: ENGINE_TESTS, isolate: false } },
+      {
+        extends: true,
+        test: {
+          name: 'product',
+          include: ['tests/**/*.test.ts'],
+          exclude: [...ENGINE_TESTS, 'tests/e2e/**'],
+        },
+      },
+    ],
   },
 })

@@ -24,24 +24,27 @@ const BUILD_MARK = join(ROOT, 'dist', '.sources')
 const inRoot = (path) => join(ROOT, path)
 
 /**
- * Runs a program to its end and gives its exit status; what it prints is shown as it comes. With a
- * time limit it gets a process group of its own, so that nothing it started outlives it.
+ * Runs a program to its end and gives its exit status; what it prints is shown as it comes, or given
+ * to `print` where several run at once. With a time limit it gets a process group of its own, so that
+ * nothing it started outlives it.
  */
-export function run(program, words, { env = {}, timeout } = {}) {
+export function run(program, words, { env = {}, timeout, print } = {}) {
   return new Promise((resolve) => {
+    const out = print ? 'pipe' : 'inherit'
     const child = spawn(program, words, {
       cwd: ROOT,
       env: { ...process.env, ...env },
-      stdio: ['ignore', 'inherit', 'inherit'],
+      stdio: ['ignore', out, out],
       detached: timeout !== undefined,
     })
+    for (const stream of print ? [child.stdout, child.stderr] : []) stream.on('data', print)
     const release = timeout === undefined ? () => undefined : endGroupInTime(child, timeout)
     child.on('error', (error) => {
       process.stderr.write(`${program}: ${error.message}\n`)
       release()
       resolve(1)
     })
-    child.on('exit', (status) => {
+    child.on('close', (status) => {
       release()
       resolve(status ?? 1)
     })

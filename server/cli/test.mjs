@@ -8,8 +8,11 @@ import { assertNode, installIfNeeded, run } from './preparation.mjs'
 
 const MINUTE = 60_000
 
-/** Checks that have no tests of their own: one that fails counts as one failure. */
-const GATES = ['check:types', 'check:lint', 'check:format']
+/**
+ * Checks that have no tests of their own: one that fails counts as one failure. The two rows run
+ * beside each other.
+ */
+const GATES = [['check:types'], ['check:lint', 'check:format', 'build']]
 
 const total = { passed: 0, failed: 0 }
 
@@ -22,12 +25,25 @@ function countFailure(what) {
   total.failed += 1
 }
 
+/** Runs one check; what it printed is shown in one piece at its end. */
 async function gate(script) {
+  const printed = []
+  const status = await run('npm', ['run', '--silent', script], {
+    env: { NODE_ENV: 'production' },
+    timeout: 6 * MINUTE,
+    print: (chunk) => printed.push(chunk),
+  })
   heading(script)
-  const env = { NODE_ENV: 'production' }
-  const status = await run('npm', ['run', '--silent', script], { env, timeout: 5 * MINUTE })
+  process.stdout.write(Buffer.concat(printed))
   if (status !== 0) countFailure(script)
   return status === 0
+}
+
+/** Runs checks one after the other; tells whether the last one passed. */
+async function gatesInTurn(scripts) {
+  let isPassed = false
+  for (const script of scripts) isPassed = await gate(script)
+  return isPassed
 }
 
 /** Runs a test runner that writes a report; a runner that fails without a failed test is one too. */
@@ -118,9 +134,9 @@ async function runAll(folder) {
     countFailure('the dependencies could not be installed')
     return
   }
-  for (const script of GATES) await gate(script)
+  const passed = await Promise.all(GATES.map(gatesInTurn))
+  const isBuilt = passed.at(-1)
   await suite(unitTests(folder))
-  const isBuilt = await gate('build')
   if (isBuilt && (await installChromium())) await suite(browserTests(folder))
 }
 
