@@ -2,7 +2,7 @@ import type { Message } from '../texts/format-text'
 import { DESIGN_RATIOS, designCurve, type DesignCurve } from './chart/design-curves'
 import { designFrame, type DesignFrame } from './chart/design-frame'
 import type { PresentCase } from './chart/present-case'
-import { LabelPlacer, spreadColumn, boxAround } from './label-placer'
+import { boxAround, LabelPlacer, spreadColumn, type Spot } from './label-placer'
 import { areaPath, linePath, segmentsPath } from './path-data'
 import type { Point, Scene, SceneItem, ShapeRole, TextItem, View } from './scene'
 import type { MeasureText } from './text-width'
@@ -22,7 +22,7 @@ export function designChartScene(input: DesignChartInput): Scene {
   const placer = new LabelPlacer(view, measure)
   labelAxes(frame, placer)
   const names = curveNames(curves, frame)
-  for (const { points } of own ? [own] : []) avoid(points.map(toPixel(frame)), placer)
+  for (const { points } of own ? [...curves, own] : []) avoid(points.map(toPixel(frame)), placer)
   if (present) labelPresent(present, frame, placer)
   return {
     ...view,
@@ -170,15 +170,20 @@ function presentMessage({ ratio, depth, crest }: PresentCase): Message {
   return { key: 'method.chart.present', values: { ...values, crest: crest.toFixed(3) } }
 }
 
+/** Where the label of the marked case is tried, in lines of text below it. */
+const LINES_BELOW = [2.5, 4, 6, 8, 10, 13, 16, 20] as const
+
 function labelPresent(present: PresentCase, frame: DesignFrame, placer: LabelPlacer): void {
   const { toX, toY, font, left, bottom } = frame
   const x = toX(Math.min(1, present.depth))
   const y = present.crest === null ? (frame.top + bottom) / 2 : toY(present.crest)
   const label = { id: 'present', role: 'label', size: font, weight: 600 } as const
-  placer.placeSurely({ ...label, message: presentMessage(present) }, [
-    { x: x - 8, y: y + 2.6 * font, anchor: 'end' },
-    { x: left + 10, y: y + 3.4 * font, anchor: 'start' },
+  const spots = LINES_BELOW.flatMap((lines): Spot[] => [
+    { x: x - 8, y: y + lines * font, anchor: 'end' },
+    { x: x + 8, y: y + lines * font, anchor: 'start' },
+    { x: left + 10, y: y + lines * font, anchor: 'start' },
   ])
+  placer.placeSurely({ ...label, message: presentMessage(present) }, spots)
 }
 
 function describe(present: PresentCase | null): readonly Message[] {

@@ -8,7 +8,7 @@ export function unitTex(unit: string): string {
   if (unit === '–') return ''
   const words = unit
     .replace(/[²³]/g, (power) => POWERS[power]!)
-    .replaceAll('°', '^\\circ ')
+    .replaceAll('°', '{}^{\\circ}')
     .replaceAll('√Pa', '\\sqrt{Pa}')
     .replaceAll('·', '\\,')
     .replaceAll('%', '\\%')
@@ -17,8 +17,8 @@ export function unitTex(unit: string): string {
   return `\\mathrm{${words}}`
 }
 
-/** A number as TeX: four digits that count, powers of ten where it is very large or very small. */
-export function numberTex(value: number, digits = 4): string {
+/** A number as TeX: five digits that count, powers of ten where it is very large or very small. */
+export function numberTex(value: number, digits = 5): string {
   if (value === 0) return '0'
   const size = Math.abs(value)
   if (size < 1e-3 || size >= 1e6) {

@@ -9,7 +9,7 @@ export function symbol(tex: string, meaning: string, unit: string, range?: strin
 
 /** What a field may be, in the words of its own range. */
 function rangeWords({ max, ...range }: FieldRange): string {
-  if (typeof max === 'number') return describeRange({ ...range, max })
+  if (typeof max === 'number') return describeRange({ ...range, max }).replace('-', '−')
   return `${range.min} to ${max.times} D`
 }
 

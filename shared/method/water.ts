@@ -17,9 +17,7 @@ const TEMPERATURE = { t: ['t', 10, '°C'] } as const satisfies Record<string, Gi
 export const WATER: MethodSection = {
   id: 'water',
   title: 'Water and gravity',
-  intro: [
-    'The program takes 1000 kg/m³ and 9.81 m/s² unless other values are entered; both are printed on the sheet.',
-  ],
+  intro: ['The program takes 1000 kg/m³ and 9.81 m/s² unless other values are entered.'],
   formulas: [
     {
       id: 'density',
@@ -74,7 +72,8 @@ export const WATER: MethodSection = {
       title: 'Density of sea water',
       tex: [
         tex`\rho = \rho_0(t) + A(t)\,S + B(t)\,S^{3/2} + 4.8314\times10^{-4}\,S^2`,
-        tex`\rho_0 = 999.842\,594 + 6.793\,952\times10^{-2}t - 9.095\,29\times10^{-3}t^2 + 1.001\,685\times10^{-4}t^3 - 1.120\,083\times10^{-6}t^4 + 6.536\,332\times10^{-9}t^5`,
+        tex`\rho_0 = 999.842\,594 + 6.793\,952\times10^{-2}t - 9.095\,29\times10^{-3}t^2 + 1.001\,685\times10^{-4}t^3`,
+        tex`\qquad - 1.120\,083\times10^{-6}t^4 + 6.536\,332\times10^{-9}t^5`,
         tex`A = 0.824\,493 - 4.0899\times10^{-3}t + 7.6438\times10^{-5}t^2 - 8.2467\times10^{-7}t^3 + 5.3875\times10^{-9}t^4`,
         tex`B = -5.724\,66\times10^{-3} + 1.0227\times10^{-4}t - 1.6546\times10^{-6}t^2`,
       ],

@@ -107,8 +107,6 @@ export const methodTexts = {
     references: 'Reference only',
     referencesIntro:
       'Values of the trade that the program does not compute. They are not counted above; tests recompute those that close.',
-    case: 'Value',
-    why: 'Why it is not computed',
     topics: {
       hydrostatics: 'Hydrostatics',
       stability: 'Stability with uplift',

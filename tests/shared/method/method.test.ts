@@ -48,10 +48,10 @@ describe('the method', () => {
 })
 
 describe('a figure as TeX', () => {
-  it('keeps four digits that count', () => {
-    expect(numberTex(1483.7625)).toBe('1484')
-    expect(numberTex(0.41915234)).toBe('0.4192')
-    expect(numberTex(101_325)).toBe('101300')
+  it('keeps five digits that count', () => {
+    expect(numberTex(1483.7625)).toBe('1483.8')
+    expect(numberTex(0.41915234)).toBe('0.41915')
+    expect(numberTex(101_325)).toBe('101330')
     expect(numberTex(0)).toBe('0')
   })
 
@@ -61,7 +61,7 @@ describe('a figure as TeX', () => {
   })
 
   it('writes powers of ten where a number is very small or very large', () => {
-    expect(numberTex(5.3318e-5)).toBe('5.332\\times10^{-5}')
+    expect(numberTex(5.3318e-5)).toBe('5.3318\\times10^{-5}')
     expect(numberTex(-2_500_000)).toBe('-2.5\\times10^{6}')
   })
 
