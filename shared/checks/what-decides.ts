@@ -1,13 +1,25 @@
 import type { CatalogueBarrier } from '../catalogue/barriers'
 import { BASIS_IDS, type BasisId } from '../catalogue/check-bases'
 import type { SectionCase } from '../schemas/section-case'
+import { SECTION_RANGES } from '../schemas/section-ranges'
 import type { HoldsTo } from '../schemas/section-result'
 import type { GripShareFor } from './bend-loss'
 import { holdingProfile, holdsToAt } from './holds-to'
 
 /** Edge factors that the product offers by name. Judgement, unverified. */
-export const EDGE_FACTORS = { open: 1, weighed: 0.5, sealed: 0 } as const
+export const EDGE_FACTORS = {
+  open: 1,
+  weighed: SECTION_RANGES['uplift.weighedEdgeFactor'].default,
+  sealed: 0,
+} as const
 export type EdgeId = keyof typeof EDGE_FACTORS
+
+/** The same for a case, which may count with a weighed edge of its own. */
+export function edgeFactorsOf({
+  weighedEdgeFactor,
+}: SectionCase['uplift']): Record<EdgeId, number> {
+  return { ...EDGE_FACTORS, weighed: weighedEdgeFactor ?? EDGE_FACTORS.weighed }
+}
 
 /** Friction of a slippery surface, to show what it would change. Judgement, unverified. */
 export const SLIPPERY_FRICTION = 0.25
@@ -60,12 +72,14 @@ function edgeAlternatives(section: SectionCase): readonly Draft[] {
   const isSealed = uplift.model === 'none'
   // Nothing under the skirt is an assumption, too: show what the edge would do without it.
   const model = isSealed ? 'linear' : uplift.model
-  return (Object.keys(EDGE_FACTORS) as EdgeId[])
-    .filter((id) => EDGE_FACTORS[id] !== (isSealed ? EDGE_FACTORS.sealed : uplift.edgeFactor))
+  const factors = edgeFactorsOf(uplift)
+  const chosen = isSealed ? EDGE_FACTORS.sealed : uplift.edgeFactor
+  return (Object.keys(factors) as EdgeId[])
+    .filter((id) => factors[id] !== chosen)
     .map((id) => ({
       id: `edge-${id}` as const,
       group: 'edge' as const,
-      section: { ...section, uplift: { ...uplift, model, edgeFactor: EDGE_FACTORS[id] } },
+      section: { ...section, uplift: { ...uplift, model, edgeFactor: factors[id] } },
     }))
 }
 

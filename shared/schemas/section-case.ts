@@ -72,6 +72,13 @@ export const sectionCaseSchema = z
           .default('linear')
           .meta({ description: 'Water under the skirt' }),
         edgeFactor: optional('uplift.edgeFactor'),
+        weighedEdgeFactor: z
+          .number()
+          .optional()
+          .meta({
+            ...describe('uplift.weighedEdgeFactor'),
+            default: fieldRange('uplift.weighedEdgeFactor').default,
+          }),
         diffusivity: absent('uplift.diffusivity'),
         time: absent('uplift.time'),
       })

@@ -38,6 +38,11 @@ export function valueAt(section: object, path: string): unknown {
     .reduce<unknown>((node, key) => (node as Record<string, unknown> | undefined)?.[key], section)
 }
 
+/** True where the default stands in: nothing at all, or no quantity where there need not be one. */
+function isLeftOut(value: unknown, fallback: number | null | undefined): boolean {
+  return value === undefined ? fallback !== undefined : value === null && fallback === null
+}
+
 /**
  * Everything in a case that lies outside its range or is missing where a choice asks for it. An
  * empty list: the case can be computed.
@@ -46,7 +51,7 @@ export function sectionFaults(section: SectionCase): readonly Fault[] {
   const read = (path: NumericPath): unknown => valueAt(section, path)
   const outside = NUMERIC_PATHS.flatMap((path) => {
     const value = read(path)
-    if ((value ?? null) === null && fieldRange(path).default === null) return []
+    if (isLeftOut(value, fieldRange(path).default)) return []
     const range = resolveRange(path, read)
     return isInRange(value as number, range) ? [] : [rangeFault(path, value, range)]
   })

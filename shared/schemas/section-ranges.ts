@@ -109,6 +109,14 @@ export const SECTION_RANGES = {
     default: 1,
     meaning: 'Share of the full head that reaches the skirt edge: 0 sealed, 1 open',
   },
+  'uplift.weighedEdgeFactor': {
+    min: 0,
+    max: 1,
+    unit: '–',
+    default: 0.5,
+    meaning:
+      'Edge factor that a weighed edge counts with, where it is shown what weighing would change. Judgement, unverified',
+  },
   'uplift.diffusivity': {
     min: 0,
     max: Infinity,

@@ -123,6 +123,18 @@ export const quickCheckFieldTexts = {
     label: 'Skirt edge',
     tip: 'How much of the water pressure gets under the wet edge of the skirt: 0 % sealed, 100 % open. No published figure exists for such skirts; open is the safe assumption.',
   },
+  weighedEdge: {
+    label: 'A weighed edge counts as',
+    tip: 'How much of the water pressure gets under an edge that is weighed down with bags. 50 % is judgement, unverified: no published figure exists.',
+  },
+  edgeWeight: {
+    label: 'Weight on that edge',
+    tip: 'Bags on the wet edge of the skirt that make it a weighed edge. 2 bags of 20 kg per metre are judgement, unverified.',
+  },
+  undrainedStrength: {
+    label: 'Soft ground, c_u',
+    tip: 'Undrained shear strength of clay or silt. Then it bears no more than its strength times the base, and 0.4 of the weight on it (EN 1997-1, 6.5.3, from memory). Empty: friction alone.',
+  },
   diffusivity: {
     label: 'Diffusivity',
     tip: 'How fast pressure spreads under the skirt. Large in sand, small in clay.',

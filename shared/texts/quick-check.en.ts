@@ -202,9 +202,9 @@ export const quickCheckTexts = {
     note: 'One thing changed, all else as it is. Every figure is the depth up to which every check is met.',
     group: { edge: 'Skirt edge', friction: 'Friction', basis: 'Check basis', size: 'Size' },
     edge: {
-      open: 'open, 100 %',
-      weighed: 'weighed, 50 %',
-      sealed: 'sealed, 0 %',
+      open: 'open, {share}',
+      weighed: 'weighed, {share}',
+      sealed: 'sealed, {share}',
       typed: '{share} open',
       none: 'none under it (sealed seat)',
     },
@@ -214,7 +214,7 @@ export const quickCheckTexts = {
     chosen: 'chosen',
     nothing: 'none',
     judgement:
-      'Weighed and sealed edges, and the slippery surface, are judgement, unverified. A weighed edge takes 2 edge bags of 20 kg per metre.',
+      'Weighed and sealed edges, and the slippery surface, are judgement, unverified. A weighed edge takes {weight} of bags.',
     adverse:
       'The adverse limit: an open edge with a sealed seat puts the full pressure under the whole base, and nothing holds.',
     noSkirt: 'Without a skirt none of this changes the answer: put the skirt on first.',

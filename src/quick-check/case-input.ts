@@ -59,10 +59,12 @@ export function sectionCase(input: CaseInput): SectionCase {
       suitable: choices.suitable === 'yes' && isSuitableSurface(choices.surface),
       permeability: values.permeability,
       layerThickness: values.layerThickness,
+      undrainedStrength: values.undrainedStrength,
     },
     uplift: {
       model: choices.upliftModel,
       edgeFactor: given(values.edgeFactor),
+      weighedEdgeFactor: given(values.weighedEdge),
       diffusivity: isDeveloping ? values.diffusivity : null,
       time: isDeveloping ? values.upliftTime : null,
     },

@@ -1,4 +1,4 @@
-import { EDGE_FACTORS, type Alternative } from '@shared/checks/what-decides'
+import { edgeFactorsOf, type Alternative } from '@shared/checks/what-decides'
 import { basisKey } from './basis-key'
 import type { SectionCase } from '@shared/schemas/section-case'
 import type { HoldsTo } from '@shared/schemas/section-result'
@@ -53,9 +53,8 @@ export function decisionGroups(
 
 function chosenName(id: DecisionGroupId, section: SectionCase, given: Given): Message {
   if (id === 'edge') {
-    const { model, edgeFactor } = section.uplift
-    if (model === 'none') return { key: 'quickCheck.decides.edge.none' }
-    return edgeName(edgeFactor, given)
+    if (section.uplift.model === 'none') return { key: 'quickCheck.decides.edge.none' }
+    return edgeName(section.uplift, given)
   }
   if (id === 'friction') {
     const values = { friction: given(section.ground.friction, 'ratio') }
@@ -77,11 +76,11 @@ function alternativeName({ group, section }: Alternative, given: Given): Message
   return chosenName(group, section, given)
 }
 
-function edgeName(edgeFactor: number, given: Given): Message {
-  const named = Object.entries(EDGE_FACTORS).find(([, factor]) => factor === edgeFactor)
-  if (named) return { key: `quickCheck.decides.edge.${named[0]}` }
+function edgeName(uplift: SectionCase['uplift'], given: Given): Message {
+  const { edgeFactor } = uplift
+  const named = Object.entries(edgeFactorsOf(uplift)).find(([, factor]) => factor === edgeFactor)
   return {
-    key: 'quickCheck.decides.edge.typed',
+    key: `quickCheck.decides.edge.${named?.[0] ?? 'typed'}`,
     values: { share: given(edgeFactor, 'percent') },
   }
 }

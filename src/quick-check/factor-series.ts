@@ -1,5 +1,5 @@
 import { evaluateSection } from '@shared/checks/evaluate-section'
-import { EDGE_FACTORS } from '@shared/checks/what-decides'
+import { EDGE_FACTORS, edgeFactorsOf } from '@shared/checks/what-decides'
 import type { FactorPoint, FactorSeries } from '@shared/drawing/factor-chart'
 import type { SectionCase } from '@shared/schemas/section-case'
 import type { Message } from '@shared/texts/format-text'
@@ -12,7 +12,7 @@ export function factorSeries(section: SectionCase): readonly FactorSeries[] {
   const { model, edgeFactor } = section.uplift
   const chosen: FactorSeries = {
     id: 'chosen',
-    label: model === 'none' ? { key: 'quickCheck.chart.series.none' } : edgeLabel(edgeFactor),
+    label: model === 'none' ? { key: 'quickCheck.chart.series.none' } : edgeLabel(section.uplift),
     style: 'chosen',
     points: factorPoints(section),
   }
@@ -20,7 +20,7 @@ export function factorSeries(section: SectionCase): readonly FactorSeries[] {
   const other = edgeFactor === EDGE_FACTORS.sealed ? EDGE_FACTORS.open : EDGE_FACTORS.sealed
   const uplift = { ...section.uplift, edgeFactor: other }
   const points = factorPoints({ ...section, uplift })
-  return [chosen, { id: 'other-edge', label: edgeLabel(other), style: 'alternative', points }]
+  return [chosen, { id: 'other-edge', label: edgeLabel(uplift), style: 'alternative', points }]
 }
 
 function factorPoints(section: SectionCase): readonly FactorPoint[] {
@@ -31,8 +31,9 @@ function factorPoints(section: SectionCase): readonly FactorPoint[] {
   })
 }
 
-function edgeLabel(edgeFactor: number): Message {
-  const named = Object.entries(EDGE_FACTORS).find(([, factor]) => factor === edgeFactor)
+function edgeLabel(uplift: SectionCase['uplift']): Message {
+  const { edgeFactor } = uplift
+  const named = Object.entries(edgeFactorsOf(uplift)).find(([, factor]) => factor === edgeFactor)
   if (named) return { key: `quickCheck.chart.series.${named[0]}` }
   const values = { share: { value: edgeFactor, kind: 'percent' as const } }
   return { key: 'quickCheck.chart.series.typed', values }

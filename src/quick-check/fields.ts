@@ -159,6 +159,19 @@ export const FIELDS = {
     path: 'uplift.edgeFactor',
     isAlwaysSent: true,
   },
+  weighedEdge: {
+    kind: 'percent',
+    key: 'weighed',
+    initial: 0.5,
+    path: 'uplift.weighedEdgeFactor',
+  },
+  undrainedStrength: {
+    kind: 'pressure',
+    key: 'undrained',
+    initial: null,
+    path: 'ground.undrainedStrength',
+    isOptional: true,
+  },
   diffusivity: {
     kind: 'diffusivity',
     key: 'diffusivity',
@@ -172,6 +185,13 @@ export const FIELDS = {
     initial: null,
     path: 'uplift.time',
     isOptional: true,
+  },
+  edgeWeight: {
+    kind: 'massPerLength',
+    key: 'edgeweight',
+    initial: 40,
+    range: { min: 0, max: 500, unit: 'kg/m' },
+    group: 'before',
   },
   windGust: {
     kind: 'speed',

@@ -1,5 +1,11 @@
 import type { CatalogueBarrier } from '@shared/catalogue/barriers'
-import type { ScenarioBarrier, ScenarioContent, SizeRun } from '@shared/schemas/scenario'
+import { EDGE_FACTORS } from '@shared/checks/what-decides'
+import type {
+  GroundAssumption,
+  ScenarioBarrier,
+  ScenarioContent,
+  SizeRun,
+} from '@shared/schemas/scenario'
 import { INITIAL_VALUES } from '@/quick-check/address'
 import type { CaseInput, FieldValues } from '@/quick-check/case-input'
 import { CHOICES, INITIAL_CHOICES, OWN_SURFACE, type Choices } from '@/quick-check/choices'
@@ -39,12 +45,14 @@ function valuesAt(content: ScenarioContent, { run, assumption }: PlaceOnLine): F
     diffusivity: uplift.diffusivity,
     upliftTime: uplift.time,
     edgeFactor: run?.edgeFactor ?? uplift.edgeFactor,
+    weighedEdge: uplift.weighedEdgeFactor ?? EDGE_FACTORS.weighed,
     ...(run ? barrierValues(run.barrier) : {}),
     ...(assumption
       ? {
           friction: assumption.friction,
           permeability: assumption.permeability,
           layerThickness: assumption.layerThickness,
+          undrainedStrength: assumption.undrainedStrength ?? null,
         }
       : {}),
   }
@@ -90,6 +98,8 @@ const WRITES: Partial<Record<FieldId, Write>> = {
   diffusivity: (content, diffusivity) => withUplift(content, { diffusivity }),
   upliftTime: (content, time) => withUplift(content, { time }),
   edgeFactor: writeEdge,
+  weighedEdge: (content, value) =>
+    withUplift(content, { weighedEdgeFactor: value ?? EDGE_FACTORS.weighed }),
   gravity: (content, value) => ({ ...content, gravity: value ?? content.gravity }),
   rateOfRise: (content, rateOfRise) => ({ ...content, rateOfRise }),
   clearTime: (content, value) => ({ ...content, timeToClear: value ?? content.timeToClear }),
@@ -101,6 +111,7 @@ const WRITES: Partial<Record<FieldId, Write>> = {
   friction: inGround('friction'),
   permeability: inGround('permeability'),
   layerThickness: inGround('layerThickness'),
+  undrainedStrength: inGround('undrainedStrength'),
   diameter: inBarrier('diameter'),
   skirtLength: inBarrier('skirtLength'),
   contactWidth: inBarrier('contactWidth'),
@@ -150,7 +161,7 @@ function inDebris(field: keyof ScenarioContent['debris']): Write {
   return (content, value) => ({ ...content, debris: { ...content.debris, [field]: value } })
 }
 
-function inGround(field: 'friction' | 'permeability' | 'layerThickness'): Write {
+function inGround(field: Exclude<keyof GroundAssumption, 'surface' | 'suitable'>): Write {
   return (content, value, { surface }) => withGround(content, surface, { [field]: value })
 }
 

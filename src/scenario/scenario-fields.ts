@@ -29,6 +29,8 @@ const FIXED: readonly ScenarioField[] = [
   own('name', 'scenarioPage.field.name', 'text'),
   own('note', 'scenarioPage.field.note', 'text'),
   own('content.waterLevel', 'scenarioPage.field.waterLevel', 'length'),
+  own('content.levelLow', 'scenarioPage.field.levelLow', 'length'),
+  own('content.levelHigh', 'scenarioPage.field.levelHigh', 'length'),
   own('content.levelNow', 'scenarioPage.field.levelNow', 'length'),
   own('content.dryLevel', 'scenarioPage.field.dryLevel', 'length'),
   own('content.basis', 'quickCheck.barrier.basis', 'basis'),
@@ -36,6 +38,7 @@ const FIXED: readonly ScenarioField[] = [
   own('content.sizes', 'scenarioPage.field.sizes', 'sizes'),
   own('content.uplift.model', 'quickCheck.ground.model', 'upliftModel'),
   shared('content.uplift.edgeFactor', 'edgeFactor', 'percent'),
+  shared('content.uplift.weighedEdgeFactor', 'weighedEdge', 'percent'),
   shared('content.uplift.diffusivity', 'diffusivity', 'diffusivity'),
   shared('content.uplift.time', 'upliftTime', 'hours'),
   shared('content.fall', 'fall', 'percent'),
@@ -56,6 +59,7 @@ const OF_GROUND: readonly ScenarioField[] = [
   own('suitable', 'quickCheck.ground.suitable.label', 'suitable'),
   shared('permeability', 'permeability', 'permeability'),
   shared('layerThickness', 'layerThickness', 'length'),
+  shared('undrainedStrength', 'undrainedStrength', 'pressure'),
 ]
 
 /** Every field that any of the states has, in the order in which they are read. */
@@ -75,7 +79,8 @@ export function fieldValue(state: ScenarioState, { id, surface }: ScenarioField)
     const ground = state.content.grounds.find((candidate) => candidate.surface === surface)
     return ground?.[id.split('.').at(-1) as keyof typeof ground] ?? null
   }
-  return id.split('.').reduce<unknown>((node, key) => (node as Record<string, unknown>)[key], state)
+  const read = (node: unknown, key: string) => (node as Record<string, unknown>)[key] ?? null
+  return id.split('.').reduce<unknown>(read, state)
 }
 
 /** The state with one field taken from another. */

@@ -5,6 +5,7 @@ import { evaluateSection } from '../../../shared/checks/evaluate-section'
 import { holdingProfile, holdsToAt } from '../../../shared/checks/holds-to'
 import { leaveLevel } from '../../../shared/checks/leave-level'
 import { whatDecides } from '../../../shared/checks/what-decides'
+import type { SectionCase } from '../../../shared/schemas/section-case'
 import { formatNumber } from '../../../shared/units'
 import { exampleSection } from '../../../shared/verification/example-section'
 
@@ -96,6 +97,14 @@ describe('what decides', () => {
     expect(shown('basis-unusual')).toBe('0.563')
     expect(shown('friction-slippery')).toBe('0.285')
     expect(holdsTo('next-size')).toBeGreaterThan(holdsToAt(holdingProfile(section), 0.55).depth)
+  })
+
+  it('counts a weighed edge as the case says, half open where it says nothing', () => {
+    const edgeOf = (of: SectionCase) =>
+      whatDecides(of, null).find(({ id }) => id === 'edge-weighed')!.section.uplift.edgeFactor
+    const own = { ...section, uplift: { ...section.uplift, weighedEdgeFactor: 0.3 } }
+    expect(edgeOf(section)).toBe(0.5)
+    expect(edgeOf(own)).toBe(0.3)
   })
 
   it('leaves no group out where the choice is the most favourable, or the ground slippery', () => {

@@ -51,6 +51,13 @@ describe('a case from outside', () => {
     ['friction 5', { ...least, ground: { friction: 5 } }, 'ground.friction', 5, 'above 0 to 1.5'],
     ['millimetres', barrier({ diameter: 700 }), 'barrier.diameter', 700, '0.2 to 3 m'],
     ['a missing period', water({ waveHeight: 0.1 }), 'water.wavePeriod', null, '0.5 to 20 s'],
+    [
+      'a weighed edge of more than the whole head',
+      { ...least, uplift: { weighedEdgeFactor: 1.2 } },
+      'uplift.weighedEdgeFactor',
+      1.2,
+      '0 to 1',
+    ],
     ['a wide strip', barrier({ contactWidth: 0.36 }), 'barrier.contactWidth', 0.36, '0 to 0.35 m'],
   ])('is refused for %s, naming field, value and range', (_what, input, path, value, allowed) => {
     const { kind, faults } = faultsOf(input)
