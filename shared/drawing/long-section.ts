@@ -1,17 +1,21 @@
 import { checksTexts } from '../texts/checks.en'
 import { lineTexts } from '../texts/line.en'
+import { linePlanTexts } from '../texts/line-plan.en'
 import { textResolver, type Message } from '../texts/format-text'
 import { groundLevelAt, surfaceAt } from '../calc/line/line-sections'
 import { LabelPlacer } from './label-placer'
 import { longFrame, type LongFrame } from './long-section/long-frame'
 import { labelLongSection } from './long-section/long-labels'
 import type { LongSectionInput } from './long-section/long-section-input'
+import { labelLongMarks } from './long-section/long-marks'
 import { longShapes } from './long-section/long-shapes'
+import { windowed } from './long-section/windowed'
 import type { Scene } from './scene'
 import { measureWith } from './text-width'
 
 export type { LongFrame } from './long-section/long-frame'
 export type {
+  ChainageWindow,
   DrawnRun,
   DrawnSectionOfLine,
   LongSectionInput,
@@ -24,24 +28,26 @@ export interface LongSectionScene extends Scene {
 }
 
 const measureMetric = measureWith(
-  textResolver({ linePage: lineTexts, checks: checksTexts }, 'metric'),
+  textResolver({ linePage: lineTexts, linePlan: linePlanTexts, checks: checksTexts }, 'metric'),
 )
 
 /**
- * Long section of a line: ground, tubes by size, water level, the level to which each section holds,
- * the weakest place and a strip of verdicts. Lengths are to scale; heights are drawn larger by a
- * round factor that the drawing states.
+ * Long section of a line: ground, tubes by size, loaded crest, water level with its band, the level to
+ * which each section holds, low spots, turns, ends, marks, the weakest place and a strip of verdicts.
+ * Lengths are to scale; heights are drawn larger by a round factor that the drawing states.
  */
-export function longSectionScene(input: LongSectionInput): LongSectionScene {
+export function longSectionScene(whole: LongSectionInput): LongSectionScene {
+  const input = windowed(whole)
   const frame = longFrame(input)
   const placer = new LabelPlacer(input.view, input.measure ?? measureMetric)
   const shapes = longShapes(input, frame)
   labelLongSection(input, frame, placer)
+  labelLongMarks(input, frame, placer)
   return {
     width: input.view.width,
     height: input.view.height,
     title: { key: 'linePage.drawing.title' },
-    description: describe(input, frame),
+    description: describe(whole, frame),
     items: [...shapes, ...placer.placed],
     frame,
   }
@@ -56,6 +62,8 @@ export interface LongSectionReading {
   readonly depth: number | null
   readonly diameter: number | null
   readonly holdsToLevel: number | null
+  /** Loaded crest of the section [m]; null where no shape stands. */
+  readonly crestLevel: number | null
 }
 
 /** Reads the figures at a chainage; outside the line those of its nearer end. */
@@ -70,6 +78,7 @@ export function readLongSection(input: LongSectionInput, chainage: number): Long
     depth: waterLevel === null ? null : Math.max(0, waterLevel - groundLevel),
     diameter: runs.filter(isIn).at(-1)?.diameter ?? null,
     holdsToLevel: sections.find(isIn)?.holdsToLevel ?? null,
+    crestLevel: sections.find(isIn)?.crestLevel ?? null,
   }
 }
 

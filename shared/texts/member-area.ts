@@ -3,6 +3,7 @@ import { adminTexts } from './admin.en'
 import { deedsTexts } from './deeds.en'
 import { deskTexts } from './desk.en'
 import { lineTexts } from './line.en'
+import { linePlanTexts } from './line-plan.en'
 import { projectTexts } from './project.en'
 import { scenarioTexts } from './scenario.en'
 import { statesTexts } from './states.en'
@@ -15,6 +16,7 @@ export const areaTexts = {
     deeds: deedsTexts,
     desk: deskTexts,
     linePage: lineTexts,
+    linePlan: linePlanTexts,
     projectPage: projectTexts,
     scenarioPage: scenarioTexts,
     states: statesTexts,

@@ -71,14 +71,19 @@ export function longFrame(input: LongSectionInput): LongFrame {
 
 /** Levels that the drawing must show. */
 function levelsOf(input: LongSectionInput): { low: number; high: number } {
-  const { stations, waterLevel, runs, weakest } = input
+  const { stations, waterLevel, runs, weakest, band } = input
   const grounds = stations.map(({ groundLevel }) => groundLevel)
   const crests = runs.flatMap(({ from, to, diameter }) => {
     const within = stations.filter(({ chainage }) => chainage >= from && chainage <= to)
     const ends = [groundLevelAt(stations, from), groundLevelAt(stations, to)]
     return [...within.map(({ groundLevel }) => groundLevel), ...ends].map((g) => g + diameter)
   })
-  const marks = [waterLevel, weakest?.holdsToLevel ?? null].filter((level) => level !== null)
+  const marks = [
+    waterLevel,
+    weakest?.holdsToLevel ?? null,
+    band?.low ?? null,
+    band?.high ?? null,
+  ].filter((level) => level !== null)
   const all = [...grounds, ...crests, ...marks]
   return {
     low: Math.min(...all) - SOIL,

@@ -23,6 +23,12 @@ export function labelLongSection(
   labelWater(input, frame, placer)
   runs.forEach((_, index) => labelRun(input, frame, placer, index))
   labelSurfaces(input, frame, placer)
+  if (input.datum) {
+    const message = { key: 'linePlan.section.datum', values: { datum: input.datum } }
+    placer.place({ id: 'datum', role: 'labelQuiet', message, size: frame.font - 1 }, [
+      { x: 8, y: frame.font + 2, anchor: 'start' },
+    ])
+  }
   placer.place(
     {
       id: 'scale',

@@ -1,4 +1,5 @@
 import type { Station } from '../../schemas/line'
+import type { LineEnds, LineMark } from '../../schemas/mark'
 import type { Verdict } from '../../schemas/section-result'
 import type { View } from '../scene'
 import type { MeasureText } from '../text-width'
@@ -10,6 +11,8 @@ export interface DrawnSectionOfLine {
   readonly verdict: Verdict
   /** Level to which it holds [m]; null where nothing holds. */
   readonly holdsToLevel: number | null
+  /** Loaded crest [m]; null where no shape stands. */
+  readonly crestLevel?: number | null
 }
 
 /** Part of the line on which one size is laid. */
@@ -27,6 +30,18 @@ export interface WeakestPlace {
   readonly holdsToLevel: number | null
 }
 
+/** Low and high end of a level [m]; null where that end is not known. */
+export interface LevelBand {
+  readonly low: number | null
+  readonly high: number | null
+}
+
+/** A part of a line, from chainage to chainage. */
+export interface ChainageWindow {
+  readonly from: number
+  readonly to: number
+}
+
 export interface LongSectionInput {
   readonly view: View
   /** In order of chainage, one or more. */
@@ -39,5 +54,15 @@ export interface LongSectionInput {
   readonly weakest: WeakestPlace | null
   /** Chainage that is looked at [m]. */
   readonly place: number | null
+  /** Low and high end of the band of the level [m]. */
+  readonly band?: LevelBand | null
+  readonly marks?: readonly LineMark[]
+  readonly ends?: LineEnds | null
+  /** Marks that lead water to the dry side now, by their place in the list. */
+  readonly flowing?: readonly number[]
+  /** Datum of all levels, such as "Quay datum (QD)". */
+  readonly datum?: string | null
+  /** Part of the line that is looked at; left out: all of it. */
+  readonly window?: ChainageWindow | null
   readonly measure?: MeasureText | undefined
 }

@@ -3,6 +3,7 @@ import type { Verdict } from '../../schemas/section-result'
 import { areaPath, linePath, segmentsPath } from '../path-data'
 import type { Point, SceneItem, ShapeRole } from '../scene'
 import type { LongFrame } from './long-frame'
+import { addLongMarks } from './long-marks'
 import type { LongSectionInput } from './long-section-input'
 import { verdictShape } from './verdict-shape'
 
@@ -42,6 +43,7 @@ export function longShapes(input: LongSectionInput, frame: LongFrame): readonly 
       { x: right, y: bottom },
     ]),
   )
+  addLongMarks(input, frame, add)
   addVerdicts(input, frame, add)
   addPlace(input, frame, add)
   return items
