@@ -23,7 +23,13 @@ import { saveScenario } from '../../server/modules/scenarios/save-scenario.servi
 import { scenarioAt } from '../../server/modules/scenarios/open-scenario'
 import { insertPeople, NOON } from '../support/project-server'
 import { freshDatabase } from '../support/server-app'
-import { startServerFile } from '../support/server-process'
+import { serverBundle } from '../support/server-bundle'
+import { startNode } from '../support/server-process'
+
+const programs = {
+  backup: await serverBundle('server/cli/backup.ts'),
+  restore: await serverBundle('server/cli/restore.ts'),
+}
 
 const DOER = { accountId: 'demo-engineer-a', name: 'Engineer A' }
 const PLACE = {
@@ -103,7 +109,7 @@ describe('a backup', { timeout: 60_000 }, () => {
     const before = save()
     expect(existsSync(`${source.databaseFile}-wal`)).toBe(true)
     const environment = { DATABASE_FILE: source.databaseFile }
-    const { child, ended } = startServerFile('server/cli/backup.ts', [archive], { environment })
+    const { child, ended } = startNode([programs.backup, archive], { environment })
     let after = before
     while (child.exitCode === null) {
       after = save()
@@ -249,10 +255,10 @@ describe('a restore', { timeout: 60_000 }, () => {
 describe('npm run backup and npm run restore', { timeout: 120_000 }, () => {
   it('save and bring back what the environment names', async () => {
     const { source, archive, folder } = await saved()
-    const run = (command: string, words: readonly string[], dataFolder: string) => {
+    const run = (command: keyof typeof programs, words: readonly string[], dataFolder: string) => {
       const DATABASE_FILE = join(dataFolder, 'toehold.sqlite')
       const options = { environment: { DATABASE_FILE } }
-      return startServerFile(`server/cli/${command}.ts`, words, options).ended
+      return startNode([programs[command], ...words], options).ended
     }
     const backup = await run('backup', [archive], source.dataFolder)
     expect(backup).toMatchObject({ status: 0, stderr: '' })

@@ -5,7 +5,13 @@ import { join } from 'node:path'
 import { describe, expect, it, onTestFinished } from 'vitest'
 import { healthSchema } from '../../shared/schemas/health'
 import { SECRET } from '../support/server-app'
-import { startNode, startServerFile } from '../support/server-process'
+import { serverBundle } from '../support/server-bundle'
+import { startNode } from '../support/server-process'
+
+const program = await serverBundle('server/main.ts')
+
+/** As `npm start` runs it. */
+const UNBUNDLED = ['--import', 'tsx', 'server/main.ts']
 
 const PRODUCTION = {
   NODE_ENV: 'production',
@@ -22,9 +28,9 @@ function temporaryDatabase(): string {
   return join(folder, 'toehold.sqlite')
 }
 
-function start(environment: Record<string, string> = {}) {
+function start(environment: Record<string, string> = {}, words: readonly string[] = [program]) {
   const defaults = { PORT: '0', HOST: '127.0.0.1', DATABASE_FILE: temporaryDatabase() }
-  return startServerFile('server/main.ts', [], { environment: { ...defaults, ...environment } })
+  return startNode(words, { environment: { ...defaults, ...environment } })
 }
 
 /** A port that something else listens on until the test ends. */
@@ -37,7 +43,7 @@ async function takenPort(): Promise<number> {
 
 describe('the server', { timeout: 90_000 }, () => {
   it('prints its address once, answers there, and stops when it is told to', async () => {
-    const { child, ended, firstLine } = start()
+    const { child, ended, firstLine } = start({}, UNBUNDLED)
     const line = await firstLine
     const address = /^Toehold \(demonstration\) is at (http:\/\/localhost:\d+)$/.exec(line)?.[1]
     const answer = await fetch(`${address!.replace('localhost', '127.0.0.1')}/api/health`)

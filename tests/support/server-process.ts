@@ -64,8 +64,3 @@ export function startNode(
     })
   return { child, ended, firstLine, printed }
 }
-
-/** Runs a TypeScript program of the server to its end. */
-export function startServerFile(path: string, words: readonly string[] = [], options?: RunOptions) {
-  return startNode(['--import', 'tsx', path, ...words], options)
-}

@@ -5,13 +5,18 @@ import request from 'supertest'
 import { describe, expect, it, onTestFinished } from 'vitest'
 import { z } from 'zod'
 import { type Problem, problemSchema } from '../../../shared/schemas/problem'
+import flows from '../../golden/flow.json'
+import { expectClose } from '../../support/close-to'
 import { freshApp } from '../../support/server-app'
 import { BAD_INPUTS, holdingCase } from '../../support/server-cases'
-import { type Outcome, startServerFile } from '../../support/server-process'
+import { serverBundle } from '../../support/server-bundle'
+import { type Outcome, startNode } from '../../support/server-process'
+
+const program = await serverBundle('server/cli/calc.ts')
 
 function calc(words: readonly string[], input?: string): Promise<Outcome> {
   const options = input === undefined ? {} : { input }
-  return startServerFile('server/cli/calc.ts', words, options).ended
+  return startNode([program, ...words], options).ended
 }
 
 async function post(text: string): Promise<unknown> {
@@ -72,7 +77,10 @@ describe('calc section', { timeout: 30_000 }, () => {
 
   it.each([
     [[], /^a command is missing\n/],
-    [['seepages'], /^"seepages" is not a command; it must be one of: section\n$/],
+    [
+      ['seepages'],
+      /^"seepages" is not a command; it must be one of: section, seepage, duty, ponding, event\n$/,
+    ],
     [['section', '/nowhere/case.json'], /^\/nowhere\/case\.json: there is no such file\n$/],
     [['section', '/'], /^\/: EISDIR/],
     [['section', 'a.json', 'b.json'], /^one FILE at most, not 2\n$/],
@@ -104,5 +112,28 @@ describe('calc section', { timeout: 30_000 }, () => {
     expect(input.safeParse({ ...holdingCase, colour: 'red' }).success).toBe(false)
     expect(output.safeParse({}).success).toBe(false)
     expect(JSON.stringify(printed.input)).toContain('"unit":"kg/m"')
+  })
+})
+
+describe('calc duty', { timeout: 30_000 }, () => {
+  it('answers the worked cases, and refuses a curve that starts above zero flow', async () => {
+    const worked = flows.filter(({ case: { command } }) => command === 'duty')
+    const { status, stdout } = await calc(['duty'], JSON.stringify(worked.map((flow) => flow.case)))
+    expect(status).toBe(0)
+    const answers = JSON.parse(stdout) as Record<string, unknown>[]
+    for (const [i, { expected }] of worked.entries()) {
+      expect(answers[i]!.state).toBe(expected.state)
+      expectClose(answers[i]!.flow as number, expected.flow!, 1e-6)
+      expectClose(answers[i]!.head as number, expected.head!, 1e-6)
+    }
+    const curve = [
+      [0.001, 16],
+      [0.012, 13],
+    ]
+    const refused = await calc(['duty'], JSON.stringify({ ...worked[0]!.case, pumpCurve: curve }))
+    expect(refused).toMatchObject({ status: 2, stdout: '' })
+    expect(refused.stderr).toMatch(
+      /^pumpCurve\[0\]\[0\]: 0\.001 is not allowed; it must be 0 to 0 m³\/s/,
+    )
   })
 })

@@ -6,7 +6,10 @@ import { describe, expect, it, onTestFinished } from 'vitest'
 import { FERRY_QUAY } from '../../../../server/demo/ferry-quay'
 import type { Scenario } from '../../../../shared/schemas/project'
 import { type ApiClient, clientWith, signIn } from '../../../support/api-client'
-import { type Running, startServerFile } from '../../../support/server-process'
+import { serverBundle } from '../../../support/server-bundle'
+import { type Running, startNode } from '../../../support/server-process'
+
+const program = await serverBundle('server/main.ts')
 
 const KILLS = 20
 const PATH =
@@ -23,7 +26,7 @@ function databaseFile(): string {
 
 async function start(file: string): Promise<Running & { address: string }> {
   const environment = { PORT: '0', HOST: '127.0.0.1', DATABASE_FILE: file }
-  const running = startServerFile('server/main.ts', [], { environment })
+  const running = startNode([program], { environment })
   const port = /localhost:(\d+)$/.exec(await running.firstLine)?.[1]
   return { ...running, address: `http://127.0.0.1:${String(port)}` }
 }
