@@ -114,6 +114,32 @@ const DISPLAY_UNITS = {
     metric: { label: 'm²/s', factor: 1, decimals: 7 },
     us: { label: 'ft²/s', factor: FOOT ** 2, decimals: 6 },
   },
+  /** Water over a crest, per metre run, shown by the second. */
+  overtopping: {
+    metric: { label: 'l/s per m', factor: 1e-3, decimals: 2 },
+    us: { label: 'gpm per ft', factor: GALLON / 60 / FOOT, decimals: 1 },
+  },
+  /** A flow that does harm: through a gap, over a crest. */
+  largeFlow: {
+    metric: { label: 'm³/s', factor: 1, decimals: 2 },
+    us: { label: 'ft³/s', factor: FOOT ** 3, decimals: 1 },
+  },
+  volume: {
+    metric: { label: 'm³', factor: 1, decimals: 1 },
+    us: { label: 'ft³', factor: FOOT ** 3, decimals: 0 },
+  },
+  area: {
+    metric: { label: 'm²', factor: 1, decimals: 2 },
+    us: { label: 'ft²', factor: FOOT ** 2, decimals: 1 },
+  },
+  angle: {
+    metric: { label: '°', factor: Math.PI / 180, decimals: 0 },
+    us: { label: '°', factor: Math.PI / 180, decimals: 0 },
+  },
+  count: {
+    metric: { label: '', factor: 1, decimals: 0 },
+    us: { label: '', factor: 1, decimals: 0 },
+  },
   percent: {
     metric: { label: '%', factor: 0.01, decimals: 0 },
     us: { label: '%', factor: 0.01, decimals: 0 },
@@ -131,6 +157,8 @@ export interface Quantity {
   readonly rounding?: 'down' | 'up'
   /** Leaves the unit away, where a neighbour already names it. */
   readonly isBare?: boolean
+  /** Digits after the decimal point, where the usual ones say too much, as on a scale bar. */
+  readonly decimals?: number
 }
 
 function displayUnit(kind: QuantityKind, system: UnitSystem): DisplayUnit {
@@ -177,7 +205,7 @@ export function formatNumber(value: number, decimals: number, rounding?: 'down' 
 export function formatQuantity(quantity: Quantity, system: UnitSystem): string {
   const { label, decimals } = displayUnit(quantity.kind, system)
   const shown = toDisplay(quantity.value, quantity.kind, system)
-  const number = formatNumber(shown, decimals, quantity.rounding)
+  const number = formatNumber(shown, quantity.decimals ?? decimals, quantity.rounding)
   if (quantity.isBare || label === '') return number
   return label === '%' ? `${number}\u202f%` : `${number}\u00a0${label}`
 }

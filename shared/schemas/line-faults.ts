@@ -1,5 +1,8 @@
 import { isInRange, rangeFault, showValue, type AllowedRange, type Fault } from '../errors'
+import { lineCrossing } from '../calc/line/line-crossings'
 import { lineSections } from '../calc/line/line-sections'
+import { lineTurns } from '../calc/line/line-turns'
+import { isTurnTooSharp } from '../catalogue/joints'
 import type { Station } from './line'
 import type { LineMark } from './mark'
 import { STATION_RANGES } from './station-ranges'
@@ -37,7 +40,7 @@ export function lineFaults(survey: Survey): readonly Fault[] {
     ...halfPlace(station, i),
     ...notRising(survey.stations, i),
   ])
-  return faults.length > 0 ? faults : tooManySections(survey)
+  return faults.length > 0 ? faults : [...tooManySections(survey), ...crossing(survey)]
 }
 
 function rangeFaults(station: Station, index: number): Fault[] {
@@ -47,6 +50,19 @@ function rangeFaults(station: Station, index: number): Fault[] {
     if (value === null || isInRange(value, range)) return []
     return [rangeFault(`stations[${index}].${field}`, value, range)]
   })
+}
+
+/** A line that crosses itself has no wet side. */
+function crossing({ stations }: Survey): Fault[] {
+  const found = lineCrossing(stations)
+  if (!found) return []
+  const span = (index: number) =>
+    `ch ${stations[index]!.chainage} to ${stations[index + 1]!.chainage}`
+  const path = `stations[${found.second}].x`
+  const allowed = `such that ${span(found.second)} does not cross ${span(found.first)}`
+  const value = stations[found.second]!.x
+  const message = `${path}: ${value} is not allowed; it must be ${allowed}`
+  return [{ path, value, allowed, unit: 'm', message }]
 }
 
 /** A place in the grid needs both coordinates. */
@@ -82,20 +98,24 @@ function tooManySections({ stations, sectionLength, marks }: Survey): Fault[] {
 
 /**
  * What looks like a slip in a survey: a distance in the grid that differs from the chainage by more
- * than 0.05 m and 1 %, or a surface that the catalogue does not know, so that each scenario must say
- * what it assumes of it.
+ * than 0.05 m or 1 %, a turn that no joint takes, a line shorter than one section, or a surface that
+ * the catalogue does not know, so that each scenario must say what it assumes of it.
  *
  * @param knownSurfaces Grounds of the catalogue.
+ * @param sectionLength Length of a tube [m]; left out: not compared.
  */
 export function lineWarnings(
   stations: readonly Station[],
   knownSurfaces: readonly string[],
+  sectionLength = 0,
 ): readonly SurveyWarning[] {
   const unknown = new Set(
     stations.map(({ surface }) => surface).filter((surface) => !knownSurfaces.includes(surface)),
   )
   return [
     ...stations.flatMap((_, i) => strayDistance(stations, i)),
+    ...sharpTurns(stations),
+    ...shortLine(stations, sectionLength),
     ...[...unknown].map((surface) => {
       const index = stations.findIndex((station) => station.surface === surface)
       const path = `stations[${index}].surface`
@@ -105,6 +125,27 @@ export function lineWarnings(
   ]
 }
 
+/** Turns that no joint takes: the line must turn in two places, a section apart. */
+function sharpTurns(stations: readonly Station[]): SurveyWarning[] {
+  return lineTurns(stations)
+    .filter(({ angle }) => isTurnTooSharp(angle))
+    .map(({ chainage, angle }) => {
+      const index = stations.findIndex((station) => station.chainage === chainage)
+      const degrees = Math.round(Math.abs((angle * 180) / Math.PI))
+      const path = `stations[${index}].chainage`
+      const message = `${path}: the line turns by ${degrees}° at ch ${chainage}; a joint takes 90° at most. Turn in two places, one section apart`
+      return { path, message }
+    })
+}
+
+function shortLine(stations: readonly Station[], sectionLength: number): SurveyWarning[] {
+  const length = stations[stations.length - 1]!.chainage - stations[0]!.chainage
+  if (stations.length < 2 || length >= sectionLength) return []
+  const path = 'sectionLength'
+  const message = `${path}: one section is ${sectionLength} m long, the whole line ${length} m: the tube reaches beyond its end`
+  return [{ path, message }]
+}
+
 function strayDistance(stations: readonly Station[], index: number): SurveyWarning[] {
   const before = stations[index - 1]
   const here = stations[index]!
@@ -112,7 +153,7 @@ function strayDistance(stations: readonly Station[], index: number): SurveyWarni
   const distance = distanceBetween(before, here)
   if (distance === null) return []
   const step = here.chainage - before.chainage
-  if (Math.abs(distance - step) <= Math.max(0.05, 0.01 * step) + ROUNDING) return []
+  if (Math.abs(distance - step) <= Math.min(0.05, 0.01 * step) + ROUNDING) return []
   const path = `stations[${index}].chainage`
   const message = `${path}: ${here.chainage} is ${step.toFixed(2)} m from the station before it, x and y are ${distance.toFixed(2)} m away`
   return [{ path, message }]

@@ -41,7 +41,7 @@ export function readLines(
 export function readLine(db: Db, place: LinePlace): Line {
   const line = lineAt(db, place)
   const known = listGrounds(db).map(({ id }) => id)
-  return { ...line, warnings: [...lineWarnings(line.stations, known)] }
+  return { ...line, warnings: [...lineWarnings(line.stations, known, line.sectionLength)] }
 }
 
 type Whole = Survey & Pick<Line, 'marks' | 'ends' | 'background'>

@@ -26,7 +26,7 @@ export function labelLongSection(
   if (input.datum) {
     const message = { key: 'linePlan.section.datum', values: { datum: input.datum } }
     placer.place({ id: 'datum', role: 'labelQuiet', message, size: frame.font - 1 }, [
-      { x: 8, y: frame.font + 2, anchor: 'start' },
+      { x: frame.left + 2, y: frame.font + 2, anchor: 'start' },
     ])
   }
   placer.place(

@@ -132,10 +132,10 @@ export function labelLongMarks(
     const message = { key: `linePlan.drawing.mark.${isFlowing ? 'open' : 'shut'}.${mark.kind}` }
     const role = isFlowing ? 'labelFails' : 'labelQuiet'
     placer.placeOverLines({ id: `mark-label-${index}`, role, message, size }, [
-      { x: x + 10, y: y + 14, anchor: 'start' },
-      { x: x - 10, y: y + 14, anchor: 'end' },
-      { x, y: y + 22, anchor: 'middle' },
+      { x: x + 11, y: y + 4, anchor: 'start' },
+      { x: x - 11, y: y + 4, anchor: 'end' },
       { x, y: y - 11, anchor: 'middle' },
+      { x, y: y + 20, anchor: 'middle' },
     ])
   }
   for (const { chainage, angle } of lineTurns(stations, marks)) {

@@ -40,7 +40,9 @@ function writer(frame: PlanFrame, placer: LabelPlacer): Write {
 }
 
 function lengthOf(length: number): Message {
-  return { key: 'linePlan.drawing.length', values: { length: { value: length, kind: 'length' } } }
+  const decimals = length < 1 ? 1 : 0
+  const value = { value: length, kind: 'length', decimals } as const
+  return { key: 'linePlan.drawing.length', values: { length: value } }
 }
 
 /** Spots to the right of a point first, where the dry side is, then around it. */

@@ -53,13 +53,49 @@ describe('faults of a survey', () => {
   })
 })
 
+describe('a line that crosses itself', () => {
+  const place = (x: number, y: number, i: number) => ({
+    ...LOW_ROAD_STATIONS[0]!,
+    chainage: 10 * i,
+    x,
+    y,
+  })
+  const figure = (...points: [number, number][]) => points.map(([x, y], i) => place(x, y, i))
+
+  it('is refused by the stretches that cross', () => {
+    const eight = figure([0, 0], [10, 0], [10, 10], [5, -5])
+    expect(faultsOf(eight)).toMatchObject([{ path: 'stations[2].x' }])
+    expect(faultsOf(eight)[0]!.message).toContain('ch 20 to 30 does not cross ch 0 to 10')
+  })
+
+  it('is no ring that closes, and no line without places', () => {
+    expect(faultsOf(figure([0, 0], [10, 0], [10, 10], [0, 0]))).toEqual([])
+    const bare = figure([0, 0], [10, 0], [10, 10], [5, -5])
+    expect(faultsOf(bare.map((station) => ({ ...station, x: null, y: null })))).toEqual([])
+  })
+})
+
 describe('warnings of a survey', () => {
   it('name a station whose place does not fit its chainage', () => {
     const [first, ...rest] = lineWarnings(changed(3, { x: 30.2 }), KNOWN)
     expect(first).toMatchObject({ path: 'stations[3].chainage' })
     expect(first!.message).toContain('30 is 10.00 m from the station before it, x and y are 10.20')
     expect(rest.map(({ path }) => path)).toEqual(['stations[4].chainage'])
-    expect(lineWarnings(changed(3, { x: 30.08 }), KNOWN)).toEqual([])
+    // More than 0.05 m, though less than 1 % of 10 m; then less than both.
+    expect(lineWarnings(changed(3, { x: 30.08 }), KNOWN)).toHaveLength(2)
+    expect(lineWarnings(changed(3, { x: 30.04 }), KNOWN)).toEqual([])
+  })
+
+  it('name a turn that no joint takes, and a line shorter than its section', () => {
+    const turned = [0, 10, 20].map((chainage, i) => ({
+      ...LOW_ROAD_STATIONS[0]!,
+      chainage,
+      x: [0, 10, 5][i]!,
+      y: [0, 0, 8.66][i]!,
+    }))
+    expect(lineWarnings(turned, KNOWN)[0]!.message).toContain('turns by 120° at ch 10')
+    const short = lineWarnings(LOW_ROAD_STATIONS.slice(0, 2), KNOWN, 25)
+    expect(short).toMatchObject([{ path: 'sectionLength' }])
   })
 
   it('name each surface that the catalogue does not know, once', () => {
