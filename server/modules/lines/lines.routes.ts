@@ -10,6 +10,7 @@ import {
 import { defineOperation, type Operation } from '../../http/operation'
 import { parseBody, parseQuery, pathPart } from '../../http/parse-input'
 import type { ProjectWork } from '../projects/deed'
+import { lineAsGeoJson, surveyAsCsv } from './line-files.service'
 import {
   archiveLine,
   changeLine,
@@ -27,7 +28,12 @@ const projectOf = (req: Request) => pathPart(req, 'projectId')
 const placeOf = (req: Request) => ({ projectId: projectOf(req), lineId: pathPart(req, 'lineId') })
 
 export function linesOperations(work: ProjectWork): readonly Operation[] {
-  return [...listOperations(work), ...oneOperations(work), ...keepingOperations(work)]
+  return [
+    ...listOperations(work),
+    ...oneOperations(work),
+    ...fileOperations(work),
+    ...keepingOperations(work),
+  ]
 }
 
 function listOperations(work: ProjectWork): readonly Operation[] {
@@ -83,6 +89,37 @@ function oneOperations(work: ProjectWork): readonly Operation[] {
       problems: ['conflict', 'out-of-range'],
       handle: ({ req, actor }) =>
         changeLine(work, actor, placeOf(req), parseBody(lineChangeSchema, req)),
+    }),
+  ]
+}
+
+function fileOperations({ db }: ProjectWork): readonly Operation[] {
+  return [
+    defineOperation({
+      method: 'get',
+      path: `${ONE}/stations.csv`,
+      id: 'readSurveyCsv',
+      summary: 'The survey as CSV; the datum stands in its heading',
+      rule: 'read-project',
+      mediaType: 'text/csv',
+      problems: [],
+      handle: ({ req, res }) => {
+        const text = surveyAsCsv(db, placeOf(req))
+        res.attachment('survey.csv').type('text/csv; charset=utf-8').send(text)
+      },
+    }),
+    defineOperation({
+      method: 'get',
+      path: `${ONE}/line.geojson`,
+      id: 'readLineGeoJson',
+      summary: 'Line, stations and marks as GeoJSON, in coordinates of the local grid',
+      rule: 'read-project',
+      mediaType: 'application/geo+json',
+      problems: ['conflict'],
+      handle: ({ req, res }) => {
+        const file = lineAsGeoJson(db, placeOf(req))
+        res.attachment('line-local-grid.geojson').type('application/geo+json').send(JSON.stringify(file))
+      },
     }),
   ]
 }
