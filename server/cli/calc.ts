@@ -14,6 +14,11 @@ class UsageError extends Error {
   override readonly name = 'UsageError'
 }
 
+/** The one command whose answer is a file, not JSON. */
+const SHEET = 'sheet'
+const SHEET_SUMMARY =
+  'Write the calculation sheet of one case: calc sheet CASE -o FILE.pdf, .json or .csv'
+
 interface Request {
   readonly command: BatchCommand | undefined
   readonly file: string | undefined
@@ -38,12 +43,13 @@ function readArguments(words: readonly string[]): Request {
 function findCommand(name: string): BatchCommand {
   const command = COMMANDS.find((candidate) => candidate.name === name)
   if (command) return command
-  const known = COMMANDS.map((candidate) => candidate.name).join(', ')
+  const known = [...COMMANDS.map((candidate) => candidate.name), SHEET].join(', ')
   throw new UsageError(`"${name}" is not a command; it must be one of: ${known}`)
 }
 
 function describeUsage(): string {
-  const commands = COMMANDS.map(({ name, summary }) => `  ${name.padEnd(12)}${summary}`)
+  const all = [...COMMANDS, { name: SHEET, summary: SHEET_SUMMARY }]
+  const commands = all.map(({ name, summary }) => `  ${name.padEnd(12)}${summary}`)
   return [
     'npm run --silent calc -- COMMAND [FILE]',
     '',
@@ -79,16 +85,39 @@ async function readText(file: string | undefined): Promise<string> {
 }
 
 async function answer(command: BatchCommand, file: string | undefined): Promise<string> {
-  const text = await readText(file)
+  return JSON.stringify(runBatch(command, parseText(await readText(file), file)), null, 2)
+}
+
+function parseText(text: string, file: string | undefined): unknown {
   try {
-    return JSON.stringify(runBatch(command, readJson(text)), null, 2)
+    return readJson(text)
   } catch (error) {
     if (!(error instanceof InvalidJsonError)) throw error
     throw new UsageError(`${file ?? 'standard input'}: not JSON: ${error.message}`)
   }
 }
 
+/** `sheet CASE -o FILE`. Loaded only when it is asked for: the other commands need no typesetting. */
+async function answerSheet(words: readonly string[]): Promise<string> {
+  const at = words.findIndex((word) => word === '-o' || word === '--output')
+  const output = at < 0 ? undefined : words[at + 1]
+  const [source, ...rest] = words.filter((_, place) => at < 0 || (place !== at && place !== at + 1))
+  if (output === undefined || rest.length > 0) throw new UsageError(SHEET_SUMMARY)
+  const { SHEET_ENDINGS, writeSheet } = await import('./calc-sheet')
+  if (!SHEET_ENDINGS.some((ending) => output.toLowerCase().endsWith(ending))) {
+    throw new UsageError(`${output}: the ending must be one of ${SHEET_ENDINGS.join(', ')}`)
+  }
+  const input = parseText(await readText(source), source)
+  return writeSheet(input, { source: source ?? '-', output, software: `Toehold ${readVersion()}` })
+}
+
+function readVersion(): string {
+  const file = new URL('../../package.json', import.meta.url)
+  return (JSON.parse(readFileSync(file, 'utf8')) as { version: string }).version
+}
+
 async function run(words: readonly string[]): Promise<string> {
+  if (words[0] === SHEET && !words.includes('--help')) return answerSheet(words.slice(1))
   const { command, file, wantsHelp, wantsSchema } = readArguments(words)
   if (wantsHelp) return describeUsage()
   if (!command) throw new UsageError(`a command is missing\n\n${describeUsage()}`)

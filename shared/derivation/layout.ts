@@ -23,7 +23,8 @@ export type Box =
   | { readonly kind: 'fraction'; readonly over: Box; readonly under: Box }
   | { readonly kind: 'power'; readonly base: Box; readonly exponent: Box }
   | { readonly kind: 'root'; readonly of: Box }
-  | { readonly kind: 'brackets'; readonly of: Box }
+  /** `isLong`: may be broken over two lines, so that its brackets do not grow. */
+  | { readonly kind: 'brackets'; readonly of: Box; readonly isLong?: true }
   | { readonly kind: 'function'; readonly name: string; readonly args: readonly Box[] }
   | {
       readonly kind: 'integral'
@@ -83,7 +84,7 @@ function operatorBox({ op, args }: AnyOperator, style: Style): Box {
   if (second === undefined) return row('−', bracketed(first, style, isSum))
   switch (op) {
     case '/':
-      return { kind: 'fraction', over: box(first, style), under: box(second, style) }
+      return quotient(box(first, style), box(second, style))
     case '^':
       return { kind: 'power', base: powerBase(first, style), exponent: box(second, style) }
     case '*':
@@ -98,6 +99,41 @@ function operatorBox({ op, args }: AnyOperator, style: Style): Box {
       return row(box(first, style), '≤', box(second, style))
     default:
       return row(box(first, style), '+', bracketed(second, style, isSigned))
+  }
+}
+
+/** Width in characters from which a numerator is set beside its fraction, in brackets. */
+const LONG = 58
+
+/** A long sum over a number becomes that fraction of the sum, which can be broken. */
+function quotient(over: Box, under: Box): Box {
+  const isNumber = under.kind === 'figure' && under.unit === ''
+  if (!isNumber || widthOf(over) < LONG) return { kind: 'fraction', over, under }
+  const share: Box = { kind: 'fraction', over: plain('1'), under }
+  return row(share, ' ', { kind: 'brackets', of: over, isLong: true })
+}
+
+/** About how many characters a formula takes on one line. */
+function widthOf(part: Box | string): number {
+  if (typeof part === 'string') return 2
+  switch (part.kind) {
+    case 'symbol':
+      return Math.min(3, part.id.length)
+    case 'figure':
+      return part.digits.length + part.unit.length
+    case 'row':
+      return part.items.reduce((width, item) => width + widthOf(item), 0)
+    case 'fraction':
+      return Math.max(widthOf(part.over), widthOf(part.under))
+    case 'function':
+      return part.name.length + 2 + part.args.reduce((width, arg) => width + widthOf(arg), 0)
+    case 'power':
+      return widthOf(part.base) + widthOf(part.exponent)
+    case 'integral':
+    case 'series':
+      return widthOf(part.of) + 5
+    default:
+      return widthOf(part.of) + 2
   }
 }
 
@@ -128,7 +164,8 @@ function isSumOrSigned(node: MathNode): boolean {
 function bracketed(node: MathNode, style: Style, needs: (node: MathNode) => boolean): Box {
   const of = box(node, style)
   const isNegative = of.kind === 'figure' && of.digits.startsWith('−')
-  return needs(node) || isNegative ? { kind: 'brackets', of } : of
+  if (!needs(node) && !isNegative) return of
+  return widthOf(of) < LONG ? { kind: 'brackets', of } : { kind: 'brackets', of, isLong: true }
 }
 
 /** A power needs brackets around everything but one symbol or a bare positive number. */

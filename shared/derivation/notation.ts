@@ -9,7 +9,7 @@ interface Notation {
   readonly fraction: (over: string, under: string) => string
   readonly power: (base: string, exponent: string) => string
   readonly root: (of: string) => string
-  readonly brackets: (of: string) => string
+  readonly brackets: (of: string, isLong: boolean) => string
   readonly call: (name: string, args: readonly string[]) => string
   readonly integral: (of: string, variable: string, from: string, to: string) => string
   readonly series: (of: string, variable: string, from: string) => string
@@ -34,7 +34,7 @@ function write(box: Box, n: Notation): string {
     case 'root':
       return n.root(write(box.of, n))
     case 'brackets':
-      return n.brackets(write(box.of, n))
+      return n.brackets(write(box.of, n), box.isLong ?? false)
     case 'function':
       return n.call(
         box.name,
@@ -81,7 +81,7 @@ const TEX: Notation = {
   fraction: (over, under) => `\\frac{${over}}{${under}}`,
   power: (base, exponent) => `${base}^{${exponent}}`,
   root: (of) => `\\sqrt{${of}}`,
-  brackets: (of) => `\\left(${of}\\right)`,
+  brackets: (of, isLong) => (isLong ? `(${of})` : `\\left(${of}\\right)`),
   call: (name, args) => {
     const full = fullName(name)
     if (name === 'abs') return `\\left|${args.join(', ')}\\right|`
@@ -116,7 +116,7 @@ const TYPST: Notation = {
   fraction: (over, under) => `frac(${over}, ${under})`,
   power: (base, exponent) => `${base}^(${exponent})`,
   root: (of) => `sqrt(${of})`,
-  brackets: (of) => `lr((${of}))`,
+  brackets: (of, isLong) => (isLong ? `\\( ${of} \\)` : `lr((${of}))`),
   call: (name, args) => {
     const full = fullName(name)
     if (name === 'abs') return `abs(${args.join(', ')})`

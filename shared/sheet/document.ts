@@ -39,8 +39,10 @@ export interface LineRow {
   readonly symbolic: Written
   readonly numeric: Written | null
   readonly result: Written
-  /** "verified by substitution, residual 2·10⁻¹⁶"; empty for a line that was recomputed. */
+  /** How a line that was not recomputed was verified; empty for one that was. */
   readonly proof: string
+  /** To what both sides of it agree; null where there is no such figure. */
+  readonly residual: Written | null
   readonly verdict: (ShownVerdict & { readonly needs: string }) | null
 }
 

@@ -1,6 +1,7 @@
 import type { Derivation, DerivationLine } from '../derivation/line'
 import { isSearch } from '../derivation/holds-to-proof'
-import { plainNumber, significant } from '../derivation/figures'
+import { significant } from '../derivation/figures'
+import { writeBox, type Written } from '../derivation/notation'
 import { SHEET_SOURCES } from '../derivation/sources'
 import { writeLine } from '../derivation/written-line'
 import type { SectionResult } from '../schemas/section-result'
@@ -38,7 +39,8 @@ function lineRow(line: DerivationLine, result: SectionResult, words: SheetWords)
     symbolic,
     numeric,
     result: figure,
-    proof: proofOf(line, residual, words),
+    proof: proofOf(line, words),
+    residual: residual === null ? null : residualOf(residual),
     verdict: verdictOf(line, result, words),
   }
 }
@@ -48,12 +50,15 @@ function isNoteDue({ id, formula }: DerivationLine): boolean {
   return id !== 'slidingResistance' || formula.includes('c_u')
 }
 
-function proofOf(line: DerivationLine, residual: number | null, words: SheetWords): string {
-  if (line.proof === 'recomputed') return ''
-  if (isSearch(line.formula)) return words.say('sheet.proofSearch')
-  // Less than one unit in the last place of a double is no figure.
-  const shown = Math.max(residual ?? 0, 1e-15)
-  return words.say('sheet.proof', { residual: plainNumber(significant(shown, 1)) })
+function proofOf({ proof, formula }: DerivationLine, { say }: SheetWords): string {
+  if (proof === 'recomputed') return ''
+  return say(isSearch(formula) ? 'sheet.proofSearch' : 'sheet.proof')
+}
+
+/** Less than a few units in the last place of a double is no figure. */
+function residualOf(residual: number): Written {
+  const shown = significant(Math.max(residual, 1e-15), 1)
+  return writeBox({ kind: 'figure', ...shown, unit: '' })
 }
 
 function verdictOf(

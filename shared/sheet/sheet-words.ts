@@ -11,7 +11,8 @@ import { formatQuantity, type Quantity, type QuantityKind, type UnitSystem } fro
 export const SHEET_TEXTS = {
   checks: checksTexts,
   derivation: derivationTexts,
-  drawing: drawingTexts,
+  // A sheet is read later than it was made: it has no now.
+  drawing: { ...drawingTexts, chart: { ...drawingTexts.chart, now: sheetTexts.chart.now } },
   linePage: lineTexts,
   sheet: sheetTexts,
   shell: shellTexts,

@@ -143,6 +143,47 @@ export const quickCheckFieldTexts = {
     label: 'Water there since',
     tip: 'Time since the water reached the barrier; the pressure under the skirt grows with it.',
   },
+  windSpeed: { label: 'Wind over the water', tip: 'Mean wind speed 10 m above the water.' },
+  fetch: { label: 'Fetch', tip: 'Length of open water upwind of the barrier.' },
+  fetchDepth: { label: 'Depth of the fetch', tip: 'Mean depth of that water.' },
+  debrisMass: {
+    label: 'Mass of the debris',
+    tip: 'Of what floats against the barrier: 500 kg is a common tree trunk.',
+  },
+  debrisSpeed: {
+    label: 'Its speed',
+    tip: 'Straight towards the barrier; seldom faster than the water.',
+  },
+  debrisStop: {
+    label: 'Time to stop it',
+    tip: 'From the first touch to standing still. A soft barrier takes longer than a wall; the force goes with one over this time.',
+  },
+  linkedSections: {
+    label: 'Sections on one air',
+    tip: 'Sections whose air is joined, so that they are watched and topped up from one point.',
+  },
+  dropFrom: {
+    label: 'Pressure at first',
+    tip: 'Measured on the shut tube or tubes, with the air at one temperature.',
+  },
+  dropTo: { label: 'Pressure then', tip: 'Read after the time below.' },
+  dropTime: { label: 'Time between', tip: 'Between the two readings.' },
+  nightTime: { label: 'How long alone', tip: 'Time for which nobody tops up.' },
+  compressorFlow: { label: 'Compressor', tip: 'Free air that it delivers.' },
+  startPressure: { label: 'It starts at', tip: 'Pressure at which the compressor starts.' },
+  stopPressure: { label: 'It stops at', tip: 'Pressure at which the compressor stops.' },
+  edgeCurrent: {
+    label: 'Current along it',
+    tip: 'Speed of the water along the line. It gives no thrust, but it can lift the edge of the skirt.',
+  },
+  ballastDensity: {
+    label: 'Density of ballast',
+    tip: 'Of what lies on the edge: sand in wet bags about 2000 kg/m³.',
+  },
+  turn: {
+    label: 'Turn at a joint',
+    tip: 'How far the line turns: positive away from the water, which opens the skirt; negative towards it, which folds it.',
+  },
   windGust: {
     label: 'Wind gust',
     tip: 'Peak gust on the filled tube while the ground is still dry.',

@@ -154,7 +154,7 @@ export const scenarioTexts = {
     allMine: 'All mine',
     allTheirs: 'All theirs',
     pick: '{field}: {side}',
-    open: '{count} fields still to decide.',
+    open: 'Still to decide: {count}.',
     save: 'Save this',
     later: 'Decide later',
     resolved: 'Both versions are brought together.',

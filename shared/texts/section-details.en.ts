@@ -1,5 +1,8 @@
+import { sectionPartTexts } from './section-parts.en'
+
 /** Texts of what a cross-section shows once it is opened, and of what its picture says. */
 export const sectionDetailsTexts = {
+  part: sectionPartTexts,
   caption: {
     datum: 'Levels above {datum}.',
     restsOn:

@@ -145,7 +145,7 @@ export const sheetTexts = {
   },
   proofs:
     '{recomputed} of {recomputed} lines recomputed with units, {substituted} of {substituted} verified by substitution. Computed unrounded; printed to three significant figures, levels and depths to {step}, holds-to and leave levels rounded down.',
-  proof: 'verified by substitution, both sides agree to {residual}',
+  proof: 'verified by substitution, both sides agree to',
   proofSearch: 'verified by substitution: all checks at this depth, and just beyond it',
   needs: 'needs {required}',
   noFigure: '–',
@@ -165,6 +165,7 @@ export const sheetTexts = {
     adverse:
       'The adverse limit: an open edge over a sealed seat puts the full pressure under the whole base, and nothing holds.',
   },
+  chart: { now: 'checked {depth}' },
   series: {
     open: 'open edge',
     weighed: 'weighed edge',

@@ -21,10 +21,11 @@ export interface ComparedAs {
  */
 export function writeCheck({ book, result, gripShare }: LineContext, compared: ComparedAs): void {
   const { check, group, demand, suffix, source = 'basis' } = compared
-  const isShared = gripShare < 1 && (check === 'sliding' || check === 'skirt')
+  const answer = result[check]
+  const isShared =
+    gripShare < 1 && (answer.factor ?? 0) > 0 && (check === 'sliding' || check === 'skirt')
   const resistance = isShared ? `(s_g * ${compared.resistance})` : compared.resistance
   if (isShared) book.given('s_g', gripShare, 'ratio')
-  const answer = result[check]
   if (answer.factor !== null) {
     book.line(group, {
       id: `${check}Factor`,

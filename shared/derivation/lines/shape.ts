@@ -33,7 +33,7 @@ function writeUnloaded({ book }: LineContext, shape: StandingShape): void {
 }
 
 /** cos of the slope of the wet skin at the height y. */
-const WET_COSINE = '(p * y + gamma * (h - y)^2 / 2) / T - 1'
+const WET_COSINE = '(2 * p * y + gamma * (h - y)^2) / (2 * T) - 1'
 
 function writeLoaded(context: LineContext, shape: StandingShape): void {
   const { book } = context
@@ -119,7 +119,7 @@ function writeAngles({ book, section, state }: LineContext, shape: StandingShape
     ...common,
     id: 'weldAngle',
     symbol: 'beta_A',
-    formula: 'acos((p * y_A + gamma * (h - y_A)^2 / 2) / T - 1)',
+    formula: 'acos((2 * p * y_A + gamma * (h - y_A)^2) / (2 * T) - 1)',
     value: angles.weld,
   })
   book.line('shape', {

@@ -61,6 +61,26 @@ function writeUnderSkirt(context: LineContext, flat: number): string | null {
   if (uplift.model === 'none' || base === 0) return null
   const excess = uplift.edgeFactor * depth - water.dryDepth
   if (excess === 0 && names.dryDepth === null) return null
+  const head = writeHead(context, excess)
+  const share = writeShare(context, flat)
+  const partial = upliftSharePartial(uplift, base, flat)
+  book.line('skirt', {
+    id: 'underSkirt',
+    symbol: 'U_f',
+    formula:
+      names.dryDepth === null
+        ? `gamma * ${head} * ${share}`
+        : `gamma * (h_d * L_f + ${head} * ${share})`,
+    value: unitWeight * (water.dryDepth * flat + excess * partial),
+    kind: 'forcePerLength',
+    source: upliftSource(context),
+  })
+  return 'U_f'
+}
+
+/** Head at the edge for the flat skirt; on level ground it is that of the whole base. */
+function writeHead({ book, names }: LineContext, excess: number): string {
+  if (!names.isSloped) return 'e_u'
   book.line('skirt', {
     id: 'skirtExcess',
     symbol: 'e_f',
@@ -69,18 +89,7 @@ function writeUnderSkirt(context: LineContext, flat: number): string | null {
     kind: 'length',
     source: 'statics',
   })
-  const share = writeShare(context, flat)
-  const partial = upliftSharePartial(uplift, base, flat)
-  book.line('skirt', {
-    id: 'underSkirt',
-    symbol: 'U_f',
-    formula:
-      names.dryDepth === null ? `gamma * e_f * ${share}` : `gamma * (h_d * L_f + e_f * ${share})`,
-    value: unitWeight * (water.dryDepth * flat + excess * partial),
-    kind: 'forcePerLength',
-    source: upliftSource(context),
-  })
-  return 'U_f'
+  return 'e_f'
 }
 
 /** The pressure share summed over the flat skirt, as an expression. */

@@ -89,12 +89,11 @@ function writeOverhang({ book, section, state }: LineContext, depth: number, sid
     value: bounds.upper,
     kind: 'length',
   })
-  const strip = (s: string) => `${s} * sqrt(R^2 - ${s}^2) + R^2 * asin(${s} / R)`
   book.line('weight', {
     ...common,
     id: `underArc${side.suffix}`,
     symbol: arc,
-    formula: `(${strip(u)} - (${strip(l)})) / 2`,
+    formula: underArcText(l, u),
     value: bounds.underArc,
     kind: 'area',
   })
@@ -116,6 +115,13 @@ function writeOverhang({ book, section, state }: LineContext, depth: number, sid
     ...(side.suffix === '' ? { hasNote: true } : {}),
   })
   return true
+}
+
+/** ∫ √(R² − s²) ds from one height to the other. */
+function underArcText(lower: string, upper: string): string {
+  const strip = (s: string) => `${s} * sqrt(R^2 - ${s}^2)`
+  const turned = `R^2 * (asin(${upper} / R) - asin(${lower} / R))`
+  return `(${turned} + ${strip(upper)} - ${strip(lower)}) / 2`
 }
 
 function writeSkirtWater({ book, state, result, names }: LineContext): void {
