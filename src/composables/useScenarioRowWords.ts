@@ -23,11 +23,15 @@ export function useScenarioRowWords() {
     return t('linePage.scenarios.weakestWords', { chainage, check: t(`checks.name.${check}`) })
   }
 
+  function edgeWords({ least, most }: ScenarioListItem['edges']): string {
+    const [from, to] = [given(least, 'percent'), given(most, 'percent')]
+    if (from === to) return t('linePage.scenarios.edgeWords', { share: to })
+    return t('linePage.scenarios.edgesWords', { least: from, most: to })
+  }
+
   const verdictWords = ({ verdict }: ScenarioSummary) => t(`checks.verdict.${verdict}`)
   const levelWords = ({ waterLevel }: ScenarioSummary) => q(waterLevel, 'length')
   const basisWords = (basis: string) => t(basisKey(basis as BasisId))
-  const edgeWords = (edgeFactor: number) =>
-    t('linePage.scenarios.edgeWords', { share: given(edgeFactor, 'percent') })
   const changedWords = ({ updatedAt, updatedBy }: Pick<Scenario, 'updatedAt' | 'updatedBy'>) =>
     t('linePage.scenarios.changed', { at: moment(updatedAt), by: updatedBy.name })
 
@@ -37,7 +41,7 @@ export function useScenarioRowWords() {
       row.name,
       levelWords(row.summary),
       basisWords(row.basis),
-      edgeWords(row.edgeFactor),
+      edgeWords(row.edges),
       verdictWords(row.summary),
       weakestWords(row.summary),
       holdsToWords(row.summary),

@@ -39,10 +39,18 @@ const common = {
   ...keptSelection(scenarios),
 }
 
+/** The least or the most open edge of the runs; a run without its own has that of the line. */
+function edge(which: 'min' | 'max') {
+  const { content } = scenarios
+  return sql<number>`(select ${sql.raw(which)}(coalesce(
+    json_extract(run.value, '$.edgeFactor'), json_extract(${content}, '$.uplift.edgeFactor')))
+    from json_each(${content}, '$.sizes') run)`
+}
+
 const listSelection = {
   ...common,
   basis: sql<string>`json_extract(${scenarios.content}, '$.basis')`,
-  edgeFactor: sql<number>`json_extract(${scenarios.content}, '$.uplift.edgeFactor')`,
+  edges: { least: edge('min'), most: edge('max') },
   upliftModel: sql<string>`json_extract(${scenarios.content}, '$.uplift.model')`,
 }
 

@@ -66,8 +66,13 @@ export function scenario(change: Partial<Scenario> = {}): Scenario {
 
 export function listItem(change: Partial<Scenario> = {}): ScenarioListItem {
   const { content, ...row } = scenario(change)
-  const { edgeFactor, model } = content.uplift
-  return { ...row, basis: content.basis, edgeFactor, upliftModel: model }
+  const edges = content.sizes.map((run) => run.edgeFactor ?? content.uplift.edgeFactor)
+  return {
+    ...row,
+    basis: content.basis,
+    edges: { least: Math.min(...edges), most: Math.max(...edges) },
+    upliftModel: content.uplift.model,
+  }
 }
 
 export const pageOf = <Item>(items: readonly Item[]) => ({

@@ -40,7 +40,7 @@ describe('the table of scenarios', { timeout: 30_000 }, () => {
     expect(item).toEqual({
       ...rest,
       basis: 'extreme',
-      edgeFactor: kept.uplift.edgeFactor,
+      edges: { least: kept.uplift.edgeFactor, most: kept.uplift.edgeFactor },
       upliftModel: 'linear',
     })
   })
