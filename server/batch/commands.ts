@@ -3,6 +3,7 @@ import { parseSectionCase } from '../../shared/schemas/parse-section-case'
 import { sectionCaseSchema } from '../../shared/schemas/section-case'
 import { sectionResultSchema } from '../../shared/schemas/section-result'
 import type { BatchCommand } from './batch-command'
+import { dutyCommand, eventCommand, pondingCommand, seepageCommand } from './flow-commands'
 
 export const sectionCommand: BatchCommand = {
   name: 'section',
@@ -13,4 +14,10 @@ export const sectionCommand: BatchCommand = {
 }
 
 /** What `npm run calc -- COMMAND` can do; a further calculation is one further entry. */
-export const COMMANDS: readonly BatchCommand[] = [sectionCommand]
+export const COMMANDS: readonly BatchCommand[] = [
+  sectionCommand,
+  seepageCommand,
+  dutyCommand,
+  pondingCommand,
+  eventCommand,
+]

@@ -5,6 +5,7 @@ import { sectionGeometry } from '../../shared/calc/section/section-geometry'
 import { verticalLoads } from '../../shared/calc/section/vertical-loads'
 import { compare } from '../../shared/checks/compare'
 import { evaluateSection } from '../../shared/checks/evaluate-section'
+import { SectionEvent } from '../../shared/checks/event/section-event'
 import { globalPairs } from '../../shared/checks/global-checks'
 import { holdingProfile } from '../../shared/checks/holds-to'
 import { sectionState } from '../../shared/checks/section-state'
@@ -78,6 +79,29 @@ function rigidCheck(section: SectionCase): readonly unknown[] {
   return [compare(sliding, 1.5), compare(overturning, 1.5), compare(flotation, 1.2)]
 }
 
+/** A tide of 24 h in 1000 steps: rising, falling, with water under the skirt that grows and recedes. */
+function eventStep(): () => unknown {
+  const section = exampleSection({ uplift: { model: 'developing', diffusivity: 1e-5 } })
+  const water = Array.from({ length: 49 }, (_, i) => ({
+    time: 1800 * i,
+    value: 0.3 - 0.25 * Math.cos((Math.PI * i) / 24),
+  }))
+  const input = { section, groundLevel: 0, water, step: 86_400 / 1000 }
+  let event = new SectionEvent(input)
+  return () => {
+    if (!event.advance(1)) event = new SectionEvent(input)
+    return event
+  }
+}
+
+/** 500 sections, each with its own depth; what one costs. */
+function lineSection(): (i: number) => unknown {
+  const line = Array.from({ length: 500 }, (_, i) =>
+    exampleSection({ water: { depth: 0.1 + 0.001 * i } }),
+  )
+  return (i) => evaluateSection(line[i % line.length]!)
+}
+
 const TASKS: readonly Task[] = [
   {
     name: 'loaded shape alone',
@@ -98,6 +122,8 @@ const TASKS: readonly Task[] = [
     gate: 200_000,
     run: (i) => bestLayout(longLine(i), lineContent, fiveTubes),
   },
+  { name: 'step of a 1000-step event, growing uplift', gate: 90, run: eventStep() },
+  { name: 'section of a 500-section line', gate: 90, run: lineSection() },
   { name: 'holds-to, whole profile', gate: null, run: (i) => holdingProfile(sectionAt(i)) },
 ]
 

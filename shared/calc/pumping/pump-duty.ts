@@ -1,4 +1,4 @@
-import { findRoot } from '../numerics/find-root'
+import { findRoot, type Bracket } from '../numerics/find-root'
 import { hoseLoss, type HoseFlow } from './hose'
 import { fitPumpCurve, pumpHead, type CurvePoint } from './pump-curve'
 
@@ -43,10 +43,33 @@ export function pumpDuty(system: PumpSystem): PumpDuty {
   const shutOff = spare(0)
   if (shutOff <= 0) return { state: 'does-not-pump', flow: 0, head: staticHead }
   const last = pumps * curve.lastFlow
-  const atLast = spare(last)
-  if (atLast > 0) {
-    return { state: 'runs-out', flow: last, head: systemHead(last), headLeft: atLast }
+  const crossing = firstCrossing(spare, shutOff, last)
+  if (crossing === null) {
+    return { state: 'runs-out', flow: last, head: systemHead(last), headLeft: spare(last) }
   }
-  const flow = findRoot(spare, { low: 0, high: last, atLow: shutOff, atHigh: atLast })
+  const flow = findRoot(spare, crossing)
   return { state: 'duty', flow, head: systemHead(flow) }
+}
+
+/** Parts in which the way to the last point is looked at. */
+const PARTS = 32
+
+/**
+ * The first part in which the pump falls below the system; null where it never does. A parabola that
+ * is hollow may dip below the system and rise above it again: the pump stays at the first crossing.
+ */
+function firstCrossing(
+  spare: (flow: number) => number,
+  shutOff: number,
+  last: number,
+): Bracket | null {
+  let [low, atLow] = [0, shutOff]
+  for (let part = 1; part <= PARTS; part += 1) {
+    const high = (part * last) / PARTS
+    const atHigh = spare(high)
+    if (atHigh <= 0) return { low, high, atLow, atHigh }
+    low = high
+    atLow = atHigh
+  }
+  return null
 }

@@ -41,3 +41,18 @@ export function cycleTime(volume: number, pumpFlow: number, inflow: number): num
 export function affinity(speedRatio: number): { flow: number; head: number; power: number } {
   return { flow: speedRatio, head: speedRatio ** 2, power: speedRatio ** 3 }
 }
+
+/** Energy that a pump takes in a time [J]. */
+export function pumpEnergy(power: PumpPower, runningTime: number): number {
+  return power.shaft * runningTime
+}
+
+/**
+ * Fuel that an engine takes in a time.
+ *
+ * @param rate Fuel per second at this load [m³/s], as its maker prints it.
+ * @returns Volume of fuel [m³].
+ */
+export function fuelNeeded(rate: number, runningTime: number): number {
+  return rate * runningTime
+}

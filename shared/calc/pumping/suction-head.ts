@@ -25,3 +25,8 @@ export function suctionHeadAvailable(suction: Suction): number {
   const free = atmosphereAt(altitude) - vapourPressure(temperature)
   return free / (waterDensity(temperature) * gravity) - suctionLift - suctionLoss
 }
+
+/** Suction head that is left over what the pump needs [m]; below 0 the pump cavitates. */
+export function suctionHeadMargin(suction: Suction, required: number): number {
+  return suctionHeadAvailable(suction) - required
+}

@@ -46,6 +46,8 @@ export class EventState {
   private now: number
   private readonly grown: Growth | null
   private readonly air: AirRun | null
+  /** The answer of the step before: it stands while nothing changes. */
+  private last: EventMoment | null = null
 
   private constructor(
     private readonly input: EventInput,
@@ -111,8 +113,16 @@ export class EventState {
 
   /** All checks at this moment. */
   moment(): EventMoment {
-    const { section, gripShare } = this.input
     const conditions = this.conditions()
+    this.last =
+      this.last && !this.grown && isSame(this.last, conditions)
+        ? { ...this.last, time: this.now }
+        : this.checked(conditions)
+    return this.last
+  }
+
+  private checked(conditions: Conditions): EventMoment {
+    const { section, gripShare } = this.input
     const { diameter } = section.barrier
     const deepest = DEEPEST * diameter * (1 + 1e-12)
     if (conditions.depth > deepest || conditions.dryDepth > deepest) {
@@ -187,6 +197,10 @@ export class EventState {
     const isLevel = section.ground.fall === 0
     return { edge, skirt: isLevel ? edge : begin(heads.skirt) }
   }
+}
+
+function isSame(a: Conditions, b: Conditions): boolean {
+  return a.depth === b.depth && a.dryDepth === b.dryDepth && a.airPressure === b.airPressure
 }
 
 /** The section as a case of its own at these depths and this pressure. */

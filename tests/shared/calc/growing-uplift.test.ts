@@ -1,7 +1,11 @@
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
 import { upliftAtTime, type DepthReading } from '../../../shared/calc/uplift/changing-level'
-import { GrowingUplift, type EndHeads } from '../../../shared/calc/uplift/growing-uplift'
+import {
+  GrowingUplift,
+  type DiffusingBase,
+  type EndHeads,
+} from '../../../shared/calc/uplift/growing-uplift'
 import { OutOfRangeError } from '../../../shared/errors'
 import { cappedResultant, diffuse } from '../../support/diffusion'
 import { expectClose } from '../../support/close-to'
@@ -24,10 +28,17 @@ function lineThrough(readings: readonly DepthReading[]): (time: number) => numbe
   }
 }
 
+interface Passage {
+  readonly until: number
+  readonly steps: number
+  readonly ground?: 'dry' | 'soaked'
+  readonly base?: DiffusingBase
+}
+
 /** Carries heads through equal steps. */
 function carried(
   heads: { readonly edge: (time: number) => number; readonly toe: (time: number) => number },
-  { until, steps, ground = 'dry' as 'dry' | 'soaked', base = BASE },
+  { until, steps, ground = 'dry', base = BASE }: Passage,
 ): GrowingUplift {
   const dt = until / steps
   const at = (time: number): EndHeads => ({ edge: heads.edge(time), toe: heads.toe(time) })
