@@ -106,6 +106,11 @@ const DISPLAY_UNITS = {
     metric: { label: 'l/min', factor: 1e-3 / 60, decimals: 2 },
     us: { label: 'gpm', factor: GALLON / 60, decimals: 2 },
   },
+  /** Flow of pipes, wells and pumps, shown by the second. */
+  flowRate: {
+    metric: { label: 'l/s', factor: 1e-3, decimals: 1 },
+    us: { label: 'gpm', factor: GALLON / 60, decimals: 1 },
+  },
   permeability: {
     metric: { label: 'm/s', factor: 1, decimals: 7 },
     us: { label: 'ft/s', factor: FOOT, decimals: 7 },
