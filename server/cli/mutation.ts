@@ -1,5 +1,5 @@
 import { spawnSync } from 'node:child_process'
-import { existsSync, mkdirSync, readFileSync, writeFileSync } from 'node:fs'
+import { existsSync, mkdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs'
 import { format } from 'prettier'
 import { folderResult, type MutationReport, type MutationResults } from './mutation/folder-result'
 
@@ -19,6 +19,8 @@ async function measure(folder: string): Promise<void> {
     '--incrementalFile',
     kept,
   ]
+  // A run that is broken off leaves no report: nothing is kept then.
+  rmSync(REPORT, { force: true })
   spawnSync('npx', ['stryker', 'run', ...options], { stdio: 'inherit' })
   const report = JSON.parse(readFileSync(REPORT, 'utf8')) as MutationReport
   const results = JSON.parse(readFileSync(RESULTS, 'utf8')) as MutationResults

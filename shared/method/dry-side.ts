@@ -2,6 +2,7 @@ import { gapFlow } from '../calc/ground/gap-flow'
 import { groundSeepage } from '../calc/ground/ground-seepage'
 import { criticalGradient, pipingScreen } from '../calc/ground/piping-screen'
 import { rationalRunoff } from '../calc/ground/rational-runoff'
+import { inflowOf } from '../calc/dry-side/inflow'
 import { worked, type MethodSection } from './formula'
 import { symbol, SYMBOLS } from './symbols'
 
@@ -15,7 +16,7 @@ export const DRY_SIDE: MethodSection = {
   id: 'dry-side',
   title: 'What reaches the dry side',
   intro: [
-    'Waves and water over the crest come from above. Gullies, wells, joints, an open end and brooks are entered as flows.',
+    'Waves and water over the crest, further up, come to it as well. Each way can be plugged, or the line moved past it: then it lets nothing through.',
   ],
   formulas: [
     {
@@ -87,6 +88,51 @@ export const DRY_SIDE: MethodSection = {
           return [
             ['q', perMetre * 3.6e6, 'l/h per m'],
             ['Re', reynolds, '–'],
+          ]
+        },
+      ),
+    },
+    {
+      id: 'ways',
+      title: 'Joints, gullies, an open end',
+      tex: [
+        tex`H = z_w - \max(z_g, z_p)`,
+        tex`Q_\text{joint} = c_j H, \qquad Q_\text{opening} = C A\sqrt{2gH}`,
+        tex`Q_\text{end} = \begin{cases} w\left(\tfrac{2}{3}\right)^{1.5}\sqrt{g}\,H_s^{1.5} & h_p \le \tfrac{2}{3}H_s \\ w\,h_p\sqrt{2g(H_s - h_p)} & \text{above} \end{cases}`,
+      ],
+      symbols: [
+        symbol('z_w,\\ z_p', 'Level of the water and of the pond', 'm'),
+        symbol('z_g', 'Ground beside the joint, or invert of the opening', 'm'),
+        symbol('c_j', 'Flow of the joints per metre of head', 'm²/s'),
+        symbol('C,\\ A', 'Discharge coefficient and area of the opening', '–, m²'),
+        symbol('w', 'Width of the open end', 'm'),
+        symbol('H_s,\\ h_p', 'Water and pond over the sill of the open end', 'm'),
+      ],
+      assumptions: [
+        'A pond that stands higher sends nothing back. Springs and wells bring their flow once the water stands above a level; brooks and ground water by time.',
+        'Flow of joints: no source, enter what was measured.',
+      ],
+      source: 'orifice and broad crest; joints common practice, no source',
+      tag: 'practice',
+      worked: worked(
+        {
+          water: ['z_w', 3.4, 'm'],
+          pond: ['z_p', 2.9, 'm'],
+          ground: ['z_g', 2.87, 'm'],
+          joint: ['c_j', 0.001, 'm²/s'],
+          C: ['C', 0.6, '–'],
+          A: ['A', 0.02, 'm²'],
+          w: ['w', 1.5, 'm'],
+        },
+        (x) => {
+          const at = { time: 0, waterLevel: x.water, pondLevel: x.pond, gravity: 9.81 }
+          const joint = { kind: 'joint', name: '', flowPerHead: x.joint } as const
+          const opening = { kind: 'opening', name: '', area: x.A, coefficient: x.C } as const
+          const end = { kind: 'open-end', name: '', width: x.w, sill: x.ground } as const
+          return [
+            [tex`Q_\text{joint}`, inflowOf({ ...joint, groundLevel: x.ground }, at), 'm³/s'],
+            [tex`Q_\text{opening}`, inflowOf({ ...opening, invert: x.ground }, at), 'm³/s'],
+            [tex`Q_\text{end}`, inflowOf(end, at), 'm³/s'],
           ]
         },
       ),

@@ -11,7 +11,9 @@ const tex = String.raw
 export const EDGE_AND_WIND: MethodSection = {
   id: 'edge',
   title: 'Edge, bends, and wind before the water comes',
-  intro: ['These are demands, not gates.'],
+  intro: [
+    'Ballast and closures are demands, not gates. The skirt that is missing at a bend counts in the sections beside it.',
+  ],
   formulas: [
     {
       id: 'edge-ballast',

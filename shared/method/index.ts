@@ -2,6 +2,7 @@ import { AIR } from './air'
 import { BASES_SECTION, LEVELS_SECTION } from './answers'
 import { DRY_SIDE } from './dry-side'
 import { EDGE_AND_WIND } from './edge-and-wind'
+import { EVENT } from './event'
 import type { MethodSection } from './formula'
 import { LINE } from './line'
 import { LOADED_SHAPE } from './loaded-shape'
@@ -26,5 +27,6 @@ export const METHOD_SECTIONS: readonly MethodSection[] = [
   LINE,
   DRY_SIDE,
   PUMPING,
+  EVENT,
   WATER,
 ]

@@ -1,4 +1,5 @@
 import { lineSections } from '../calc/line/line-sections'
+import { CHANGE_MASS, chooseSizes, sizesCost } from '../checks/layout/choose-sizes'
 import { lineTurns } from '../calc/line/line-turns'
 import type { Station } from '../schemas/line'
 import { worked, type MethodSection } from './formula'
@@ -68,6 +69,39 @@ export const LINE: MethodSection = {
             [tex`\text{turns}`, lineTurns(stations).length, '–'],
             ['n', sections.length, '–'],
             [tex`\text{lowest ground}`, Math.min(...grounds), 'm'],
+          ]
+        },
+      ),
+    },
+    {
+      id: 'layout',
+      title: 'A size for every section',
+      tex: [tex`\min \sum m_i\,\ell + 20\ \text{kg} \times \text{changes}`],
+      symbols: [
+        symbol('m_i', 'Mass of the size of a section', 'kg/m'),
+        symbol(tex`\text{changes}`, 'Joints between two different sizes', '–'),
+      ],
+      assumptions: [
+        'Among sizes with which every check holds and which are not wider than the clear width. Joints that step over a size are avoided first.',
+        'Optimal: dynamic programming over sections and sizes. Where no size holds, the one that holds to the highest level is laid and marked as not holding. The stock is compared afterwards.',
+      ],
+      source: 'weight of a change: judgement, no source',
+      tag: 'practice',
+      worked: worked(
+        {
+          small: [tex`m_1\,\ell`, 48, 'kg'],
+          large: [tex`m_2\,\ell`, 78, 'kg'],
+        },
+        (x) => {
+          const either = { candidates: [0, 1] }
+          const onlyLarge = { candidates: [1] }
+          const masses = [x.small, x.large]
+          const sizes = chooseSizes([either, onlyLarge, either, onlyLarge, either, either], masses)
+          const changes = sizes.filter((size, i) => i > 0 && size !== sizes[i - 1]).length
+          return [
+            [tex`\text{changes}`, changes, '–'],
+            [tex`\text{least}`, sizesCost(sizes, masses).mass, 'kg'],
+            [tex`\text{for a change}`, CHANGE_MASS, 'kg'],
           ]
         },
       ),

@@ -1,4 +1,4 @@
-import { affinity, cycleTime, pumpPower, sumpVolume } from '../calc/pumping/pump-power'
+import { affinity, cycleTime, pumpEnergy, pumpPower, sumpVolume } from '../calc/pumping/pump-power'
 import { suctionHeadAvailable } from '../calc/pumping/suction-head'
 import { worked, type Formula } from './formula'
 import { symbol, SYMBOLS } from './symbols'
@@ -47,9 +47,9 @@ export const POWER_FORMULAS: readonly Formula[] = [
   },
   {
     id: 'power',
-    title: 'Power, and a pump at another speed',
+    title: 'Power, energy, and a pump at another speed',
     tex: [
-      tex`P = \frac{\rho g Q H}{\eta}`,
+      tex`P = \frac{\rho g Q H}{\eta}, \qquad E = P\,t`,
       tex`\frac{Q_2}{Q_1} = n, \qquad \frac{H_2}{H_1} = n^2, \qquad \frac{P_2}{P_1} = n^3`,
     ],
     symbols: [
@@ -68,12 +68,14 @@ export const POWER_FORMULAS: readonly Formula[] = [
         Q: ['Q', 0.05, 'm³/s'],
         H: ['H', 10, 'm'],
         eta: [tex`\eta`, 0.7, '–'],
+        t: ['t', 8, 'h'],
         n: ['n', 0.8, '–'],
       },
       (x) => {
         const work = { flow: x.Q, head: x.H, efficiency: x.eta, density: 1000, gravity: 9.81 }
         return [
           ['P', pumpPower(work).shaft, 'W'],
+          ['E', pumpEnergy(pumpPower(work), x.t * 3600) / 3.6e6, 'kWh'],
           ['P_2/P_1', affinity(x.n).power, '–'],
         ]
       },

@@ -61,7 +61,7 @@ const PONDING: Formula = {
     (x) => {
       const history = pondThroughTime({
         storage: stageStorage([{ level: 0, area: x.A }]),
-        inflowAt: () => x.in,
+        inflowAt: () => [x.in],
         pumps: [{ name: 'pump', startLevel: x.start, stopLevel: x.stop, flowAt: () => x.pump }],
         initialLevel: 0,
         duration: x.hours * 3600,

@@ -1,5 +1,6 @@
 import { frictionResistance } from '../calc/section/friction-resistance'
 import { evaluateSection } from '../checks/evaluate-section'
+import { pondLimit } from '../checks/pond-limit'
 import { justEnough } from '../checks/just-enough'
 import { exampleSection } from '../verification/example-section'
 import { worked, type Formula, type Given, type MethodSection } from './formula'
@@ -212,15 +213,22 @@ const INFORMATION: readonly Formula[] = [
     symbols: [hd, symbol(tex`A_o(h_d)`, 'Overhang of the tube under the dry water', 'm²')],
     assumptions: [
       'It pushes back a little, and takes far more of the friction resistance away: lift of the tube and uplift both grow.',
+      'The most h_d is the dry water at which the first check fails, looked for at depths 0.005 D apart and refined.',
     ],
     source: 'equilibrium, derived',
     tag: 'derived',
     worked: worked({ ...TUBE, hd: ['h_d', 0.1, 'm'] }, (x) => {
       const dry = sectionOf(x)
       const ponded = { ...dry, water: { ...dry.water, dryDepth: x.hd } }
+      const low = { ...dry, water: { ...dry.water, depth: 0.42 } }
       return [
         [tex`FS \text{ without}`, evaluateSection(dry).sliding.factor ?? 0, '–'],
         [tex`FS \text{ with}`, evaluateSection(ponded).sliding.factor ?? 0, '–'],
+        [
+          tex`\text{most } h_d \text{ at } h = 0.42\,\mathrm{m}`,
+          pondLimit(low)?.dryDepth ?? 0,
+          'm',
+        ],
       ]
     }),
   },
