@@ -47,7 +47,7 @@ function noteAt(
  *
  * @param seal Pressure that keeps the seat closed, ρ g h [Pa].
  */
-function outcomeOf(
+export function outcomeOf(
   { evaluation, airPressure }: AtTemperature,
   seal: number,
 ): 'limp' | 'down' | 'soft' | 'fails' | 'fabric' | null {

@@ -1,9 +1,11 @@
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
 import { currentThrust } from '../../../shared/calc/moving-water/current-thrust'
+import { debrisImpact } from '../../../shared/calc/moving-water/debris-impact'
 import { debrisThrust } from '../../../shared/calc/moving-water/debris-thrust'
 import { waveNumber } from '../../../shared/calc/moving-water/wave-number'
 import { waveThrust } from '../../../shared/calc/moving-water/wave-thrust'
+import { OutOfRangeError } from '../../../shared/errors'
 import { expectClose } from '../../support/close-to'
 
 describe('wave number', () => {
@@ -82,5 +84,24 @@ describe('current and debris', () => {
     const debris = { force: 3000, draught: 0.25, sectionLength: 10 }
     expect(debrisThrust({ ...debris, depth: 0.2499 }).force).toBe(0)
     expect(debrisThrust({ ...debris, depth: 0.25 })).toEqual({ force: 300, moment: 75 })
+  })
+})
+
+describe('debris that is stopped', () => {
+  it('takes its impulse from the time in which it stops', () => {
+    // Newton's second law: 500 kg × 2 m/s in 0.2 s are 5 kN in the mean; a half sine peaks at π/2 of it.
+    const { mean, peak } = debrisImpact({ mass: 500, speed: 2, stoppingTime: 0.2 })
+    expect(mean).toBeCloseTo(5000, 9)
+    expect(peak / mean).toBeCloseTo(Math.PI / 2, 12)
+  })
+
+  it.each([
+    ['no mass', { mass: 0 }],
+    ['kilometres an hour typed as metres a second', { speed: 30 }],
+    ['an instant stop', { stoppingTime: 0 }],
+    ['an empty field', { mass: Number.NaN }],
+  ])('rejects %s', (_reason, change) => {
+    const debris = { mass: 500, speed: 2, stoppingTime: 0.2, ...change }
+    expect(() => debrisImpact(debris)).toThrow(OutOfRangeError)
   })
 })
