@@ -178,11 +178,12 @@ function labelPresent(present: PresentCase, frame: DesignFrame, placer: LabelPla
   const x = toX(Math.min(1, present.depth))
   const y = present.crest === null ? (frame.top + bottom) / 2 : toY(present.crest)
   const label = { id: 'present', role: 'label', size: font, weight: 600 } as const
-  const spots = LINES_BELOW.flatMap((lines): Spot[] => [
-    { x: x - 8, y: y + lines * font, anchor: 'end' },
-    { x: x + 8, y: y + lines * font, anchor: 'start' },
-    { x: left + 10, y: y + lines * font, anchor: 'start' },
-  ])
+  const below = LINES_BELOW.map((lines) => y + lines * font)
+  const spots = [
+    ...below.map((height): Spot => ({ x: x - 8, y: height, anchor: 'end' })),
+    ...below.map((height): Spot => ({ x: x + 8, y: height, anchor: 'start' })),
+    ...below.map((height): Spot => ({ x: left + 10, y: height, anchor: 'start' })),
+  ]
   placer.placeSurely({ ...label, message: presentMessage(present) }, spots)
 }
 

@@ -70,7 +70,7 @@ const PUNCTURE: Formula = {
     h,
   ],
   assumptions: [
-    'What comes through the sections that are down is the water through a section that has gone soft, see the air above.',
+    'What comes through the sections that are down is worked out under Air: water through a section that has gone soft.',
     'Linked sections all go soft in the end; how fast follows from the leak.',
   ],
   source: 'orifice flow; coefficient 0.61 (from memory); Ritter 1892 (from memory)',
