@@ -97,7 +97,9 @@ function known(readings: readonly Reading[]): readonly KnownReading[] {
   return readings.flatMap(({ time, value }) => (value === null ? [] : [{ time, value }]))
 }
 
-function airOf({ filledAt, readings, leak }: NonNullable<EventCase['air']>): EventInput['air'] {
+type Air = NonNullable<EventInput['air']>
+
+function airOf({ filledAt, readings, leak }: NonNullable<EventCase['air']>): Air {
   const temperature = readings.map((reading) => ({
     time: parseMoment(reading.time) ?? NaN,
     value: reading.temperature,

@@ -79,7 +79,7 @@ describe('calc section', { timeout: 30_000 }, () => {
     [[], /^a command is missing\n/],
     [
       ['seepages'],
-      /^"seepages" is not a command; it must be one of: section, seepage, duty, ponding, event\n$/,
+      /^"seepages" is not a command; it must be one of: section, seepage, duty, ponding, event\b/,
     ],
     [['section', '/nowhere/case.json'], /^\/nowhere\/case\.json: there is no such file\n$/],
     [['section', '/'], /^\/: EISDIR/],
