@@ -77,6 +77,11 @@ export class AirRun {
     for (let i = 0; i < steps; i += 1) this.lose(leak, from + i * step, step)
   }
 
+  /** Goes back to where another run of the same air stands. */
+  take(other: AirRun): void {
+    this.amount = other.amount
+  }
+
   /** A copy that can be carried forward on its own. */
   copy(): AirRun {
     const copy = new AirRun(this.air)

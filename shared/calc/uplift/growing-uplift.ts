@@ -108,6 +108,15 @@ export class GrowingUplift {
     return new GrowingUplift(this.ground, this)
   }
 
+  /** Goes back to where another growth of the same base stands, without making a new one. */
+  take(other: GrowingUplift): void {
+    this.modes.set(other.modes)
+    this.moving = other.moving
+    this.heads = other.heads
+    this.slopes = other.slopes
+    this.highest = other.highest
+  }
+
   /** Carries the heads in a straight line to `to` within `duration` [s], above 0. */
   advance(duration: number, to: EndHeads): void {
     assertStep(duration, to)

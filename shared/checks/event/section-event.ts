@@ -37,6 +37,8 @@ export class SectionEvent {
   private stretch = 0
   private step = 0
   private state: EventState | null = null
+  /** The state one step earlier, to look into the middle of a step. */
+  private before: EventState | null = null
   private isFailing = false
   /** Highest depth before a gap [m]. */
   private depthBefore = 0
@@ -89,16 +91,18 @@ export class SectionEvent {
   private next(): void {
     const { stretch, times } = this.stretches[this.stretch]!
     const time = times[this.step]!
-    const before = this.step === 0 ? null : this.state!.copy()
-    if (this.step === 0) {
+    const isFirst = this.step === 0
+    if (isFirst) {
       const carried = { before: this.depthBefore, air: this.airAcross(time) }
       this.state = EventState.at(this.input, stretch, carried)
+      this.before = this.state.copy()
     } else {
+      this.before!.take(this.state!)
       this.state!.advance(time)
     }
     const moment = this.state!.moment()
     writeMoment(this.trace, this.computed, moment)
-    this.note(moment, before)
+    this.note(moment, isFirst ? null : this.before)
     this.computed += 1
     this.step += 1
     if (this.step === times.length) this.endStretch(moment)
