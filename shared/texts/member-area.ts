@@ -7,6 +7,7 @@ import { linePlanTexts } from './line-plan.en'
 import { projectTexts } from './project.en'
 import { scenarioTexts } from './scenario.en'
 import { statesTexts } from './states.en'
+import { surveyImportTexts } from './survey-import.en'
 
 /** Texts of everything behind the sign-in; they are loaded when the area is entered. */
 export const areaTexts = {
@@ -20,5 +21,6 @@ export const areaTexts = {
     projectPage: projectTexts,
     scenarioPage: scenarioTexts,
     states: statesTexts,
+    surveyImport: surveyImportTexts,
   },
 } as const

@@ -28,6 +28,16 @@ export function linePath({ projectId, lineId }: LineRef): string {
   return `${path(projectId)}/${encodeURIComponent(lineId)}`
 }
 
+/** Address of the survey as a file for a spreadsheet. */
+export function surveyCsv(line: LineRef): string {
+  return `${linePath(line)}/stations.csv`
+}
+
+/** Address of the line as GeoJSON. */
+export function lineGeoJson(line: LineRef): string {
+  return `${linePath(line)}/line.geojson`
+}
+
 export async function fetchLines(
   projectId: string,
   query: ListQuery,
