@@ -29,7 +29,7 @@ export function typesetSheet(
         name: SHEET_ATTACHMENT,
         mediaType: 'application/json',
         text: JSON.stringify(sheet, null, 2),
-        description: document.words.attachment ?? '',
+        description: document.attachment,
       },
     ],
   })

@@ -78,10 +78,3 @@ export function plainNumber({ digits, exponent }: PrintedNumber): string {
 export function figureUnit(kind: FigureKind, system: UnitSystem): string {
   return sheetUnit(kind, system).label
 }
-
-/** "0.865 kN/m", as plain text. */
-export function plainFigure(figure: SheetFigure, system: UnitSystem): string {
-  const unit = figureUnit(figure.kind, system)
-  const number = plainNumber(printedNumber(figure, system))
-  return unit === '' ? number : `${number}\u00a0${unit}`
-}

@@ -77,6 +77,6 @@ export type SourceId = keyof typeof SHEET_SOURCES
 export function referencesOf(ids: readonly SourceId[]): readonly string[] {
   const used = new Set<SourceId>(ids)
   return Object.entries(SHEET_SOURCES).flatMap(([id, { reference }]) =>
-    used.has(id as SourceId) && reference !== null ? [reference] : [],
+    used.has(id as SourceId) && reference !== null ? [`${reference}.`] : [],
   )
 }

@@ -33,6 +33,11 @@ export function writeLine(line: DerivationLine, system: UnitSystem): WrittenLine
   }
 }
 
+/** One figure with its unit, in all notations. */
+export function writeFigure(figure: SheetFigure, system: UnitSystem): Written {
+  return writeBox(figureBox(figure, system))
+}
+
 function equation(left: Box, right: Box): Box {
   return { kind: 'row', items: [left, '=', right] }
 }

@@ -70,6 +70,7 @@ export function composeSheet(sheet: Sheet, chapters: readonly Chapter[] = []): S
     })),
     verification: sheet.verification,
     photographs: sheet.photographs,
+    attachment: words.say('sheet.attachment'),
     words: sheetTexts.word,
   }
 }

@@ -59,11 +59,11 @@ export function answerOf(sheet: Sheet, words: SheetWords): string {
 
 function subjectOf(sheet: Sheet, words: SheetWords): string {
   const { case: section, barrier, surface, groundLevel } = sheet
-  const { say, show, level } = words
+  const { say, show, level, size } = words
   const values = {
     name: barrier,
-    barrier: show(section.barrier.diameter, 'length'),
-    skirt: show(section.barrier.skirtLength, 'length'),
+    barrier: size(section.barrier.diameter),
+    skirt: size(section.barrier.skirtLength),
     air: show(section.barrier.airPressure, 'pressure'),
   }
   const tube =

@@ -56,7 +56,7 @@ export interface LineGroup {
 export interface InputRow {
   readonly symbol: Written
   readonly name: string
-  readonly value: string
+  readonly value: Written
   readonly source: string
 }
 
@@ -144,5 +144,7 @@ export interface SheetDocument {
   readonly approvals: readonly ApprovalBox[]
   readonly verification: Sheet['verification']
   readonly photographs: Sheet['photographs']
+  /** What the attached file is, in words. */
+  readonly attachment: string
   readonly words: Readonly<Record<string, string>>
 }

@@ -27,7 +27,7 @@ export function sectionDrawing(sheet: Sheet, words: SheetWords): Drawing {
     lastStanding: outline ? null : lastStanding(section),
     marks: { holdsTo: from === null ? null : depth, leave: leaveOf(sheet).depth },
     level: groundLevel === null ? null : { ground: groundLevel, datum },
-    view: { width: WIDTH, height: 262 },
+    view: { width: WIDTH, height: 246 },
     measure: measureWith(words.resolve),
   })
   return { scene, caption: words.say('sheet.caption.section') }

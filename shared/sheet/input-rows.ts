@@ -1,5 +1,5 @@
-import { plainFigure } from '../derivation/figures'
 import { layOut } from '../derivation/layout'
+import { writeFigure } from '../derivation/written-line'
 import type { Derivation } from '../derivation/line'
 import { writeBox } from '../derivation/notation'
 import type { Sheet } from '../schemas/sheet'
@@ -49,7 +49,7 @@ export function inputRows(
   return derivation.givens.map((figure) => ({
     symbol: writeBox(layOut(figure.symbol, (id) => ({ kind: 'symbol', id }))),
     name: words.say(`derivation.given.${figure.symbol}`),
-    value: plainFigure(figure, derivation.system),
+    value: writeFigure(figure, derivation.system),
     source: sourceOf(figure.symbol, sheet, words),
   }))
 }

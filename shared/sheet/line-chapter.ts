@@ -53,6 +53,13 @@ function chainage(value: number): string {
   return String(Number(value.toFixed(1)))
 }
 
+/** A ground of the catalogue by its name; another as it was entered. */
+function surfaceName(words: SheetWords, surface: string): string {
+  const key = `checks.ground.${surface}`
+  const name = words.say(key)
+  return name === key ? surface : name
+}
+
 function layoutTable(sections: readonly SectionAnswer[], words: SheetWords): Table {
   const none = words.say('sheet.line.none')
   return {
@@ -71,7 +78,7 @@ function layoutTable(sections: readonly SectionAnswer[], words: SheetWords): Tab
       chainage(section.from),
       chainage(section.to),
       section.barrierName ?? none,
-      section.surface,
+      surfaceName(words, section.surface),
       words.show(section.groundLevel, 'length'),
       words.show(section.depth, 'length'),
       section.utilisation === null ? none : usedShare(words, section.utilisation),
@@ -102,6 +109,7 @@ function stretchTable(
 ): Table {
   return {
     columns: [
+      column(words, 'place', true),
       column(words, 'tube', false),
       column(words, 'surface', false),
       ...STRETCH_CHECKS.map((id) => ({ label: words.say(`checks.name.${id}`), isRight: true })),
@@ -122,7 +130,7 @@ function stretchRow(
   const { barrierName, surface, groundLevel, place, verdict, governs, gap, gripShare } = section
   const run = sizeAt(content, (section.from + section.to) / 2)
   const ground = assumptionOf(content, surface)
-  const lead = [barrierName ?? none, surface]
+  const lead = [chainage(place), barrierName ?? none, surfaceName(words, surface)]
   if (gap !== null || !run || !ground) {
     const reason = gap === null ? none : words.say(`sheet.line.gap.${gap}`)
     return [...lead, ...STRETCH_CHECKS.map(() => none), reason, shownVerdict(words, verdict)]

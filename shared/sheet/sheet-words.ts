@@ -1,6 +1,7 @@
 import { checksTexts } from '../texts/checks.en'
 import { derivationTexts } from '../texts/derivation.en'
 import { drawingTexts } from '../texts/drawing.en'
+import { linePlanTexts } from '../texts/line-plan.en'
 import { lineTexts } from '../texts/line.en'
 import { sheetTexts } from '../texts/sheet.en'
 import { shellTexts } from '../texts/shell.en'
@@ -11,9 +12,9 @@ import { formatQuantity, type Quantity, type QuantityKind, type UnitSystem } fro
 export const SHEET_TEXTS = {
   checks: checksTexts,
   derivation: derivationTexts,
-  // A sheet is read later than it was made: it has no now.
-  drawing: { ...drawingTexts, chart: { ...drawingTexts.chart, now: sheetTexts.chart.now } },
+  drawing: drawingTexts,
   linePage: lineTexts,
+  linePlan: linePlanTexts,
   sheet: sheetTexts,
   shell: shellTexts,
 } as const
@@ -26,13 +27,21 @@ export interface SheetWords {
   readonly resolve: ResolveText
   /** A quantity with its unit. */
   readonly show: (value: number, kind: QuantityKind, rounding?: 'down' | 'up') => string
+  /** A length as a size: 0.70 m, 1.25 m. */
+  readonly size: (value: number) => string
   /** A level with its datum, rounded down. */
   readonly level: (value: number, rounding?: 'down') => string
 }
 
+/** A sheet is read later than it was made: its drawings have no now. */
+function withoutNow(resolve: ResolveText): ResolveText {
+  return (message) =>
+    resolve(message.key === 'drawing.chart.now' ? { ...message, key: 'sheet.chart.now' } : message)
+}
+
 /** Words in the units of the sheet. */
 export function sheetWords(system: UnitSystem, datum: string): SheetWords {
-  const resolve = textResolver(SHEET_TEXTS, system)
+  const resolve = withoutNow(textResolver(SHEET_TEXTS, system))
   const show = (value: number, kind: QuantityKind, rounding?: 'down' | 'up') => {
     const quantity: Quantity = rounding ? { value, kind, rounding } : { value, kind }
     return formatQuantity(quantity, system)
@@ -42,6 +51,7 @@ export function sheetWords(system: UnitSystem, datum: string): SheetWords {
     resolve,
     say: (key, values) => resolve(values ? { key, values } : { key }),
     show,
+    size: (value) => show(value, 'length').replace(/(\.\d\d)0+(?=\D)/, '$1'),
     level: (value, rounding) =>
       `${show(value, 'length', rounding)}${datum === '' ? '' : ` ${datum}`}`,
   }

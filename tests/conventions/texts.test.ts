@@ -3,6 +3,7 @@ import { texts } from '../../shared/texts'
 import { areaTexts } from '../../shared/texts/member-area'
 import { methodAreaTexts } from '../../shared/texts/method-area'
 import { sectionDetails } from '../../shared/texts/section-details.en'
+import { sheetTexts } from '../../shared/texts/sheet.en'
 import { sourceFiles } from '../support/source-files'
 
 /** Every text by its full key. */
@@ -17,7 +18,13 @@ function leaves(node: object, prefix = ''): Map<string, string> {
 }
 
 /** What is loaded at once, and what comes with the area behind the sign-in and the Method page. */
-const all = { ...texts.en, ...areaTexts.en, ...sectionDetails.en, ...methodAreaTexts.en }
+const all = {
+  ...texts.en,
+  ...areaTexts.en,
+  ...sectionDetails.en,
+  ...methodAreaTexts.en,
+  sheet: sheetTexts,
+}
 const keys = [...leaves(all).keys()]
 const AREAS = Object.keys(all).join('|')
 
@@ -26,7 +33,9 @@ const sources = [...sourceFiles('src', /\.(ts|vue)$/), ...sourceFiles('shared', 
 )
 /** Names with a dot stand in keys with a dash. The server names the deeds of the audit trail. */
 const words = new Set(
-  [...sources, ...sourceFiles('server', /\.ts$/)].flatMap(({ text }) => text.replace(/(\d)\.(\d)/g, '$1-$2').match(/[\w-]+/g) ?? []),
+  [...sources, ...sourceFiles('server', /\.ts$/)].flatMap(
+    ({ text }) => text.replace(/(\d)\.(\d)/g, '$1-$2').match(/[\w-]+/g) ?? [],
+  ),
 )
 
 interface UsedKey {
@@ -68,6 +77,15 @@ function isNamedInScene(key: string): boolean {
   return key.startsWith('drawing.') && key.split('.').every(isComposed)
 }
 
+const templates = sourceFiles('server/typesetting/templates', /\.typ$/)
+  .map(({ text }) => text)
+  .join('\n')
+
+/** The templates of documents print their labels by name. */
+function isPrinted(key: string): boolean {
+  return key.startsWith('sheet.word.') && templates.includes(key.replace('sheet.word', 'words'))
+}
+
 describe('texts of the interface', () => {
   const used = usedKeys()
 
@@ -81,7 +99,8 @@ describe('texts of the interface', () => {
   })
 
   it('has no key that nothing uses', () => {
-    const isUsed = (key: string) => isNamedInScene(key) || used.some((use) => standsFor(use, key))
+    const isUsed = (key: string) =>
+      isNamedInScene(key) || isPrinted(key) || used.some((use) => standsFor(use, key))
     expect(keys.filter((key) => !isUsed(key))).toEqual([])
   })
 })

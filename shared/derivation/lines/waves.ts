@@ -39,7 +39,7 @@ function writePressures({ book, state }: LineContext, waves: WaveThrust): void {
   book.line('thrust', {
     id: 'waveAlpha',
     symbol: 'alpha_1',
-    formula: '0.6 + (2 * k * h / sinh(2 * k * h))^2 / 2',
+    formula: '0.6 + 1 / 2 * (2 * k * h / sinh(2 * k * h))^2',
     value: waves.alpha1,
     kind: 'ratio',
     source: 'goda',
