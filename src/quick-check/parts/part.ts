@@ -30,6 +30,12 @@ export interface PartProposal {
   readonly values: Partial<FieldValues>
 }
 
+/** Controls of the page that a part shows; they are handed in, so that the first page keeps them to itself. */
+export interface PartSlots {
+  field(props: { readonly id: FieldId }): unknown
+  put(props: { readonly proposal: PartProposal }): unknown
+}
+
 /** Inputs of a part with what follows from them. */
 export interface PartGroup {
   readonly title: Message | null

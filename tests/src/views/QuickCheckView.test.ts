@@ -150,6 +150,17 @@ describe('the Quick check', () => {
     expect(band().textContent).toMatch(/The loads along the ground come to 0\.87\skN\/m/)
   })
 
+  it('brings the waves to the front where they govern, and puts grown ones into the case', async () => {
+    const user = await open('?v=1&wave=0.1&period=2&wind=15&fetch=500&fetchdepth=1')
+    const title = await screen.findByText('One by one', {}, { timeout: 15_000 })
+    const parts = within(title.closest('section')!)
+    const [first] = parts.getAllByRole('listitem')
+    expect(first!.textContent).toMatch(/^\s*Waves\s*governs/)
+    await user.click(within(first!).getByRole('button', { name: /^Check with waves of/ }))
+    expect(field('Wave height').value).toMatch(/^0\.[0-9]+$/)
+    expect(field('Wave height').value).not.toBe('0.1')
+  })
+
   it('answers what it says on the bag', async () => {
     await open()
     expect(band().textContent).toMatch(/“But it says 0\.70\sm on the bag”/)
