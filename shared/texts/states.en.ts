@@ -23,7 +23,7 @@ export const statesTexts = {
     forbidden: 'An administrator can change your role, or the lead of the project yours in it.',
     missing: 'It may have been deleted, or you are not a member.',
     conflict: 'Load what is there now, then decide.',
-    invalid: 'The fields say what is allowed.',
+    invalid: 'Change what is named, and go on.',
     tooLarge: 'Make it smaller, then try again.',
     tooMany: 'Wait a little, then try again.',
     refused: 'Change what is named, then try again.',
