@@ -2,6 +2,7 @@ import { accountTexts } from './account.en'
 import { adminTexts } from './admin.en'
 import { deedsTexts } from './deeds.en'
 import { deskTexts } from './desk.en'
+import { layoutTexts } from './layout.en'
 import { lineTexts } from './line.en'
 import { linePlanTexts } from './line-plan.en'
 import { projectTexts } from './project.en'
@@ -16,6 +17,7 @@ export const areaTexts = {
     admin: adminTexts,
     deeds: deedsTexts,
     desk: deskTexts,
+    layout: layoutTexts,
     linePage: lineTexts,
     linePlan: linePlanTexts,
     projectPage: projectTexts,

@@ -1,5 +1,6 @@
 import { useQuery } from '@tanstack/vue-query'
 import { computed, toValue, type MaybeRefOrGetter } from 'vue'
+import { fetchProjectStore } from '@/api/depots'
 import { fetchGauges } from '@/api/gauges'
 import { fetchLine, type LineRef } from '@/api/lines'
 import { fetchProject } from '@/api/projects'
@@ -10,6 +11,14 @@ export function useProject(projectId: MaybeRefOrGetter<string>) {
   return useQuery({
     queryKey: computed(() => ['project', toValue(projectId)]),
     queryFn: ({ signal }) => fetchProject(toValue(projectId), signal),
+  })
+}
+
+/** Depots that count in a project; they change seldom. */
+export function useProjectStore(projectId: MaybeRefOrGetter<string>) {
+  return useQuery({
+    queryKey: computed(() => ['store', toValue(projectId)]),
+    queryFn: ({ signal }) => fetchProjectStore(toValue(projectId), signal),
   })
 }
 

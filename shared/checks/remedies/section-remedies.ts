@@ -7,7 +7,7 @@ import { missingRoom } from '../layout/size-options'
 import { edgeCost } from '../layout/layout-bill'
 import { answerSection, type LineWork, type SectionAnswer } from '../line-check'
 import { sizeAt } from '../place-case'
-import { EDGE_FACTORS } from '../what-decides'
+import { edgeFactorsOf } from '../what-decides'
 import { compareRemedies, LEAST_GAIN, type Remedy, type RemedyKind } from './remedy'
 
 /** What remedies of one line rest on. */
@@ -114,8 +114,9 @@ function edgeRemedies(section: LineSection, run: SizeRun, work: RemedyWork): rea
   if (content.uplift.model === 'none') return []
   const now = run.edgeFactor ?? content.uplift.edgeFactor
   const before = edgeCost(run, content, sectionLength)
+  const factors = edgeFactorsOf(content.uplift)
   return (['weigh', 'seal'] as const).flatMap((kind) => {
-    const edgeFactor = kind === 'weigh' ? EDGE_FACTORS.weighed : EDGE_FACTORS.sealed
+    const edgeFactor = kind === 'weigh' ? factors.weighed : factors.sealed
     if (edgeFactor >= now) return []
     const after = edgeCost({ edgeFactor }, content, sectionLength)
     const bags = after.bags - before.bags

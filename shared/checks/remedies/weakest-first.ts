@@ -39,32 +39,41 @@ export interface WeakestFirstInput {
   readonly sizes: readonly ScenarioBarrier[]
   /** Null where no store is known. */
   readonly store: Pick<Store, 'depots'> | null
-  /** Sections that are looked at. */
-  readonly most: number
   readonly profiles?: HoldingProfiles
 }
 
 /**
  * The weakest sections of a line in the order in which they give way as the water rises, each with its
  * remedies and what would limit the line after each of them.
+ *
+ * @param most Sections that are looked at.
  */
-export function weakestFirst(input: WeakestFirstInput): readonly WeakPlace[] {
-  const { survey, content, answer, most, profiles = new Map() } = input
+export function weakestFirst(input: WeakestFirstInput, most: number): readonly WeakPlace[] {
+  return weakestSections(input.answer, most).map((weak) => weakPlace(input, weak))
+}
+
+/**
+ * One section with its remedies.
+ *
+ * @param weak One of the sections of the answer.
+ */
+export function weakPlace(input: WeakestFirstInput, weak: SectionAnswer): WeakPlace {
+  const { survey, content, answer, profiles = new Map() } = input
   const { sectionLength } = survey
   const sections = lineSections(survey.stations, sectionLength, survey.marks)
   const sizes = offeredSizes(input.sizes, sectionLength)
   const left = input.store && storeLeft(survey, content, input.store)
+  const index = answer.sections.indexOf(weak)
+  const section = sections[index]!
   const work = { content, sizes, left, sectionLength, profiles }
-  return weakestSections(answer, most).map((weak) => {
-    const index = answer.sections.indexOf(weak)
-    const section = sections[index]!
-    const remedies = sectionRemedies(section, weak, work)
-    return {
-      section,
-      answer: weak,
-      remedies: remedies.map((remedy) => ({ ...remedy, next: nextLimit(answer, index, remedy) })),
-    }
-  })
+  return {
+    section,
+    answer: weak,
+    remedies: sectionRemedies(section, weak, work).map((remedy) => ({
+      ...remedy,
+      next: nextLimit(answer, index, remedy),
+    })),
+  }
 }
 
 /** Sections by the level to which they hold; those that hold nothing come first. */

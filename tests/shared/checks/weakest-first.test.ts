@@ -22,15 +22,17 @@ const STORE = {
 const profiles: HoldingProfiles = new Map()
 
 const places = (content: ScenarioContent, most = 1) =>
-  weakestFirst({
-    survey: SURVEY,
-    content,
-    answer: checkLine(SURVEY, content, profiles),
-    sizes: TUBES,
-    store: STORE,
+  weakestFirst(
+    {
+      survey: SURVEY,
+      content,
+      answer: checkLine(SURVEY, content, profiles),
+      sizes: TUBES,
+      store: STORE,
+      profiles,
+    },
     most,
-    profiles,
-  })
+  )
 
 const down = (level: number | null) => level !== null && Math.floor(level * 1000) / 1000
 
