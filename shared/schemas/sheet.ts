@@ -5,19 +5,9 @@ import { marksSchema } from './mark'
 import { scenarioContentSchema } from './scenario'
 import { sectionCaseSchema } from './section-case'
 import { sectionResultSchema } from './section-result'
+import { SHEET_STATUSES } from './sheet-status'
 
-/** Where a sheet stands on its way. */
-export const SHEET_STATUSES = [
-  'draft',
-  'in-checking',
-  'returned',
-  'checked',
-  'approved',
-  'issued-for-information',
-  'superseded',
-  'withdrawn',
-] as const
-export type SheetStatus = (typeof SHEET_STATUSES)[number]
+export { SHEET_STATUSES, type SheetStatus } from './sheet-status'
 
 /** Category of check. BS 5975-1:2024, table 2. */
 export const CHECK_CATEGORIES = [0, 1, 2, 3] as const
@@ -58,6 +48,21 @@ export const assumptionSchema = z.strictObject({
 
 /** Where an input comes from, by its path in the case: `ground.friction`. */
 export const inputSourcesSchema = z.record(z.string().max(80), words(200))
+
+/** What a checker worked out beside a line of the sheet, in the unit that the line is printed in. */
+export const checkFigureSchema = z.strictObject({
+  line: words(12).min(1),
+  value: z.number(),
+  note: words(400).default(''),
+})
+
+/** What was done when the sheet was checked; printed as an appendix. */
+export const checkingSchema = z.strictObject({
+  by: words(120).min(1),
+  ticked: z.array(words(12).min(1)).max(400),
+  figures: z.array(checkFigureSchema).max(400),
+})
+export type Checking = z.output<typeof checkingSchema>
 
 /** The line that a section belongs to, for the chapters of the line. */
 export const sheetLineSchema = z.strictObject({
@@ -123,13 +128,19 @@ export const sheetSchema = z
       })
       .prefault({}),
     line: sheetLineSchema.nullable().default(null),
+    checking: checkingSchema.nullable().default(null),
     photographs: z
       .array(z.strictObject({ caption: words(300), picture: pictureSchema }))
       .max(24)
       .default([]),
     letterhead: letterheadSchema.prefault({}),
     verification: z
-      .strictObject({ code: words(40).min(4), address: words(200).min(1) })
+      .strictObject({
+        code: words(40).min(4),
+        address: words(200).min(1),
+        /** SHA-256 over the canonical JSON of the sheet without this part; hexadecimal. */
+        digest: words(64).default(''),
+      })
       .nullable()
       .default(null),
     /** Day that the document bears; also the date inside the PDF, so that equal sheets are equal files. */

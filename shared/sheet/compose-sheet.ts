@@ -6,6 +6,7 @@ import { checkBasis } from '../catalogue/check-bases'
 import type { Sheet } from '../schemas/sheet'
 import { sheetTexts } from '../texts/sheet.en'
 import { checkRows } from './check-rows'
+import { checkingChapter } from './checking-chapter'
 import { coverOf } from './cover'
 import { decidesOf } from './decides'
 import type { Chapter, SheetDocument } from './document'
@@ -58,7 +59,11 @@ export function composeSheet(sheet: Sheet, chapters: readonly Chapter[] = []): S
     omitted: omittedOf(sheet, words),
     decides: decidesOf(sheet, words),
     decidesNotes: [words.say('sheet.decides.judgement'), words.say('sheet.decides.adverse')],
-    chapters: [...(sheet.line ? [lineChapter(sheet.line, words)] : []), ...chapters],
+    chapters: [
+      ...(sheet.line ? [lineChapter(sheet.line, words)] : []),
+      ...chapters,
+      ...(sheet.checking ? [checkingChapter(sheet.checking, derivation, words)] : []),
+    ],
     assumptions: assumptionsOf(sheet, words),
     inputs: inputRows(derivation, sheet, words),
     references: referencesFor(sheet, derivation),

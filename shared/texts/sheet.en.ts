@@ -42,6 +42,7 @@ export const sheetTexts = {
     verification: 'Verification',
     verify: 'verify',
     verifyNote: 'Enter the code, or scan it, to see whether this is the sheet issued, and current.',
+    digest: 'SHA-256 of the attached JSON in canonical form, without its part "verification"',
     photographs: 'Photographs',
     photograph: 'Photograph',
     footer: 'A design check, not a guarantee. Local codes and a licensed engineer come first.',
@@ -226,6 +227,18 @@ export const sheetTexts = {
       'too-deep': 'too deep',
       'sharp-turn': 'turn too sharp',
     },
+  },
+  checking: {
+    title: 'Appendix: the check',
+    ticked: '{count} of {of} lines ticked by {by}.',
+    figures: "The checker's own figures beside those of the sheet.",
+    line: 'Line',
+    name: 'Quantity',
+    sheet: 'Sheet',
+    own: 'Own figure',
+    difference: 'Difference',
+    note: 'Note',
+    none: 'none',
   },
   method: {
     engine:
