@@ -71,3 +71,4 @@ export const meta = sqliteTable('meta', {
 export * from './tables/accounts'
 export * from './tables/depots'
 export * from './tables/projects'
+export * from './tables/sheets'
