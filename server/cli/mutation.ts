@@ -1,13 +1,21 @@
 import { spawnSync } from 'node:child_process'
 import { existsSync, mkdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs'
 import { format } from 'prettier'
-import { folderResult, type MutationReport, type MutationResults } from './mutation/folder-result'
+import {
+  folderResult,
+  withoutSurvivors,
+  type MutationReport,
+  type MutationResults,
+} from './mutation/folder-result'
 
 const RESULTS = 'docs/mutation.json'
 const CACHE = 'node_modules/.cache/mutation'
 const REPORT = 'reports/mutation/mutation.json'
 
-/** Runs the mutants of one folder below shared/ and keeps the figures; only what changed runs again. */
+/**
+ * Runs the mutants of one folder below shared/ and keeps the figures; only what changed, and what
+ * survived the last time, runs again.
+ */
 async function measure(folder: string): Promise<void> {
   if (!existsSync(`shared/${folder}`)) throw new Error(`shared/${folder} is not there`)
   mkdirSync(CACHE, { recursive: true })
@@ -19,6 +27,10 @@ async function measure(folder: string): Promise<void> {
     '--incrementalFile',
     kept,
   ]
+  if (existsSync(kept)) {
+    const report = JSON.parse(readFileSync(kept, 'utf8')) as MutationReport
+    writeFileSync(kept, JSON.stringify(withoutSurvivors(report)))
+  }
   // A run that is broken off leaves no report: nothing is kept then.
   rmSync(REPORT, { force: true })
   spawnSync('npx', ['stryker', 'run', ...options], { stdio: 'inherit' })

@@ -73,6 +73,18 @@ export function folderResult(report: MutationReport, of: Measurement): FolderRes
   }
 }
 
+/**
+ * The report without what survived, so that it runs again: the tool keeps a survivor although there
+ * are new tests.
+ */
+export function withoutSurvivors<Report extends MutationReport>(report: Report): Report {
+  const files = Object.entries(report.files).map(([path, file]) => {
+    const mutants = file.mutants.filter(({ status }) => !SURVIVED.includes(status))
+    return [path, { ...file, mutants }] as const
+  })
+  return { ...report, files: Object.fromEntries(files) }
+}
+
 function survivorOf(path: string, file: ReportedFile, mutant: ReportedMutant): Survivor {
   const { start, end } = mutant.location
   const lines = file.source.split('\n').slice(start.line - 1, end.line)

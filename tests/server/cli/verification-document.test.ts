@@ -1,6 +1,6 @@
 import { readFileSync } from 'node:fs'
 import { describe, expect, it } from 'vitest'
-import { folderResult } from '../../../server/cli/mutation/folder-result'
+import { folderResult, withoutSurvivors } from '../../../server/cli/mutation/folder-result'
 import { currentVerification } from '../../../server/cli/read-verification'
 import { verificationDocument } from '../../../server/cli/verification-document'
 
@@ -61,6 +61,12 @@ describe('figures of a mutation run', () => {
       survived: 1,
       survivors: [{ file: 'calc/ground/a.ts', line: 2, from: 'a > b', to: 'a < b', reason: '' }],
     })
+  })
+
+  it('lets run again what survived', () => {
+    const kept = withoutSurvivors(report).files['shared/calc/ground/a.ts']!
+    expect(kept.mutants.map(({ status }) => status)).not.toContain('Survived')
+    expect(kept.mutants).toHaveLength(4)
   })
 
   it('keeps the reason that somebody wrote beside the same survivor', () => {
