@@ -19,15 +19,20 @@ export interface AppOptions {
   readonly now?: () => number
   /** Takes the lines of the log. */
   readonly log?: (line: string) => void
+  readonly atEnd?: AtEnd
 }
+
+/** Takes what is done at the end: of a test, or of all that share one server. */
+export type AtEnd = (tidy: () => void) => void
 
 /** A database of its own for each test; it is closed when the test ends. */
 export function freshDatabase(
   preparation: Partial<Preparation> = {},
   file = IN_MEMORY,
+  atEnd: AtEnd = onTestFinished,
 ): ReturnType<typeof openDatabase> {
   const database = openDatabase(file)
-  onTestFinished(database.close)
+  atEnd(database.close)
   prepareDatabase(database.db, { mode: 'demonstration', demoSeeds: [], ...preparation })
   return database
 }
@@ -37,9 +42,9 @@ export const CHEAP_PASSWORDS = createPasswords({ memoryCost: 8, timeCost: 1 })
 
 /** The whole server on a fresh database in memory; it does not listen. */
 export function freshApp(options: AppOptions = {}) {
-  const { environment, siteFolder = '/nowhere', log, demoSeeds = [], now } = options
+  const { environment, siteFolder = '/nowhere', log, demoSeeds = [], now, atEnd } = options
   const env = readEnv({ NODE_ENV: 'test', ...environment })
-  const { db, close } = freshDatabase({ mode: env.mode, demoSeeds })
+  const { db, close } = freshDatabase({ mode: env.mode, demoSeeds }, IN_MEMORY, atEnd)
   const logger = pino({ level: log ? 'info' : 'silent' }, { write: log ?? (() => undefined) })
   const parts = createParts(db, env, { passwords: CHEAP_PASSWORDS, ...(now ? { now } : {}) })
   const app = createApp({ parts, env, logger, version: '1.2.3', siteFolder })

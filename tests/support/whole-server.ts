@@ -17,7 +17,7 @@ import { projectMembers } from '../../server/db/schema'
 import { lowRoadContent, SHORT_STATIONS } from './ferry-quay'
 import { linkFor, tokenOf } from './links'
 import { browser, makePerson, ORIGIN, PASSWORD, signedIn, type TestPerson } from './people'
-import { freshApp } from './server-app'
+import { type AtEnd, freshApp } from './server-app'
 
 /** Somebody of each account role, as member of each kind and as none. */
 export interface Visitor {
@@ -32,9 +32,9 @@ export interface Visitor {
 export const SHORT_CONTENT = lowRoadContent({ place: 5, waterLevel: 3.2 })
 
 /** Folder that goes with the test. */
-function temporaryFolder(): string {
+function temporaryFolder(atEnd: AtEnd): string {
   const folder = mkdtempSync(join(tmpdir(), 'toehold-whole-'))
-  onTestFinished(() => {
+  atEnd(() => {
     rmSync(folder, { recursive: true })
   })
   return folder
@@ -101,9 +101,10 @@ async function visitorsOf({ app, db, parts }: ReturnType<typeof freshApp>, proje
 }
 
 /** The whole server, furnished and listening, with somebody of each kind at its door. */
-export async function wholeServer() {
-  const folder = temporaryFolder()
+export async function wholeServer(atEnd: AtEnd = onTestFinished) {
+  const folder = temporaryFolder(atEnd)
   const server = freshApp({
+    atEnd,
     // Nothing is sent: no worker runs.
     environment: {
       DATA_DIR: join(folder, 'data'),
@@ -116,7 +117,7 @@ export async function wholeServer() {
   const visitors = await visitorsOf(server, ids.projectId)
   const listener = createServer(server.app)
   await new Promise<void>((resolve) => listener.listen(0, '127.0.0.1', resolve))
-  onTestFinished(() => {
+  atEnd(() => {
     listener.closeAllConnections()
     listener.close()
   })

@@ -1,4 +1,4 @@
-import { describe, expect, it } from 'vitest'
+import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import { MEMBER_ROLES, type AccountRole, type MemberRole } from '../../../shared/access/roles'
 import { ACCESS_RULES, decideAccess, type RuleId } from '../../../shared/access/rules'
 import type { Problem } from '../../../shared/schemas/problem'
@@ -13,6 +13,18 @@ import {
   wholeServer,
 } from '../../support/whole-server'
 
+/** One server for the whole file: every request is undone. */
+let server: WholeServer
+const tidying: (() => void)[] = []
+beforeAll(async () => {
+  server = await wholeServer((tidy) => tidying.push(tidy))
+}, 60_000)
+afterAll(() => {
+  tidying.reverse().forEach((tidy) => {
+    tidy()
+  })
+})
+
 /** What the server made of a request before the route itself had a say. */
 type Outcome = ReturnType<typeof decideAccess>
 
@@ -26,7 +38,7 @@ async function outcomeOf(answer: Response, { id }: Operation): Promise<Outcome> 
 }
 
 /** An empty body: whoever gets past the rule is told what is missing, and changes little. */
-async function knock(server: WholeServer, operation: Operation, { cookie }: Visitor) {
+async function knock(operation: Operation, { cookie }: Visitor) {
   const { method, path, request } = operation
   const body = request ? { body: '{}', mediaType: 'application/json' } : {}
   const { tokens: _, ...ids } = server.ids
@@ -36,7 +48,6 @@ async function knock(server: WholeServer, operation: Operation, { cookie }: Visi
 
 describe('access', { timeout: 120_000 }, () => {
   it('is what the table says, on every route, for every role, as member of each kind or none', async () => {
-    const server = await wholeServer()
     const wrong: string[] = []
     let knocks = 0
     for (const operation of server.operations) {
@@ -44,7 +55,7 @@ describe('access', { timeout: 120_000 }, () => {
         const { role, member, what } = visitor
         const inProject = operation.path.includes(':projectId') ? member : null
         const expected = decideAccess(operation.rule, role && { role }, inProject)
-        const actual = await knock(server, operation, visitor)
+        const actual = await knock(operation, visitor)
         knocks++
         if (actual !== expected) {
           wrong.push(
@@ -58,8 +69,8 @@ describe('access', { timeout: 120_000 }, () => {
     expect(knocks).toBe(routesOf(server.app).length * 21)
   })
 
-  it('is in the walk for every route that Express has', async () => {
-    const { app, operations } = await wholeServer()
+  it('is in the walk for every route that Express has', () => {
+    const { app, operations } = server
     const walked = operations.map(({ method, path }) => `${method} ${path}`)
     expect(walked.sort()).toEqual([...routesOf(app)].sort())
     expect(walked.length).toBeGreaterThan(70)
@@ -121,16 +132,16 @@ describe('a route', () => {
     },
   )
 
-  it('of the whole server is under /api, and has a rule of the table', async () => {
-    const { operations } = await wholeServer()
+  it('of the whole server is under /api, and has a rule of the table', () => {
+    const { operations } = server
     for (const { path, rule } of operations) {
       expect(path).toMatch(/^\/api\//)
       expect(Object.keys(ACCESS_RULES)).toContain(rule)
     }
   })
 
-  it('of a project says so in its address, and no other has a rule of members', async () => {
-    const { operations } = await wholeServer()
+  it('of a project says so in its address, and no other has a rule of members', () => {
+    const { operations } = server
     for (const { path, rule } of operations) {
       expect('member' in ACCESS_RULES[rule], path).toBe(path.includes(':projectId'))
     }
