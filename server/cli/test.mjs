@@ -107,20 +107,36 @@ function hasChromium() {
   return spawnSync('chromium', ['--version'], { stdio: 'ignore' }).status === 0
 }
 
-/** The browser tests drive Debian's own browser. */
-async function installChromium() {
-  if (hasChromium()) return true
-  heading('chromium is missing: installing it')
+async function aptInstall(name) {
   const asRoot = process.getuid?.() === 0 ? [] : ['sudo', '-n']
   const apt = async (...words) => {
     const [program, ...rest] = [...asRoot, 'apt-get', ...words]
     return run(program, rest, { env: { DEBIAN_FRONTEND: 'noninteractive' }, timeout: 5 * MINUTE })
   }
   await apt('update', '-qq')
-  await apt('install', '-y', '-qq', '--no-install-recommends', 'chromium')
+  await apt('install', '-y', '-qq', '--no-install-recommends', name)
+}
+
+/** The browser tests drive Debian's own browser. */
+async function installChromium() {
+  if (hasChromium()) return true
+  heading('chromium is missing: installing it')
+  await aptInstall('chromium')
   if (hasChromium()) return true
   countFailure('chromium could not be installed; install it with: apt-get install chromium')
   return false
+}
+
+function hasPoppler() {
+  return spawnSync('pdftotext', ['-v'], { stdio: 'ignore' }).status === 0
+}
+
+/** The tests of the documents read them with poppler, as a reader would. */
+async function installPoppler() {
+  if (hasPoppler()) return
+  heading('poppler-utils is missing: installing it')
+  await aptInstall('poppler-utils')
+  if (!hasPoppler()) countFailure('poppler-utils could not be installed; install it with apt-get')
 }
 
 function finish() {
@@ -136,6 +152,7 @@ async function runAll(folder) {
   }
   const passed = await Promise.all(GATES.map(gatesInTurn))
   const isBuilt = passed.at(-1)
+  await installPoppler()
   await suite(unitTests(folder))
   if (isBuilt && (await installChromium())) await suite(browserTests(folder))
 }

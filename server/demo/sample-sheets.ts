@@ -1,4 +1,5 @@
 import sharp from 'sharp'
+import { BARRIERS } from '../../shared/catalogue/barriers'
 import { exampleSection } from '../../shared/verification/example-section'
 import { checkSection } from '../../shared/checks/section-check'
 import { parseSectionCase } from '../../shared/schemas/parse-section-case'
@@ -70,70 +71,65 @@ const SITE = (
 <rect width="90" height="60" fill="#dfe6e6"/><path d="M0 26q22-7 45-3t45-2v39H0z" fill="${bank}"/>
 <path d="M0 40q25-5 48-1t42 2v19H0z" fill="${river}"/><path d="M8 38q30-6 74 3" fill="none" stroke="#6b3f63" stroke-width="2.4"/></svg>`
 
+/** Words of the approved sheet; figures come from the engine. */
+const LOW_ROAD_WORDS = {
+  project: PROJECT,
+  number: 'FQ-001',
+  revision: 'B',
+  revisionReason: 'Tube 1.00 m instead of 0.70 m after the forecast of 21:45',
+  status: 'approved',
+  category: 2,
+  purpose: 'Check of the tube laid on Low road against the expected crest, for the flood plan.',
+  place: 'Low road, chainage 70 to 90',
+  datum: 'QD',
+  groundLevel: 2.87,
+  barrier: 'Example tube',
+  surface: 'firm mown turf',
+  restsOn: 'Forecast of the lock, issued 3 March 2031, 21:45: 3.42 QD, band 3.30 to 3.54',
+  leave: { rateOfRise: RISE, timeToClear: 1200 },
+  conditions: [
+    'the gully at chainage 95 is plugged',
+    'both ends tie into ground at 3.52\u00a0m\u00a0QD or higher',
+  ],
+  assumptions: [
+    {
+      text: 'Both closures at the turn of chainage 60 are fitted and tight.',
+      isToBeConfirmed: true,
+    },
+  ],
+  inputSources: {
+    waterLevel: 'forecast of 21:45',
+    groundLevel: 'survey of Low road, station 70',
+    'ground.permeability': 'trial pit, silty clay',
+  },
+  people: { prepared: PREPARED, checked: CHECKED, approved: APPROVED },
+  verification: { code: '7Q4K-19XM-3TRP', address: 'https://toehold.example/verify' },
+  date: DAY,
+  software: 'Toehold 0.1.0',
+} satisfies Partial<SheetInput>
+
 /** Low road as laid, approved, with the chapter of the line and photographs. */
 async function lowRoad(): Promise<Sheet> {
   const scenario = LOW_ROAD_SCENARIOS.find(({ key }) => key === 'edges-weighed')
+  const { id: _, statedHeight: _s, isExample: _e, ...barrier } = BARRIERS[2]!
   if (!scenario) throw new Error('the layout with weighed edges is missing')
-  const tube = {
-    ...TUBE_070,
-    ...{ diameter: 1, skirtLength: 3.1, contactWidth: 0.18, mass: 7.8, airPressure: 18_000 },
-    fabricStrength: 60_000,
-  }
+  const stations = [...OFF_THE_GRAVEL_STATIONS]
+  const sketches = [
+    ['Low road at chainage 60, seen from the slipway (sketch)', '#8ba37f', '#7aa5b3'],
+    ['Tie-in at the bank, chainage 180 (sketch)', '#9a8a70', '#86aebb'],
+  ] as const
+  const photographs = await Promise.all(
+    sketches.map(async ([caption, bank, river]) => ({
+      caption,
+      picture: await picture(SITE(bank, river)),
+    })),
+  )
+  const line = { name: 'Low road', stations, sectionLength: 10, content: scenario.content }
+  const letterhead = { ...LETTERHEAD, logo: await picture(LOGO) }
   return sheet(
+    { ...LOW_ROAD_WORDS, line, photographs, letterhead },
     {
-      project: PROJECT,
-      number: 'FQ-001',
-      revision: 'B',
-      revisionReason: 'Tube 1.00 m instead of 0.70 m after the forecast of 21:45',
-      status: 'approved',
-      category: 2,
-      purpose: 'Check of the tube laid on Low road against the expected crest, for the flood plan.',
-      place: 'Low road, chainage 60 to 90',
-      datum: 'QD',
-      groundLevel: 2.87,
-      barrier: 'Example tube',
-      surface: 'firm mown turf',
-      restsOn: 'Forecast of the lock, issued 3 March 2031, 21:45: 3.42 QD, band 3.30 to 3.54',
-      leave: { rateOfRise: RISE, timeToClear: 1200 },
-      conditions: [
-        'the gully at chainage 95 is plugged',
-        'both ends tie into ground at 3.52 m QD or higher',
-      ],
-      assumptions: [
-        {
-          text: 'Both closures at the turn of chainage 60 are fitted and tight.',
-          isToBeConfirmed: true,
-        },
-      ],
-      inputSources: {
-        waterLevel: 'forecast of 21:45',
-        groundLevel: 'survey of Low road, station 60',
-        'ground.permeability': 'trial pit, silty clay',
-      },
-      people: { prepared: PREPARED, checked: CHECKED, approved: APPROVED },
-      line: {
-        name: 'Low road, off the gravel',
-        stations: [...OFF_THE_GRAVEL_STATIONS],
-        sectionLength: 10,
-        content: scenario.content,
-      },
-      photographs: [
-        {
-          caption: 'Low road at chainage 60, seen from the slipway (sketch)',
-          picture: await picture(SITE('#8ba37f', '#7aa5b3')),
-        },
-        {
-          caption: 'Tie-in at the bank, chainage 180 (sketch)',
-          picture: await picture(SITE('#9a8a70', '#86aebb')),
-        },
-      ],
-      letterhead: { ...LETTERHEAD, logo: await picture(LOGO) },
-      verification: { code: '7Q4K-19XM-3TRP', address: 'https://toehold.example/verify' },
-      date: DAY,
-      software: 'Toehold 0.1.0',
-    },
-    {
-      barrier: tube,
+      barrier,
       ground: { friction: 0.45, permeability: 1e-5, layerThickness: 2 },
       water: { depth: 0.55 },
     },
