@@ -1,4 +1,5 @@
 import { vi } from 'vitest'
+import { DEFAULT_ENDS } from '../../../shared/schemas/mark'
 import type { Line, Project, Scenario, ScenarioListItem } from '../../../shared/schemas/project'
 import { scenarioSummary } from '../../../shared/checks/scenario-summary'
 import { LOW_ROAD_SURVEY, lowRoadContent } from '../../support/ferry-quay'
@@ -40,6 +41,9 @@ export function line(change: Partial<Line> = {}): Line {
     note: '',
     sectionLength,
     stations: [...stations],
+    marks: [],
+    ends: DEFAULT_ENDS,
+    background: null,
     scenarios: 1,
     warnings: [],
     ...kept,
@@ -90,6 +94,11 @@ export function projectRoutes(role: Project['myRole'] = 'lead') {
     'GET /api/projects/p/gauges': () => ({
       gauges: [{ id: 'g', name: 'Lock', zero: 0.6, correction: -0.04, note: '', ...kept }],
     }),
+    'GET /api/projects/p/store': () => ({
+      organisation: { id: 'o', name: 'Firm' },
+      depots: [],
+    }),
+    'GET /api/projects/p/lines': () => pageOf([]),
     'GET /api/projects/p/lines/l': () => line(),
     'GET /api/projects/p/lines/l/scenarios': () => pageOf([listItem()]),
     'GET /api/projects/p/lines/l/scenarios/s': () => scenario(),
