@@ -96,7 +96,9 @@ export function openBook(section: SectionCase, system: UnitSystem, gripShare = 1
   }
 
   return {
-    given: (symbol, value, kind) => void known.set(symbol, figure(symbol, value, kind, true)),
+    given: (symbol, value, kind) => {
+      if (!known.has(symbol)) known.set(symbol, figure(symbol, value, kind, true))
+    },
     unknown: (symbol, value, kind) => {
       const root = figure(symbol, value, kind, false)
       unknowns.push(root)

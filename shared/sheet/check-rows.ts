@@ -36,9 +36,9 @@ function dash(words: SheetWords): string {
   return words.say('sheet.noFigure')
 }
 
-/** A share used; above 1 it is rounded up, so that 100 % never means too much. */
+/** A share used; above 1 it is rounded up, so that a check that fails never shows 100 %. */
 export function usedShare(words: SheetWords, utilisation: number): string {
-  return words.show(utilisation, 'percent', utilisation > 1 ? 'up' : 'down')
+  return words.show(utilisation, 'percent', utilisation > 1 ? 'up' : undefined)
 }
 
 function foundOf(result: SectionResult, id: CheckId, words: SheetWords): string {
@@ -46,6 +46,8 @@ function foundOf(result: SectionResult, id: CheckId, words: SheetWords): string 
     const { available } = result.freeboard
     return available === null ? dash(words) : words.show(available, 'length')
   }
-  const factor = result[id]?.factor ?? null
-  return factor === null ? dash(words) : words.show(factor, 'ratio', 'down')
+  const { factor = null, verdict } = result[id] ?? {}
+  // What fails never shows the factor that it needs.
+  const rounding = verdict === 'fails' ? 'down' : undefined
+  return factor === null ? dash(words) : words.show(factor, 'ratio', rounding)
 }

@@ -143,7 +143,9 @@ function stretchRow(
       return available === null ? none : words.show(available, 'length')
     }
     const factor = answer[id].factor
-    return factor === null ? none : words.show(factor, 'ratio', 'down')
+    return factor === null
+      ? none
+      : words.show(factor, 'ratio', answer[id].verdict === 'fails' ? 'down' : undefined)
   })
   const name = governs === null ? none : words.say(`checks.name.${governs}`)
   return [...lead, ...figures, name, shownVerdict(words, verdict)]
