@@ -1,3 +1,4 @@
+import { debrisImpact } from '../calc/moving-water/debris-impact'
 import { debrisThrust } from '../calc/moving-water/debris-thrust'
 import { currentThrust, dragCoefficientOf, dynamicDepth } from '../calc/moving-water/current-thrust'
 import { overflow, overtopping } from '../calc/moving-water/overtopping'
@@ -199,9 +200,7 @@ const OVER: readonly Formula[] = [
       symbol(tex`\ell`, 'Length of one section', 'm', '1 to 100 m'),
       symbol('t', 'Draught: depth from which it reaches the barrier', 'm', '0 m or more'),
     ],
-    assumptions: [
-      'Spread over one section. The force is entered: published methods to find it differ 75-fold, so name yours.',
-    ],
+    assumptions: ['Spread over one section. The force is entered, or found by impulse as below.'],
     source: 'common practice, no source',
     tag: 'practice',
     worked: worked(
@@ -216,6 +215,28 @@ const OVER: readonly Formula[] = [
         return [['F_d', debrisThrust(debris).force, 'N/m']]
       },
     ),
+  },
+  {
+    id: 'debris-impact',
+    title: 'Debris that is brought to a stand',
+    tex: [tex`F_\text{mean} = \frac{m v}{t}, \qquad F_\text{peak} = \frac{\pi\,m v}{2\,t}`],
+    symbols: [
+      symbol('m', 'Mass', 'kg', '1 to 1000000 kg'),
+      symbol('v', 'Speed towards the barrier', 'm/s', '0.01 to 10 m/s'),
+      symbol('t', 'Time from the first touch to standing still', 's', '0.01 to 10 s'),
+    ],
+    assumptions: [
+      'Impulse and momentum; the peak is that of a half sine. Published methods differ 75-fold, mostly in the stopping time: name yours.',
+    ],
+    source: 'Newton’s second law; half sine as in ASCE 7, commentary to chapter 5 (from memory)',
+    tag: 'memory',
+    worked: worked({ m: ['m', 450, 'kg'], v: ['v', 1.5, 'm/s'], t: ['t', 0.5, 's'] }, (x) => {
+      const impact = debrisImpact({ mass: x.m, speed: x.v, stoppingTime: x.t })
+      return [
+        [tex`F_\text{mean}`, impact.mean, 'N'],
+        [tex`F_\text{peak}`, impact.peak, 'N'],
+      ]
+    }),
   },
 ]
 

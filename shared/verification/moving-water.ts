@@ -1,4 +1,5 @@
 import { stillWaterThrust } from '../calc/hydrostatics/still-water-thrust'
+import { debrisImpact } from '../calc/moving-water/debris-impact'
 import { dragCoefficientOf, dynamicDepth } from '../calc/moving-water/current-thrust'
 import { figure, type CheckRow } from './check-row'
 
@@ -56,5 +57,17 @@ export const MOVING_WATER_ROWS: readonly CheckRow[] = [
     figures: DRAG_ROWS.map(([ratio, printed]) =>
       figure(ratio > 120 ? 'more' : `up to ${ratio}`, printed, '–', () => dragCoefficientOf(ratio)),
     ),
+  },
+  {
+    id: 'log-impulse',
+    topic: 'movingWater',
+    title: 'Log of 1000 lb at 10 ft/s, stopped within a second, g 32.2 ft/s²',
+    source: 'impulse and momentum, a published method (from memory)',
+    tag: 'memory',
+    figures: [
+      figure('mean force', '311', 'lb', () => {
+        return debrisImpact({ mass: 1000 / 32.2, speed: 10, stoppingTime: 1 }).mean
+      }),
+    ],
   },
 ]

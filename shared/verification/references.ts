@@ -55,7 +55,7 @@ export const ENGINEERING_REFERENCES: readonly ReferenceRow[] = [
     source: 'several published methods, partly from memory',
     tag: 'memory',
     printed: '311, 2000, 23 400, 22 600 lb',
-    why: 'Methods differ 75-fold: the product takes a force and asks for the method.',
+    why: 'Methods differ 75-fold: the product takes a force, or the impulse over a stopping time that is entered, and chooses no method.',
   },
   {
     id: 'water-filled-tube',
