@@ -11,6 +11,8 @@ import { openapiOperations } from './modules/openapi/openapi.routes'
 import { organisationsOperations } from './modules/organisations/organisations.routes'
 import { passwordResetsOperations } from './modules/password-resets/password-resets.routes'
 import { peopleOperations } from './modules/people/people.routes'
+import { sheetsOperations } from './modules/sheets/sheets.routes'
+import { verificationOperations } from './modules/verification/verification.routes'
 import { sectionChecksOperations } from './modules/section-checks/section-checks.routes'
 import type { RouteParts } from './parts'
 import { projectOperations } from './project-operations'
@@ -25,6 +27,7 @@ export function allOperations(
   parts: RouteParts,
   { version, mode }: Identity,
 ): readonly Operation[] {
+  const sheetWork = { ...parts, software: `Toehold ${version}` }
   const operations = [
     ...healthOperations(parts.db, { version, mode }),
     ...catalogueOperations(parts.db),
@@ -39,6 +42,8 @@ export function allOperations(
     ...auditOperations(parts),
     ...mailsOperations(parts),
     ...projectOperations(parts),
+    ...sheetsOperations(sheetWork),
+    ...verificationOperations(sheetWork),
   ]
   return [...operations, ...openapiOperations(version, operations)]
 }

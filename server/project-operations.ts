@@ -8,10 +8,11 @@ import { linesOperations } from './modules/lines/lines.routes'
 import { membersOperations } from './modules/members/members.routes'
 import { projectsOperations } from './modules/projects/projects.routes'
 import type { DeletionBar } from './modules/projects/put-away-project.service'
+import { issuedSheetsBar } from './modules/sheets/issued-sheets-bar'
 import { scenariosOperations } from './modules/scenarios/scenarios.routes'
 
 /** Modules that keep what must outlive its project say so here. */
-const DELETION_BARS: readonly DeletionBar[] = []
+const DELETION_BARS: readonly DeletionBar[] = [issuedSheetsBar]
 
 /** Every route of desk and projects. */
 export function projectOperations(work: FileWork): readonly Operation[] {

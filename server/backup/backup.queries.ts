@@ -28,19 +28,31 @@ export function writeSnapshot(databaseFile: string, snapshot: string): void {
   reading(databaseFile, (connection) => connection.prepare('VACUUM INTO ?').run(snapshot))
 }
 
+/** Files of projects, and those that were frozen with sheets. */
+const PROJECT_FILES = 'SELECT id, sha256, media_type AS mediaType FROM project_files'
+/** They have no smaller pictures beside them, whatever they are. */
+const SHEET_FILES =
+  "SELECT file_id AS id, sha256, 'application/octet-stream' AS mediaType FROM sheet_files"
+
+/** A database from before there were sheets has no files of theirs. */
+function filesOf(connection: Database.Database): string {
+  const hasSheets =
+    connection
+      .prepare("SELECT 1 FROM sqlite_master WHERE type = 'table' AND name = 'sheet_files'")
+      .get() !== undefined
+  return hasSheets ? `${PROJECT_FILES} UNION ALL ${SHEET_FILES}` : PROJECT_FILES
+}
+
 export function listFileRows(databaseFile: string): readonly FileRow[] {
   return reading(
     databaseFile,
-    (connection) =>
-      connection
-        .prepare('SELECT id, sha256, media_type AS mediaType FROM project_files ORDER BY id')
-        .all() as FileRow[],
+    (connection) => connection.prepare(`${filesOf(connection)} ORDER BY id`).all() as FileRow[],
   )
 }
 
 export function hasFileRow(databaseFile: string, id: string): boolean {
   const found = (connection: Database.Database) =>
-    connection.prepare('SELECT 1 FROM project_files WHERE id = ?').get(id) !== undefined
+    connection.prepare(`SELECT 1 FROM (${filesOf(connection)}) WHERE id = ?`).get(id) !== undefined
   return reading(databaseFile, found)
 }
 

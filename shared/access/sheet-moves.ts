@@ -26,34 +26,32 @@ export interface MoveRow {
   readonly needsReason: boolean
 }
 
+const of = (from: readonly SheetStatus[], to: SheetStatus | null) => ({ from, to })
+
 function row(
   move: SheetMove,
-  from: readonly SheetStatus[],
-  to: SheetStatus | null,
+  way: ReturnType<typeof of>,
   by: Mover,
   reason: 'with reason' | '' = '',
 ): MoveRow {
-  return { move, from, to, by, needsReason: reason !== '' }
+  return { move, ...way, by, needsReason: reason !== '' }
 }
+
+/** Given out, and still in force. */
+const GIVEN = ['approved', 'issued-for-information'] as const satisfies readonly SheetStatus[]
 
 /** The whole way of a sheet. What is not in this table does not exist. */
 export const MOVE_TABLE: readonly MoveRow[] = [
-  row('submit', ['draft', 'returned'], 'in-checking', 'preparer'),
-  row('check', ['in-checking'], 'checked', 'checker'),
-  row('return', ['in-checking'], 'returned', 'checker', 'with reason'),
-  row('approve', ['checked'], 'approved', 'approver'),
-  row('return', ['checked'], 'returned', 'approver', 'with reason'),
-  row('issue-for-information', ['draft'], 'issued-for-information', 'preparer'),
-  row(
-    'withdraw',
-    ['checked', 'approved', 'issued-for-information'],
-    'withdrawn',
-    'lead-or-approver',
-    'with reason',
-  ),
-  row('revise', ['approved', 'issued-for-information', 'withdrawn'], null, 'editor', 'with reason'),
-  row('delete', ['draft'], null, 'preparer'),
-  row('supersede', ['approved', 'issued-for-information'], 'superseded', 'program'),
+  row('submit', of(['draft', 'returned'], 'in-checking'), 'preparer'),
+  row('check', of(['in-checking'], 'checked'), 'checker'),
+  row('return', of(['in-checking'], 'returned'), 'checker', 'with reason'),
+  row('approve', of(['checked'], 'approved'), 'approver'),
+  row('return', of(['checked'], 'returned'), 'approver', 'with reason'),
+  row('issue-for-information', of(['draft'], 'issued-for-information'), 'preparer'),
+  row('withdraw', of([...GIVEN, 'checked'], 'withdrawn'), 'lead-or-approver', 'with reason'),
+  row('revise', of([...GIVEN, 'withdrawn'], null), 'editor', 'with reason'),
+  row('delete', of(['draft'], null), 'preparer'),
+  row('supersede', of(GIVEN, 'superseded'), 'program'),
 ]
 
 /** When a project asks for an approver who is not the checker. */

@@ -11,6 +11,7 @@ import type { SectionCase } from '../schemas/section-case'
 import { sectionFaults } from '../schemas/section-faults'
 import type { SectionResult } from '../schemas/section-result'
 import type { Sheet } from '../schemas/sheet'
+import { sheetWords } from './sheet-words'
 
 /** Chainages closer than this are one place [m]. */
 const SAME_PLACE = 1e-6
@@ -20,6 +21,20 @@ export type ScenarioPart = Pick<
   Sheet,
   'case' | 'result' | 'gripShare' | 'groundLevel' | 'barrier' | 'surface' | 'leave' | 'line'
 >
+
+/** Where a section lies and what it rests on, in words. */
+export function sourceWords(
+  line: string,
+  chainage: number,
+  scenario: { readonly name: string; readonly version: number },
+): Pick<Sheet, 'place' | 'restsOn'> {
+  const { say } = sheetWords('metric', '')
+  const { name, version } = scenario
+  return {
+    place: say('sheet.source.place', { line, chainage: String(chainage) }),
+    restsOn: say('sheet.source.restsOn', { name, version }),
+  }
+}
 
 /**
  * The part of a sheet that a scenario gives: one cross-section at a place, and the line around it.

@@ -40,6 +40,47 @@ export const mailTexts = {
       'If it was not you, ask for a new password on the sign-in page, and tell your administrator.',
     ],
   },
+  sheetReview: {
+    subject: 'Sheet {sheet} waits for a check',
+    before: ['Hello {name},', '{by} asks for a check of sheet {sheet} of the project {project}.'],
+    action: 'Open the sheet',
+    after: ['You get this because you may check sheets of this project.'],
+  },
+  sheetChecked: {
+    subject: 'Sheet {sheet} waits for approval',
+    before: ['Hello {name},', '{by} checked sheet {sheet} of the project {project}.'],
+    action: 'Open the sheet',
+    after: ['You get this because you may approve sheets of this project.'],
+  },
+  sheetReturned: {
+    subject: 'Sheet {sheet} was returned',
+    before: [
+      'Hello {name},',
+      '{by} returned sheet {sheet} of the project {project}. The reason: {reason}',
+    ],
+    action: 'Open the sheet',
+    after: ['Answer the comments, change what has to be changed, and submit it again.'],
+  },
+  sheetApproved: {
+    subject: 'Sheet {sheet} was approved',
+    before: [
+      'Hello {name},',
+      'The approval of sheet {sheet} of the project {project} by {by} was recorded.',
+    ],
+    action: 'Open the sheet',
+    after: [
+      'Its PDF and figures are frozen. Anyone can verify it by its code, without an account.',
+    ],
+  },
+  sheetSuperseded: {
+    subject: 'Sheet {sheet} was superseded',
+    before: [
+      'Hello {name},',
+      'Sheet {sheet} of the project {project} was superseded by its next revision. Do not use it any longer.',
+    ],
+    action: 'See what is current',
+    after: [],
+  },
 } as const satisfies Record<string, MailTexts>
 
 /** Words that fill the mails where a name or a value is missing. */

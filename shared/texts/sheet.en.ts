@@ -47,6 +47,10 @@ export const sheetTexts = {
     photograph: 'Photograph',
     footer: 'A design check, not a guarantee. Local codes and a licensed engineer come first.',
   },
+  source: {
+    place: '{line}, chainage {chainage}',
+    restsOn: 'Scenario {name}, version {version}',
+  },
   attachment: 'The case, its results and everything else that this sheet was composed from',
   band: {
     draft: 'DRAFT',

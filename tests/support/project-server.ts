@@ -15,11 +15,14 @@ import { type Access, mountOperations } from '../../server/http/mount-operations
 import type { SignedIn } from '../../server/http/operation'
 import { requestLog } from '../../server/logger'
 import { findMember } from '../../server/modules/members/members.queries'
+import { sheetsOperations } from '../../server/modules/sheets/sheets.routes'
+import { verificationOperations } from '../../server/modules/verification/verification.routes'
 import { projectOperations } from '../../server/project-operations'
+import { createKeyedHash } from '../../server/auth/keyed-hash'
 import type { Line, Project, Scenario } from '../../shared/schemas/project'
 import type { ScenarioContent } from '../../shared/schemas/scenario'
 import { lowRoadContent, SHORT_STATIONS } from './ferry-quay'
-import { freshDatabase } from './server-app'
+import { freshDatabase, SECRET } from './server-app'
 
 export type Person = keyof typeof DEMO_PEOPLE
 
@@ -80,7 +83,17 @@ export function projectServer(): ProjectServer {
   app.use(requestLog(pino({ level: 'silent' })))
   app.use(receiveLongJsonText)
   app.use(receiveJsonText)
-  app.use(mountOperations(projectOperations(work), accessByHeader(db)))
+  const sheetWork = {
+    ...work,
+    ...{ mail: { isSmtp: true, from: 'toehold@mail.test' }, appUrl: 'https://toehold.test' },
+    ...{ keyedHash: createKeyedHash(SECRET), software: 'Toehold of the tests' },
+  }
+  const operations = [
+    ...projectOperations(work),
+    ...sheetsOperations(sheetWork),
+    ...verificationOperations(sheetWork),
+  ]
+  app.use(mountOperations(operations, accessByHeader(db)))
   app.use(errorHandler)
   return { app, db, filesFolder, clock }
 }

@@ -1,0 +1,46 @@
+import { NotFoundError } from '../../errors'
+import { findSheetFile, type SheetRow } from './sheets.queries'
+import { nameOf, sheetAt } from './open-sheet'
+import { composing, type SheetPlace, type SheetWork } from './sheet-work'
+
+/** A file on the disk that was frozen, or bytes that were just set. */
+export type SheetPdf =
+  | {
+      readonly kind: 'frozen'
+      readonly id: string
+      readonly checksum: string
+      readonly name: string
+    }
+  | { readonly kind: 'made'; readonly bytes: Buffer; readonly name: string }
+
+/** A name that every file system takes. */
+export function fileName(row: SheetRow, ending: string): string {
+  return `${nameOf(row).replace(/[^\w.-]+/g, '-')}.${ending}`
+}
+
+/**
+ * The PDF of a sheet: the frozen one byte for byte; before that, or with `isMarked`, one that bears its
+ * present status across every page.
+ */
+export async function pdfOf(
+  { db }: Pick<SheetWork, 'db'>,
+  place: SheetPlace,
+  isMarked: boolean,
+): Promise<SheetPdf> {
+  const row = sheetAt(db, place)
+  const name = fileName(row, 'pdf')
+  if (row.fileId !== null && !isMarked) {
+    return { kind: 'frozen', id: row.fileId, checksum: row.fileSha256, name }
+  }
+  const { documentOf } = await composing()
+  const { id, version, status } = row
+  const bytes = documentOf(`${id} ${version} ${status}`, { ...row.content, status })
+  return { kind: 'made', bytes, name }
+}
+
+/** @throws NotFoundError for a page that the frozen document does not have. */
+export function pageOf(db: SheetWork['db'], row: SheetRow, page: number) {
+  const file = page >= 1 ? findSheetFile(db, row.id, page) : undefined
+  if (!file) throw new NotFoundError(`page: ${page} does not exist of this sheet`)
+  return file
+}
