@@ -89,7 +89,7 @@ export const layoutTexts = {
   },
   turns: {
     title: 'Turns',
-    row: 'ch {chainage}: {angle} {side}, {closures} closures, gap {gap}, skirt missing {area}',
+    row: 'ch {chainage}: {angle} {side}, {closures} × closure, gap {gap}, skirt missing {area}',
     left: 'left',
     right: 'right',
   },
@@ -106,7 +106,7 @@ export const layoutTexts = {
     change: '{mass}, {minutes} min against the best',
     asBest: 'as the best',
   },
-  ways: { title: 'Plan and ways past the line', plug: 'Plug it' },
+  ways: { title: 'Plan and ways past the line' },
   compare: {
     title: 'Another line beside it',
     lead: 'Both laid in the best way under the assumptions of this scenario.',

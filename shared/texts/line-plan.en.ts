@@ -8,7 +8,6 @@ export const linePlanTexts = {
   zoomIn: 'Zoom in',
   zoomOut: 'Zoom out',
   fit: 'Show all',
-  here: 'Here:',
   drawing: {
     title: 'Plan of the line',
     length: '{length}',

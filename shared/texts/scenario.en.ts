@@ -46,7 +46,6 @@ export const scenarioTexts = {
     holdsTo: 'The line holds to {level}.',
     holdsNone: 'Nothing holds at ch {chainage}: no level can be relied on.',
     weakest: 'Weakest first',
-    weakestLead: 'What gives way first as the water rises.',
     row: 'ch {from}–{to}',
     at: 'at ch {chainage}',
     holds: 'holds to {level}, then {then}',

@@ -17,7 +17,7 @@ export function useLongSectionWords() {
   }
 
   function readingWords(reading: LongSectionReading): string {
-    const { chainage, groundLevel, surface, depth, diameter, holdsToLevel } = reading
+    const { chainage, groundLevel, surface, depth, diameter, holdsToLevel, crestLevel } = reading
     const parts = [
       chainageWord(chainage),
       t('linePage.reading.ground', { level: q(groundLevel, 'length') }),
@@ -29,6 +29,13 @@ export function useLongSectionWords() {
     if (holdsToLevel !== null) {
       const level = q(holdsToLevel, 'length', { rounding: 'down' })
       parts.push(t('linePage.reading.holdsTo', { level }))
+    }
+    if (crestLevel !== null) {
+      parts.push(t('linePlan.section.crest', { level: q(crestLevel, 'length') }))
+      if (depth !== null && depth > 0) {
+        const height = q(crestLevel - groundLevel - depth, 'length')
+        parts.push(t('linePlan.section.freeboard', { height }))
+      }
     }
     return parts.join(' · ')
   }

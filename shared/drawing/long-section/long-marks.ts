@@ -16,6 +16,7 @@ type Add = (id: string, role: ShapeRole, d: string) => void
 export function addLongMarks(input: LongSectionInput, frame: LongFrame, add: Add): void {
   addBand(input, frame, add)
   addCrest(input, frame, add)
+  addFreeboard(input, frame, add)
   addTurns(input, frame, add)
   addLowSpots(input, frame, add)
   addEnds(input, frame, add)
@@ -68,6 +69,30 @@ function addCrest({ sections }: LongSectionInput, frame: LongFrame, add: Add): v
     ]
   })
   add('crest', 'ghost', segmentsPath(steps))
+}
+
+/** What stands between water and loaded crest at the place that is looked at. */
+function freeboardAt({ sections, place, waterLevel }: LongSectionInput) {
+  if (place === null || waterLevel === null) return null
+  const section = sections.find(({ from, to }) => from <= place && place <= to)
+  const crest = section?.crestLevel ?? null
+  return crest === null || crest <= waterLevel ? null : { place, waterLevel, crest }
+}
+
+function addFreeboard(input: LongSectionInput, frame: LongFrame, add: Add): void {
+  const found = freeboardAt(input)
+  if (!found) return
+  const x = frame.toX(found.place) + 7
+  const [low, high] = [frame.toY(found.waterLevel), frame.toY(found.crest)]
+  const tick = (y: number): readonly [Point, Point] => [
+    { x: x - 3, y },
+    { x: x + 3, y },
+  ]
+  const post: readonly [Point, Point] = [
+    { x, y: low },
+    { x, y: high },
+  ]
+  add('freeboard', 'dimension', segmentsPath([post, tick(low), tick(high)]))
 }
 
 function addTurns({ stations, marks = [] }: LongSectionInput, frame: LongFrame, add: Add): void {

@@ -6,7 +6,7 @@ import { niceAbove } from '../nice-ticks'
 import type { Point, TextRole } from '../scene'
 import type { PlanFrame } from './plan-frame'
 import type { PlanInput } from './plan-input'
-import { markPoint, scaleBar } from './plan-shapes'
+import { markPoint, scaleBar, verdictPoints } from './plan-shapes'
 
 /** Px between two chainages that are written, at least. */
 const CHAINAGE_STEP = 46
@@ -14,6 +14,7 @@ const CHAINAGE_STEP = 46
 /** Names and figures of a plan, by importance. */
 export function labelPlan(input: PlanInput, frame: PlanFrame, placer: LabelPlacer): void {
   const write = writer(frame, placer)
+  keepClear(input, frame, placer)
   const { view } = input
   const bar = scaleBar(frame)
   write('scale', 'labelQuiet', lengthOf(bar.length), [
@@ -30,12 +31,33 @@ export function labelPlan(input: PlanInput, frame: PlanFrame, placer: LabelPlace
   labelChainages(input, frame, write)
 }
 
+/** Words keep off the marks of verdicts, and where they can off the line. */
+function keepClear(input: PlanInput, frame: PlanFrame, placer: LabelPlacer): void {
+  const around = ({ x, y }: Point, r: number) => ({
+    left: x - r,
+    right: x + r,
+    top: y - r,
+    bottom: y + r,
+  })
+  for (const { point } of verdictPoints(input, frame)) placer.reserve(around(point, 6))
+  for (const { chainage, offset } of input.marks) {
+    placer.reserve(around(frame.toPoint(markPoint(input, chainage, offset ?? 0)), 7))
+  }
+  const path = locatedStations(input.stations)
+  const [first, last] = [path[0]!.chainage, path[path.length - 1]!.chainage]
+  const count = Math.min(400, Math.ceil(((last - first) * frame.scale) / 10))
+  for (let i = 0; i <= count; i += 1) {
+    const point = frame.toPoint(pointAt(path, first + ((last - first) * i) / Math.max(1, count)))
+    placer.avoid(around(point, 4))
+  }
+}
+
 type Write = (id: string, role: TextRole, message: Message, spots: readonly Spot[]) => void
 
 function writer(frame: PlanFrame, placer: LabelPlacer): Write {
   return (id, role, message, spots) => {
     const label: Label = { id, role, message, size: frame.font - 1 }
-    placer.placeOverLines(label, spots)
+    if (!placer.place(label, spots)) placer.placeOverLines(label, spots)
   }
 }
 

@@ -98,20 +98,27 @@ function addLine({ stations }: PlanInput, frame: PlanFrame, add: Add): void {
   add('stations', 'groundLine', segmentsPath(ticks))
 }
 
-/** The mark of a verdict stands on the dry side of the middle of its section. */
-function addVerdicts({ stations, sections }: PlanInput, frame: PlanFrame, add: Add): void {
+/** Where the marks of verdicts stand: on the dry side of the middle of their sections. */
+export function verdictPoints(
+  { stations, sections }: PlanInput,
+  frame: PlanFrame,
+): readonly { readonly verdict: Verdict; readonly point: Point }[] {
   const path = locatedStations(stations)
+  return sections.flatMap(({ from, to, verdict }) => {
+    if ((to - from) * frame.scale < MARK + 2) return []
+    const middle = (from + to) / 2
+    const around = pathBetween(path, middle - 0.01, middle + 0.01)
+    const [, beside] = offsetPath(around, 14 / frame.scale)
+    return beside ? [{ verdict, point: frame.toPoint(beside) }] : []
+  })
+}
+
+function addVerdicts(input: PlanInput, frame: PlanFrame, add: Add): void {
+  const points = verdictPoints(input, frame)
   for (const verdict of ['holds', 'narrow', 'fails', 'notChecked'] as const) {
-    const d = sections
-      .filter((section) => section.verdict === verdict)
-      .map(({ from, to }) => {
-        if ((to - from) * frame.scale < MARK + 2) return ''
-        const [, beside] = offsetPath(
-          pathBetween(path, (from + to) / 2 - 0.01, (from + to) / 2 + 0.01),
-          14 / frame.scale,
-        )
-        return beside ? verdictShape(verdict, frame.toPoint(beside), MARK) : ''
-      })
+    const d = points
+      .filter((mark) => mark.verdict === verdict)
+      .map(({ point }) => verdictShape(verdict, point, MARK))
       .join('')
     add(`sections-${verdict}`, SECTION_ROLES[verdict], d)
   }
