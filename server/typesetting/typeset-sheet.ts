@@ -3,7 +3,7 @@ import { composeSheet } from '../../shared/sheet/compose-sheet'
 import type { Chapter } from '../../shared/sheet/document'
 import { sheetWords } from '../../shared/sheet/sheet-words'
 import { sheetData, sheetPictures } from './sheet-data'
-import type { TypesetInput, Typesetter } from './typesetter'
+import type { Typesetter } from './typesetter'
 
 /** Name of the file inside the PDF from which a sheet can be read again. */
 export const SHEET_ATTACHMENT = 'sheet.json'
@@ -19,18 +19,9 @@ export function typesetSheet(
   sheet: Sheet,
   chapters: readonly Chapter[] = [],
 ): Buffer {
-  return typesetter.typeset('sheet', sheetInput(sheet, chapters))
-}
-
-/** The pages of a sheet as one drawing, under each other. */
-export function drawSheet(typesetter: Typesetter, sheet: Sheet): string {
-  return typesetter.draw('sheet', sheetInput(sheet, []))
-}
-
-function sheetInput(sheet: Sheet, chapters: readonly Chapter[]): TypesetInput {
   const document = composeSheet(sheet, chapters)
   const { resolve } = sheetWords(sheet.units, sheet.datum)
-  return {
+  return typesetter.typeset('sheet', {
     data: sheetData(document, resolve),
     pictures: sheetPictures(document),
     attachments: [
@@ -41,5 +32,5 @@ function sheetInput(sheet: Sheet, chapters: readonly Chapter[]): TypesetInput {
         description: document.attachment,
       },
     ],
-  }
+  })
 }

@@ -1,5 +1,5 @@
 import { fileURLToPath } from 'node:url'
-import { NodeCompiler, type NodeTypstDocument } from '@myriaddreamin/typst-ts-node-compiler'
+import { NodeCompiler } from '@myriaddreamin/typst-ts-node-compiler'
 import { readFonts } from './fonts'
 
 /** A file that travels inside the PDF. */
@@ -27,8 +27,6 @@ export interface Typesetter {
    * @throws TypesettingError where the template does not compile with these data.
    */
   readonly typeset: (template: string, input: TypesetInput) => Buffer
-  /** The same document as one drawing, its pages under each other. */
-  readonly draw: (template: string, input: TypesetInput) => string
 }
 
 /** A template that does not compile: a fault of the program, or a picture that is none. */
@@ -50,22 +48,10 @@ export function createTypesetter(): Typesetter {
     workspace: TEMPLATES,
     fontArgs: [{ fontBlobs: readFonts() }],
   })
-  return {
-    typeset: (template, input) =>
-      compiledWith(compiler, template, input, (document) =>
-        withoutSuspects(compiler.pdf(document, { pdfStandard: STANDARD })),
-      ),
-    draw: (template, input) =>
-      compiledWith(compiler, template, input, (document) => compiler.plainSvg(document)),
-  }
+  return { typeset: (template, input) => typesetWith(compiler, template, input) }
 }
 
-function compiledWith<Result>(
-  compiler: NodeCompiler,
-  template: string,
-  input: TypesetInput,
-  write: (document: NodeTypstDocument) => Result,
-): Result {
+function typesetWith(compiler: NodeCompiler, template: string, input: TypesetInput): Buffer {
   const pictures = [...(input.pictures ?? [])].map(
     ([name, bytes]) => [`${TEMPLATES}${name}`, Buffer.from(bytes)] as const,
   )
@@ -79,7 +65,7 @@ function compiledWith<Result>(
       },
     })
     if (!compiled.result) throw new TypesettingError(reasonOf(compiler, compiled.takeDiagnostics()))
-    return write(compiled.result)
+    return withoutSuspects(compiler.pdf(compiled.result, { pdfStandard: STANDARD }))
   } finally {
     for (const [path] of pictures) compiler.unmapShadow(path)
     compiler.evictCache(KEPT)

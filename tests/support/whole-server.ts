@@ -14,6 +14,7 @@ import {
 import { operationsOf } from '../../server/app'
 import type { Db } from '../../server/db/client'
 import { projectMembers } from '../../server/db/schema'
+import type { SheetRecord } from '../../shared/schemas/sheet-api'
 import { lowRoadContent, SHORT_STATIONS } from './ferry-quay'
 import { linkFor, tokenOf } from './links'
 import { browser, makePerson, ORIGIN, PASSWORD, signedIn, type TestPerson } from './people'
@@ -60,6 +61,12 @@ async function furnish(server: ReturnType<typeof freshApp>) {
   const lineId = await post(`${project}/lines`, { name: 'Low road', stations: SHORT_STATIONS })
   const scenario = { name: 'As asked', content: SHORT_CONTENT }
   const scenarioId = await post(`${project}/lines/${lineId}/scenarios`, scenario)
+  const sheetId = await post(`${project}/sheets`, { lineId, scenarioId })
+  const comment = { text: 'Where is the friction from?' }
+  const commented = await agent
+    .post(`${project}/sheets/${sheetId}/comments`)
+    .send(comment)
+    .expect(201)
   const uploaded = await agent
     .post(`${project}/files`)
     .attach('file', Buffer.from('Low road, 28 stations'), 'note.txt')
@@ -68,7 +75,9 @@ async function furnish(server: ReturnType<typeof freshApp>) {
   const invitation = await office.post('/api/admin/invitations').send(invited).expect(201)
   await browser(app).post('/api/password-resets').send({ email: lead.email }).expect(202)
   return {
-    ...{ projectId, gaugeId, lineId, scenarioId },
+    ...{ projectId, gaugeId, lineId, scenarioId, sheetId },
+    commentId: (commented.body as SheetRecord).comments[0]!.id,
+    line: '2.1',
     fileId: (uploaded.body as { id: string }).id,
     version: '1',
     accountId: lead.id,

@@ -87,7 +87,7 @@ export const sheets = sqliteTable(
   ],
 )
 
-/** Files that were frozen with a sheet: the PDF is page 0, pictures of its pages follow. */
+/** Files that were frozen with a sheet; page 0 is the whole document. */
 export const sheetFiles = sqliteTable(
   'sheet_files',
   {

@@ -1,13 +1,11 @@
 import { DerivationDisagreementError } from '../../../shared/derivation/disagreement'
 import type { Sheet } from '../../../shared/schemas/sheet'
 import { composeSheet, derivationOf } from '../../../shared/sheet/compose-sheet'
-import { answerCover } from '../../../shared/sheet/answer-cover'
 import { sheetTable } from '../../../shared/sheet/sheet-table'
 import { ConflictError } from '../../errors'
 import { toCsv } from '../../http/csv'
-import { pagePictures } from '../../typesetting/sheet-pages'
 import { createTypesetter, type Typesetter } from '../../typesetting/typesetter'
-import { drawSheet, typesetSheet } from '../../typesetting/typeset-sheet'
+import { typesetSheet } from '../../typesetting/typeset-sheet'
 
 /**
  * What needs the derivation or the typesetter. Both are large; this file is loaded when the first sheet
@@ -60,18 +58,18 @@ export function documentOf(key: string, sheet: Sheet): Buffer {
   return pdf
 }
 
-/** The final document with pictures of its pages. */
-export async function frozenDocument(
-  sheet: Sheet,
-): Promise<{ readonly pdf: Buffer; readonly pages: readonly Buffer[] }> {
+/** How many pages a PDF of our typesetter has; it writes their number beside their root. */
+const PAGES = /\/Type \/Pages\s+\/Count (\d+)/
+
+/** The final document. */
+export function frozenDocument(sheet: Sheet): { readonly pdf: Buffer; readonly pages: number } {
   const pdf = agreeing(() => typesetSheet(typesetter(), sheet))
-  return { pdf, pages: await pagePictures(drawSheet(typesetter(), sheet)) }
+  const pages = Number(PAGES.exec(pdf.toString('latin1'))?.[1] ?? 0)
+  if (pages === 0) throw new Error('a document without pages was set')
+  return { pdf, pages }
 }
 
 /** The derivation as CSV. */
 export function tableOf(sheet: Sheet): string {
   return agreeing(() => toCsv(sheetTable(sheet)))
 }
-
-/** Answer, subject, leave level and conditions in words. */
-export const coverWords = answerCover

@@ -6,22 +6,18 @@ import { codeBytes, composing, type SheetWork } from './sheet-work'
 
 const sha256 = (bytes: string | Uint8Array) => createHash('sha256').update(bytes).digest('hex')
 
-/** A sheet in its final form, its files already on the disk. */
+/** A sheet in its final form, its file already on the disk. */
 export interface Frozen {
   readonly content: Sheet
   readonly code: string
   readonly digest: string
-  readonly files: readonly {
-    readonly page: number
-    readonly fileId: string
-    readonly size: number
-    readonly sha256: string
-  }[]
+  readonly pages: number
+  readonly file: { readonly fileId: string; readonly size: number; readonly sha256: string }
 }
 
 /**
- * Gives a sheet its code and digest, sets it, and writes the PDF and pictures of its pages. Their rows
- * come later, with the move: bytes that no row names are swept.
+ * Gives a sheet its code and digest, sets it, and writes the PDF. Its row comes later, with the move:
+ * bytes that no row names are swept.
  *
  * @throws ConflictError that names the line that does not agree.
  */
@@ -33,12 +29,9 @@ export async function freezeSheet(
   const digest = sha256(digestText(sheet))
   const address = new URL('/verify', appUrl).href
   const content = { ...sheet, verification: { code, address, digest } }
-  const { pdf, pages } = await (await composing()).frozenDocument(content)
-  const files = []
-  for (const [page, bytes] of [pdf, ...pages].entries()) {
-    const fileId = randomUUID() as string
-    await store.write(fileId, 'original', bytes)
-    files.push({ page, fileId, size: bytes.length, sha256: sha256(bytes) })
-  }
-  return { content, code, digest, files }
+  const { pdf, pages } = (await composing()).frozenDocument(content)
+  const fileId = randomUUID() as string
+  await store.write(fileId, 'original', pdf)
+  const file = { fileId, size: pdf.length, sha256: sha256(pdf) }
+  return { content, code, digest, pages, file }
 }

@@ -1,5 +1,4 @@
-import { NotFoundError } from '../../errors'
-import { findSheetFile, type SheetRow } from './sheets.queries'
+import type { SheetRow } from './sheets.queries'
 import { nameOf, sheetAt } from './open-sheet'
 import { composing, type SheetPlace, type SheetWork } from './sheet-work'
 
@@ -36,11 +35,4 @@ export async function pdfOf(
   const { id, version, status } = row
   const bytes = documentOf(`${id} ${version} ${status}`, { ...row.content, status })
   return { kind: 'made', bytes, name }
-}
-
-/** @throws NotFoundError for a page that the frozen document does not have. */
-export function pageOf(db: SheetWork['db'], row: SheetRow, page: number) {
-  const file = page >= 1 ? findSheetFile(db, row.id, page) : undefined
-  if (!file) throw new NotFoundError(`page: ${page} does not exist of this sheet`)
-  return file
 }

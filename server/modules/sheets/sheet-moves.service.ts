@@ -24,7 +24,7 @@ import { reviseSheet } from './sheets.service'
 import type { SheetPlace, SheetWork } from './sheet-work'
 import {
   deleteSheet,
-  insertSheetFiles,
+  insertSheetFile,
   listInForce,
   type SheetRow,
   updateSheet,
@@ -197,12 +197,7 @@ function applyMove(deed: Deed, { work, row, rule, reason, frozen }: Applied): vo
     ...signatures(move, by.accountId, at),
     ...(frozen ? frozenColumns(frozen, at) : {}),
   })
-  if (frozen) {
-    insertSheetFiles(
-      tx,
-      frozen.files.map((file) => ({ ...file, sheetId: row.id })),
-    )
-  }
+  if (frozen) insertSheetFile(tx, { ...frozen.file, sheetId: row.id, page: 0 })
   noteMove(deed, { work, row, move, from: row.status, to: status, reason })
   if (frozen) supersedeOthers(deed, work, row)
 }
@@ -215,16 +210,9 @@ function signatures(move: SheetMove, accountId: string, at: number): Partial<She
   return move === 'issue-for-information' ? { preparedAt: at } : {}
 }
 
-function frozenColumns({ code, digest, files }: Frozen, at: number): Partial<SheetRow> {
-  const [pdf] = files
-  return {
-    code,
-    digest,
-    issuedAt: at,
-    fileId: pdf!.fileId,
-    fileSha256: pdf!.sha256,
-    pages: files.length - 1,
-  }
+function frozenColumns({ code, digest, pages, file }: Frozen, at: number): Partial<SheetRow> {
+  const { fileId, sha256: fileSha256 } = file
+  return { code, digest, pages, issuedAt: at, fileId, fileSha256 }
 }
 
 /** Whatever of the same number was in force is so no longer; nothing else in it changes. */

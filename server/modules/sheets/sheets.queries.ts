@@ -128,17 +128,8 @@ export function writeSettings(db: Db, row: typeof sheetSettings.$inferInsert): v
     .run()
 }
 
-export function insertSheetFiles(db: Db, rows: (typeof sheetFiles.$inferInsert)[]): void {
-  db.insert(sheetFiles).values(rows).run()
-}
-
-/** A file of a sheet: page 0 is the PDF. */
-export function findSheetFile(db: Db, sheetId: string, page: number) {
-  return db
-    .select()
-    .from(sheetFiles)
-    .where(and(eq(sheetFiles.sheetId, sheetId), eq(sheetFiles.page, page)))
-    .get()
+export function insertSheetFile(db: Db, row: typeof sheetFiles.$inferInsert): void {
+  db.insert(sheetFiles).values(row).run()
 }
 
 /** Those of the ids under which a sheet has a file. */

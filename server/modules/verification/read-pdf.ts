@@ -1,4 +1,8 @@
-import { getDocument, type PDFDocumentProxy } from 'pdfjs-dist/legacy/build/pdf.mjs'
+import {
+  getDocument,
+  type PDFDocumentLoadingTask,
+  type PDFDocumentProxy,
+} from 'pdfjs-dist/legacy/build/pdf.mjs'
 
 /** What can be read from a PDF, whoever wrote it. */
 export interface ReadPdf {
@@ -14,9 +18,9 @@ const MOST_PAGES = 400
 /** Larger files inside are none of ours. */
 const LARGEST_ATTACHMENT = 16_000_000
 
-/** Reads words and attachments; null where the bytes are no PDF, or one behind a password. */
-export async function readPdf(bytes: Uint8Array): Promise<ReadPdf | null> {
-  const task = getDocument({
+/** Opens a PDF; whatever stands in it runs nothing and loads nothing. */
+export function openPdf(bytes: Uint8Array): PDFDocumentLoadingTask {
+  return getDocument({
     // The reader takes the bytes away from whoever gave them.
     data: Uint8Array.from(bytes),
     isEvalSupported: false,
@@ -25,6 +29,11 @@ export async function readPdf(bytes: Uint8Array): Promise<ReadPdf | null> {
     stopAtErrors: false,
     verbosity: 0,
   })
+}
+
+/** Reads words and attachments; null where the bytes are no PDF, or one behind a password. */
+export async function readPdf(bytes: Uint8Array): Promise<ReadPdf | null> {
+  const task = openPdf(bytes)
   try {
     const document = await task.promise
     return { pages: await pagesOf(document), attachments: await attachmentsOf(document) }

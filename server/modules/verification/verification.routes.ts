@@ -7,10 +7,8 @@ import { receiveFile } from '../../files/receive-file'
 import { defineOperation, type Operation } from '../../http/operation'
 import { pathPart } from '../../http/parse-input'
 import { senderOf } from '../../http/sender'
-import { sendFile } from '../files/send-file'
-import { pageOf } from '../sheets/sheet-files.service'
 import type { SheetWork } from '../sheets/sheet-work'
-import { sheetOfCode, verified, verifyFile } from './verification.service'
+import { pictureOfPage, sheetOfCode, verified, verifyFile } from './verification.service'
 
 /** Open to anybody who holds a sheet. */
 export function verificationOperations(work: SheetWork): readonly Operation[] {
@@ -34,12 +32,11 @@ export function verificationOperations(work: SheetWork): readonly Operation[] {
       rule: 'open',
       mediaType: 'image/png',
       problems: ['not-found', 'too-many-requests'],
-      handle: ({ req, res }) => {
+      handle: async ({ req, res }) => {
         const row = sheetOfCode(work, pathPart(req, 'code'), senderOf(req))
-        const page = Number(pathPart(req, 'page'))
-        const { fileId: id, sha256: checksum } = pageOf(work.db, row, page)
-        const common = { mediaType: 'image/png', variant: 'original', shown: 'inline' } as const
-        return sendFile(res, work.store, { id, name: `page-${page}`, checksum, ...common })
+        const picture = await pictureOfPage(work, row, pathPart(req, 'page'))
+        res.set({ 'Content-Type': 'image/png', 'Cache-Control': 'private, max-age=3600' })
+        res.send(picture)
       },
     }),
     defineOperation({

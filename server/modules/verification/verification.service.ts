@@ -7,6 +7,7 @@ import { readCode } from '../../../shared/sheet/verification-code'
 import { beginAttempt, forgiveAttempt } from '../../auth/attempts/attempts'
 import type { Db } from '../../db/client'
 import { NotFoundError } from '../../errors'
+import type { FileStore } from '../../files/file-store'
 import { listMoves } from '../sheets/checking.queries'
 import type { SheetWork } from '../sheets/sheet-work'
 import {
@@ -115,9 +116,35 @@ async function comparedFile(work: SheetWork, bytes: Buffer): Promise<VerifiedFil
 
 async function issuedPdf(
   { store }: SheetWork,
-  { fileId }: SheetRow,
+  row: SheetRow,
   read: (bytes: Uint8Array) => Promise<ReadPdf | null>,
 ): Promise<ReadPdf | null> {
-  if (fileId === null || !(await store.holds(fileId, 'original'))) return null
-  return read(await readFile(join(store.folder, store.nameOf(fileId, 'original'))))
+  return read(await issuedBytes(store, row))
+}
+
+/** @throws NotFoundError where the bytes are gone, as after a restore without the folder of files. */
+async function issuedBytes(store: FileStore, { fileId, number }: SheetRow): Promise<Buffer> {
+  if (fileId === null || !(await store.holds(fileId, 'original'))) {
+    throw new NotFoundError(`sheet: the file of ${number} is missing on the server`)
+  }
+  return readFile(join(store.folder, store.nameOf(fileId, 'original')))
+}
+
+/**
+ * A page of an issued sheet as PNG.
+ *
+ * @throws NotFoundError for a page that it does not have.
+ */
+export async function pictureOfPage(
+  { store }: SheetWork,
+  row: SheetRow,
+  page: string,
+): Promise<Buffer> {
+  const number = /^[1-9]\d{0,3}$/.test(page) ? Number(page) : 0
+  if (number < 1 || number > row.pages) {
+    throw new NotFoundError(`page: "${page}" does not exist of this sheet`)
+  }
+  // Reader and canvas are large, and only pictures need both.
+  const { pagePicture } = await import('./page-picture')
+  return pagePicture(row.fileSha256, number, () => issuedBytes(store, row))
 }

@@ -214,9 +214,7 @@ describe('a file that somebody holds', { timeout: 60_000 }, () => {
       issued: String(content.groundLevel),
       found: String(louder.groundLevel),
     })
-    expect(
-      tampered.differences.some(({ where }) => where === 'Page 1 of 11' || /^Page \d/.test(where)),
-    ).toBe(true)
+    expect(tampered.differences.some(({ where }) => /^Page \d/.test(where))).toBe(true)
 
     const other = { ...content, verification: null }
     expect(await upload(server, typesetSheet(createTypesetter(), other))).toEqual({
