@@ -58,7 +58,9 @@ async function furnish(server: ReturnType<typeof freshApp>) {
   const projectId = await post('/api/projects', { name: 'Quay', datum: 'QD' })
   const project = `/api/projects/${projectId}`
   const gaugeId = await post(`${project}/gauges`, { name: 'Lock', zero: 0.6 })
-  const lineId = await post(`${project}/lines`, { name: 'Low road', stations: SHORT_STATIONS })
+  const stations = SHORT_STATIONS.map((row) => ({ ...row, x: row.chainage, y: 0 }))
+  const lineId = await post(`${project}/lines`, { name: 'Low road', stations })
+  const depotId = await post('/api/depots', { name: 'Mill Lane' })
   const scenario = { name: 'As asked', content: SHORT_CONTENT }
   const scenarioId = await post(`${project}/lines/${lineId}/scenarios`, scenario)
   const sheetId = await post(`${project}/sheets`, { lineId, scenarioId })
@@ -75,7 +77,7 @@ async function furnish(server: ReturnType<typeof freshApp>) {
   const invitation = await office.post('/api/admin/invitations').send(invited).expect(201)
   await browser(app).post('/api/password-resets').send({ email: lead.email }).expect(202)
   return {
-    ...{ projectId, gaugeId, lineId, scenarioId, sheetId },
+    ...{ projectId, gaugeId, lineId, scenarioId, sheetId, depotId },
     commentId: (commented.body as SheetRecord).comments[0]!.id,
     line: '2.1',
     fileId: (uploaded.body as { id: string }).id,

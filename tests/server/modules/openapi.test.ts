@@ -10,6 +10,7 @@ import { holdingCase } from '../../support/server-cases'
 const mediaSchema = z.strictObject({
   'application/json': z.strictObject({ schema: z.looseObject({}) }).optional(),
   'text/csv': z.strictObject({ schema: z.looseObject({}) }).optional(),
+  'application/geo+json': z.strictObject({ schema: z.looseObject({}) }).optional(),
   'application/octet-stream': z.strictObject({ schema: z.looseObject({}) }).optional(),
   'multipart/form-data': z.strictObject({ schema: z.looseObject({}) }).optional(),
   'message/rfc822': z.strictObject({ schema: z.looseObject({}) }).optional(),
