@@ -121,17 +121,18 @@ function bodyOf(request: z.ZodType, { requestMediaType }: Operation): JsonObject
   return { [requestMediaType ?? 'application/json']: media }
 }
 
-/** Every schema with an id that a route takes or gives, with what it refers to. */
+/**
+ * Every schema with an id that a route takes or gives, with what it refers to. Where a route takes
+ * what another gives, the component says what may be left out.
+ */
 function describeComponents(operations: readonly Operation[]): JsonObject {
   const components: JsonObject = {}
   const add = (schema: z.ZodType, io: 'input' | 'output') => {
     Object.assign(components, z.toJSONSchema(schema, { io }).$defs)
   }
   add(problemSchema, 'output')
-  for (const { request, response } of operations) {
-    if (request) add(request, 'input')
-    if (response) add(response, 'output')
-  }
+  for (const { response } of operations) if (response) add(response, 'output')
+  for (const { request } of operations) if (request) add(request, 'input')
   return withComponentPaths(components)
 }
 

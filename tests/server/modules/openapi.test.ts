@@ -11,6 +11,8 @@ const mediaSchema = z.strictObject({
   'application/json': z.strictObject({ schema: z.looseObject({}) }).optional(),
   'text/csv': z.strictObject({ schema: z.looseObject({}) }).optional(),
   'application/geo+json': z.strictObject({ schema: z.looseObject({}) }).optional(),
+  'application/pdf': z.strictObject({ schema: z.looseObject({}) }).optional(),
+  'image/png': z.strictObject({ schema: z.looseObject({}) }).optional(),
   'application/octet-stream': z.strictObject({ schema: z.looseObject({}) }).optional(),
   'multipart/form-data': z.strictObject({ schema: z.looseObject({}) }).optional(),
   'message/rfc822': z.strictObject({ schema: z.looseObject({}) }).optional(),
