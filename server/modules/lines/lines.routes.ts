@@ -118,7 +118,10 @@ function fileOperations({ db }: ProjectWork): readonly Operation[] {
       problems: ['conflict'],
       handle: ({ req, res }) => {
         const file = lineAsGeoJson(db, placeOf(req))
-        res.attachment('line-local-grid.geojson').type('application/geo+json').send(JSON.stringify(file))
+        res
+          .attachment('line-local-grid.geojson')
+          .type('application/geo+json')
+          .send(JSON.stringify(file))
       },
     }),
   ]
