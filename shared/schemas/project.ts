@@ -182,14 +182,12 @@ export const scenarioSchema = z
 export type Scenario = z.output<typeof scenarioSchema>
 
 /** Row of "all scenarios of a line in one table". */
-export const scenarioListItemSchema = scenarioSchema
-  .omit({ content: true })
-  .extend({
-    basis: z.string(),
-    upliftModel: z.string(),
-    /** The edges along the line: 0 sealed, 1 open; a run may have its own. */
-    edges: z.strictObject({ least: z.number(), most: z.number() }),
-  })
+export const scenarioListItemSchema = scenarioSchema.omit({ content: true }).extend({
+  basis: z.string(),
+  upliftModel: z.string(),
+  /** The edges along the line: 0 sealed, 1 open; a run may have its own. */
+  edges: z.strictObject({ least: z.number(), most: z.number() }),
+})
 export type ScenarioListItem = z.output<typeof scenarioListItemSchema>
 /** `GET …/scenarios` and `GET …/scenarios.csv` */
 export const scenariosQuerySchema = listQuerySchema.extend({

@@ -45,7 +45,11 @@ function ownFaults(content: ScenarioContent, { stations, sectionLength }: Survey
   ]
 }
 
-function faultOutside(field: string, value: number | null | undefined, range: AllowedRange): Fault[] {
+function faultOutside(
+  field: string,
+  value: number | null | undefined,
+  range: AllowedRange,
+): Fault[] {
   // Contents that were stored before a field was there lack it.
   if (value === null || value === undefined || isInRange(value, range)) return []
   return [rangeFault(`content.${field}`, value, range)]

@@ -22,11 +22,7 @@ import { useDeferred } from './useDeferred'
  */
 export function useSectionCheck(input: Readonly<Ref<CheckedCase>>) {
   const section = computed(() => input.value.section)
-  const bends = computed<Bends | null>((last) => {
-    const next = input.value.bends ?? null
-    return last && next && isSameValue(last, next) ? last : next
-  })
-  const shareFor = computed<GripShareFor>(() => gripShareBeside(bends.value))
+  const shareFor = useGripShare(input)
   const gripShare = computed(() => shareFor.value(section.value.barrier.skirtLength))
   const evaluation = computed<SectionEvaluation>(() =>
     pageEvaluation(section.value, gripShare.value),
@@ -76,6 +72,15 @@ export function useSectionCheck(input: Readonly<Ref<CheckedCase>>) {
     enough: enough.result,
     isSkirtless: computed(() => section.value.barrier.skirtLength === 0),
   }
+}
+
+/** What bends leave of the grip; the same function as long as the bends stay. */
+function useGripShare(input: Readonly<Ref<CheckedCase>>): Readonly<Ref<GripShareFor>> {
+  const bends = computed<Bends | null>((last) => {
+    const next = input.value.bends ?? null
+    return last && next && isSameValue(last, next) ? last : next
+  })
+  return computed(() => gripShareBeside(bends.value))
 }
 
 interface Asked {

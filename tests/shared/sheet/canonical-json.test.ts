@@ -12,7 +12,9 @@ describe('canonical JSON', () => {
   it('is that of the standard', () => {
     // RFC 8785, 3.2.2 and 3.2.3: the sample object and its canonical form.
     const sample = {
-      numbers: [333333333.33333329, 1e30, 4.5, 2e-3, 0.000000000000000000000000001],
+      numbers: JSON.parse(
+        '[333333333.33333329, 1E30, 4.50, 2e-3, 0.000000000000000000000000001]',
+      ) as unknown,
       string: '\u20ac$\u000F\u000aA\'\u0042\u0022\u005c\\"\u002f',
       literals: [null, true, false],
     }
