@@ -5,12 +5,11 @@ import { marksSchema } from './mark'
 import { scenarioContentSchema } from './scenario'
 import { sectionCaseSchema } from './section-case'
 import { sectionResultSchema } from './section-result'
+import { CHECK_CATEGORIES } from './sheet-categories'
 import { SHEET_STATUSES } from './sheet-status'
 
+export { CHECK_CATEGORIES } from './sheet-categories'
 export { SHEET_STATUSES, type SheetStatus } from './sheet-status'
-
-/** Category of check. BS 5975-1:2024, table 2. */
-export const CHECK_CATEGORIES = [0, 1, 2, 3] as const
 
 export const PAPERS = ['a4', 'us-letter'] as const
 export type Paper = (typeof PAPERS)[number]

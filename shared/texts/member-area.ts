@@ -7,6 +7,8 @@ import { lineTexts } from './line.en'
 import { linePlanTexts } from './line-plan.en'
 import { projectTexts } from './project.en'
 import { scenarioTexts } from './scenario.en'
+import { sheetTexts } from './sheet.en'
+import { sheetPageTexts } from './sheet-page.en'
 import { statesTexts } from './states.en'
 import { surveyImportTexts } from './survey-import.en'
 
@@ -22,6 +24,8 @@ export const areaTexts = {
     linePlan: linePlanTexts,
     projectPage: projectTexts,
     scenarioPage: scenarioTexts,
+    sheet: sheetTexts,
+    sheetPage: sheetPageTexts,
     states: statesTexts,
     surveyImport: surveyImportTexts,
   },

@@ -2,6 +2,7 @@ import { createRouter, createWebHistory, type RouteRecordRaw } from 'vue-router'
 import QuickCheckView from '@/views/QuickCheckView.vue'
 import { memberRoutes } from './member-routes'
 import { methodRoute } from './method-route'
+import { verifyRoute } from './verify-route'
 
 declare module 'vue-router' {
   interface RouteMeta {
@@ -18,6 +19,7 @@ export const routes: RouteRecordRaw[] = [
     meta: { titleKey: 'quickCheck.title' },
   },
   methodRoute,
+  verifyRoute,
   ...memberRoutes,
   {
     path: '/:path(.*)*',

@@ -35,4 +35,11 @@ export const projectRoutes: RouteRecordRaw[] = [
     props: true,
     meta: { titleKey: 'scenarioPage.title' },
   },
+  {
+    path: '/sheets/:sheetId',
+    name: 'sheet',
+    component: () => import('@/views/SheetView.vue'),
+    props: true,
+    meta: { titleKey: 'sheetPage.title' },
+  },
 ]

@@ -3,7 +3,7 @@ import { texts } from '../../shared/texts'
 import { areaTexts } from '../../shared/texts/member-area'
 import { methodAreaTexts } from '../../shared/texts/method-area'
 import { sectionDetails } from '../../shared/texts/section-details.en'
-import { sheetTexts } from '../../shared/texts/sheet.en'
+import { verifyAreaTexts } from '../../shared/texts/verify-area'
 import { sourceFiles } from '../support/source-files'
 
 /** Every text by its full key. */
@@ -23,7 +23,7 @@ const all = {
   ...areaTexts.en,
   ...sectionDetails.en,
   ...methodAreaTexts.en,
-  sheet: sheetTexts,
+  ...verifyAreaTexts.en,
 }
 const keys = [...leaves(all).keys()]
 const AREAS = Object.keys(all).join('|')

@@ -11,6 +11,10 @@ const values = {
   organisation: 'Mill Lane Engineers',
   expires: '2031-03-03 21:45 UTC',
   changed: '2031-03-03 21:45 UTC',
+  sheet: 'FQ-001 rev A',
+  project: 'Ferry Quay',
+  by: 'Checker',
+  reason: 'The friction has no source',
 }
 
 describe('a mail', () => {

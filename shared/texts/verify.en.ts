@@ -1,0 +1,33 @@
+/** Words of the open page that verifies a sheet. */
+export const verifyTexts = {
+  title: 'Verify',
+  lead: 'Is the sheet in your hand the one that was issued, and is it current? Enter its code, or choose its file.',
+  code: 'Code',
+  codeHint: 'Twelve signs in groups of four, at the foot of every page',
+  look: 'Look it up',
+  file: 'Or the PDF file',
+  fileHint: 'It is compared and not kept.',
+  current: 'Current',
+  issued: 'Issued {date}',
+  supersededBy: 'Superseded by revision {revision}, issued {date}. Do not use it any longer.',
+  superseded: 'Superseded. Do not use it any longer.',
+  withdrawn: 'Withdrawn: {reason}',
+  unchecked: 'Issued for information. Nobody checked it.',
+  approval: 'Approval recorded',
+  conditions: 'Holds only if',
+  sheet: 'Sheet {number}, revision {revision}',
+  signature: '{organisation}, {date}',
+  role: { prepared: 'Prepared', checked: 'Checked', approved: 'Approved' },
+  digest: 'SHA-256 of the figures',
+  fileDigest: 'SHA-256 of the file',
+  pages: 'Pages as issued',
+  page: 'Page {page} of {pages}',
+  answer: {
+    issued: 'This is the file that we issued.',
+    'not-the-file':
+      'Not the file that we issued (merged, printed or re-saved): compare these figures.',
+    changed: 'Changed: figures read from it differ.',
+    unknown: 'None of ours.',
+  },
+  difference: { title: 'Differences', where: 'Where', issued: 'As issued', found: 'In this file' },
+} as const
