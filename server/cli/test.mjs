@@ -49,7 +49,7 @@ async function gatesInTurn(scripts) {
 /** Runs a test runner that writes a report; a runner that fails without a failed test is one too. */
 async function suite({ name, words, report, env, count }) {
   heading(name)
-  const status = await run(process.execPath, words, { env, timeout: 10 * MINUTE })
+  const status = await run(process.execPath, words, { env, timeout: 13 * MINUTE })
   const counted = readCount(report, count)
   total.passed += counted.passed
   total.failed += counted.failed
