@@ -37,6 +37,8 @@ async function makeSheet(page: Page): Promise<void> {
 test('a scenario of Ferry Quay becomes an approved sheet that anybody verifies', async ({
   browser,
 }) => {
+  // Three people, and a sheet that is derived and set several times.
+  test.slow()
   const project = `/projects/${FERRY_QUAY.project}`
   const engineer = await asSomebody(browser, 'Engineer A', project)
   await makeSheet(engineer)

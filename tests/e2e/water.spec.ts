@@ -1,6 +1,13 @@
-import { expect, test } from '@playwright/test'
+import { expect, type Page, test } from '@playwright/test'
 import { calcSection, DEFAULT_SECTION } from './support/calc-section'
 import { QuickCheckPage } from './support/quick-check-page'
+
+/** What a person sees is what the frame ends with. */
+function painted(page: Page): Promise<void> {
+  return page.evaluate(
+    () => new Promise<void>((done) => requestAnimationFrame(() => setTimeout(done))),
+  )
+}
 
 test('the dragged water turns the verdict at the depth that the batch command gives', async ({
   page,
@@ -19,6 +26,7 @@ test('the dragged water turns the verdict at the depth that the batch command gi
   const seen: { depth: number; verdict: string }[] = []
   for (let y = start; y > start - 90; y -= 0.25) {
     await page.mouse.move(x, y)
+    await painted(page)
     const verdict = (await check.verdict.textContent())?.trim() ?? ''
     seen.push({ depth: await check.depth(), verdict })
     if (verdict === 'Does not hold') break

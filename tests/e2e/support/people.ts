@@ -5,7 +5,8 @@ export async function signInAs(page: Page, name: string, path: string): Promise<
   await page.goto(path)
   await expect(page).toHaveURL(/\/sign-in\?next=/)
   await page.getByRole('button', { name: new RegExp(`^${name}`) }).click()
-  await expect(page).toHaveURL(path)
+  // The page is loaded with its area before the address changes.
+  await expect(page).toHaveURL(path, { timeout: 20_000 })
 }
 
 export async function signOut(page: Page): Promise<void> {
