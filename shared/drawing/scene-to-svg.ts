@@ -21,7 +21,7 @@ export interface SvgOptions {
 }
 
 /** Characters that XML 1.0 does not allow, even escaped. */
-// eslint-disable-next-line no-control-regex
+// eslint-disable-next-line no-control-regex -- control characters are what it is to find
 const NOT_XML = /[\u0000-\u0008\u000b\u000c\u000e-\u001f\ufffe\uffff]/g
 
 function escapeXml(text: string): string {
