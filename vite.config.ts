@@ -65,6 +65,7 @@ export default defineConfig({
         extends: true,
         test: {
           name: 'product',
+          setupFiles: ['tests/support/patient-waits.ts'],
           include: ['tests/**/*.test.ts'],
           exclude: [...ENGINE_TESTS, 'tests/e2e/**'],
         },

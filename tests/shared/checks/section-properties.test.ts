@@ -38,9 +38,11 @@ describe('anywhere in the ranges of the contract', () => {
   it('finds where it holds in bounded time, and every edge separates holding from failing', () => {
     fc.assert(
       fc.property(arbitrarySection, (section) => {
-        const started = performance.now()
+        // Others may have the processor meanwhile: what this process used counts.
+        const started = process.cpuUsage()
         const { intervals } = holdingProfile(section)
-        expect(performance.now() - started).toBeLessThan(2000)
+        const { user, system } = process.cpuUsage(started)
+        expect((user + system) / 1000).toBeLessThan(2000)
         for (const { from, to } of intervals) {
           expect(from).toBeLessThanOrEqual(to)
           expect(verdictAt(section, to)).not.toBe('fails')

@@ -1,5 +1,5 @@
 // @vitest-environment jsdom
-import { screen, within } from '@testing-library/vue'
+import { screen, waitFor, within } from '@testing-library/vue'
 import userEvent from '@testing-library/user-event'
 import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest'
 import type { Line } from '../../../shared/schemas/project'
@@ -22,7 +22,7 @@ const cell = (name: string) =>
 const button = (name: string) =>
   [...document.querySelectorAll('button')].find(({ textContent }) => textContent.trim() === name) ??
   expect.fail(`No button says "${name}"`)
-const press = async (name: string) => userEvent.click(await vi.waitFor(() => button(name)))
+const press = async (name: string) => userEvent.click(await waitFor(() => button(name)))
 
 const manyStations = (): Line['stations'] =>
   Array.from({ length: 2000 }, (_, i) => ({
@@ -54,7 +54,7 @@ describe('all scenarios in one table', () => {
     await userEvent.type(await screen.findByLabelText('Search'), 'tonight{Enter}')
     await userEvent.selectOptions(screen.getByLabelText('Verdict'), 'Does not hold')
     await userEvent.click(await screen.findByRole('button', { name: /^Holds to/ }))
-    await vi.waitFor(() => {
+    await waitFor(() => {
       const asked = api.calls.filter(({ path }) => path === `/api${PATH}/scenarios`).at(-1)!.query
       expect(Object.fromEntries(asked)).toMatchObject({
         search: 'tonight',

@@ -1,7 +1,7 @@
 // @vitest-environment jsdom
-import { screen, within } from '@testing-library/vue'
+import { screen, waitFor, within } from '@testing-library/vue'
 import userEvent from '@testing-library/user-event'
-import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest'
+import { afterEach, beforeEach, describe, expect, it } from 'vitest'
 import type { Desk } from '../../../src/api/projects'
 import { account, fakeApi, refuse } from '../support/fake-api'
 import { clearPage, openPage, stubPage } from '../support/open-page'
@@ -66,7 +66,7 @@ describe('a project', () => {
     await userEvent.type(form.getByLabelText('Name of the project'), ' Quay')
     await userEvent.click(button)
     expect(await screen.findByText('“Ferry Quay” is deleted.')).toBeTruthy()
-    await vi.waitFor(() => expect(router.currentRoute.value.path).toBe('/projects'))
+    await waitFor(() => expect(router.currentRoute.value.path).toBe('/projects'))
     expect(isGone).toBe(true)
     expect(api.sent('DELETE /api/projects/p')).toHaveLength(1)
   })

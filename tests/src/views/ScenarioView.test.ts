@@ -30,14 +30,14 @@ function labelled(name: string): HTMLInputElement {
   if (!(input instanceof HTMLInputElement)) throw new Error(`No field is labelled "${name}"`)
   return input
 }
-const field = (name: string) => waitFor(() => labelled(name), { timeout: 8000 })
+const field = (name: string) => waitFor(() => labelled(name))
 const button = (name: string) =>
   [...document.querySelectorAll('button, [role=button]')].find(
     ({ textContent }) => textContent.trim() === name,
   )
 const press = async (name: string) => {
   const find = () => button(name) ?? expect.fail(`No button says "${name}"`)
-  await userEvent.click(await waitFor(find, { timeout: 8000 }))
+  await userEvent.click(await waitFor(find))
 }
 function openDialog(name: string): HTMLElement {
   const dialog = document.querySelector<HTMLElement>('dialog[open]')
@@ -45,7 +45,7 @@ function openDialog(name: string): HTMLElement {
   expect(title?.textContent.trim()).toBe(name)
   return dialog!
 }
-const dialogCalled = (name: string) => waitFor(() => openDialog(name), { timeout: 8000 })
+const dialogCalled = (name: string) => waitFor(() => openDialog(name))
 vi.setConfig({ testTimeout: 30_000 })
 const retype = async (name: string, text: string) => {
   const input = await field(name)
@@ -60,7 +60,7 @@ async function leaveField(): Promise<void> {
 async function saved(): Promise<void> {
   await leaveField()
   const standing = () => document.querySelector('[data-testid=saving]')?.textContent
-  await waitFor(() => expect(standing()).toContain('Saved at'), { timeout: 4000 })
+  await waitFor(() => expect(standing()).toContain('Saved at'))
 }
 
 describe('the workbench of a scenario', () => {
@@ -148,7 +148,7 @@ describe('the workbench of a scenario', () => {
     await openPage(PATH)
     expect((await field('Name of the scenario')).value).toBe('Typed before the session ended')
     expect((await field('Crossfall')).value).toBe('steep')
-    await waitFor(() => expect(api.sent(SAVE)).toHaveLength(1), { timeout: 4000 })
+    await waitFor(() => expect(api.sent(SAVE)).toHaveLength(1))
   })
 
   it('asks where what was kept was made on an older version', async () => {

@@ -1,7 +1,7 @@
 // @vitest-environment jsdom
 import { screen, waitFor } from '@testing-library/vue'
 import userEvent from '@testing-library/user-event'
-import { afterEach, beforeEach, expect, it, vi } from 'vitest'
+import { afterEach, beforeEach, expect, it } from 'vitest'
 import { account, fakeApi, refuse } from '../support/fake-api'
 import { clearPage, openPage, stubPage } from '../support/open-page'
 
@@ -45,16 +45,16 @@ it('says that the pair does not fit, without saying which, and keeps the address
 it('counts a wait down and opens the button again', async () => {
   fakeApi({
     ...nobody,
-    'POST /api/session': () => refuse(429, 'too-many-requests', { retryAfter: 2 }),
+    'POST /api/session': () => refuse(429, 'too-many-requests', { retryAfter: 3 }),
   })
   await openPage('/sign-in')
   await fill('engineer@example.invalid', 'wrong')
   await enter()
-  expect(await screen.findByText('Too many attempts. Try again in 2 s.')).toBeTruthy()
+  await screen.findByText(/Too many attempts. Try again in [23] s\./)
   const button = screen.getByRole<HTMLButtonElement>('button', { name: 'Sign in' })
   expect(button.disabled).toBe(true)
-  await screen.findByText('Too many attempts. Try again in 1 s.', {}, { timeout: 2000 })
-  await screen.findByText('You can try again now.', {}, { timeout: 2000 })
+  await screen.findByText(/Try again in [12] s\./)
+  await screen.findByText('You can try again now.')
   expect(button.disabled).toBe(false)
 })
 
@@ -85,7 +85,7 @@ it('shows no list in production', async () => {
   fakeApi(nobody)
   await openPage('/sign-in')
   await screen.findByLabelText('Address')
-  await vi.waitFor(() => expect(screen.queryByText('People of the demonstration')).toBeNull())
+  await waitFor(() => expect(screen.queryByText('People of the demonstration')).toBeNull())
 })
 
 it('says that the server cannot be reached', async () => {
