@@ -13,7 +13,10 @@ export interface GaugeDatum {
  *
  * @see WMO-No. 1044, Manual on Stream Gauging, vol. I: stage is the height above gauge datum.
  */
-export function addedToReading({ zero, correction }: GaugeDatum, reference: LevelReference): number {
+export function addedToReading(
+  { zero, correction }: GaugeDatum,
+  reference: LevelReference,
+): number {
   if (reference === 'siteLevel') return 0
   return reference === 'stage' ? zero + correction : correction
 }
