@@ -1,6 +1,7 @@
 import type { AirThroughTime } from '../../calc/air/air-through-time'
 import type { KnownReading, TimeSeries } from '../../calc/series/time-series'
 import type { SectionCase } from '../../schemas/section-case'
+import type { KeptChecks } from './kept-checks'
 
 /** One section, and the water that comes to it. SI units; moments in seconds, all from one origin. */
 export interface EventInput {
@@ -31,4 +32,6 @@ export interface EventInput {
   readonly groundBefore?: 'dry' | 'soaked'
   /** Time to clear the area [s]; 20 min if left out. */
   readonly timeToClear?: number
+  /** Answers that are shared with other sections of the same case and grip; left out: none. */
+  readonly kept?: KeptChecks
 }

@@ -12,7 +12,8 @@ import { least } from './least-moment'
 /** Depth above which a case is not computed, in diameters. */
 const DEEPEST = 1.5
 
-type Limits = Pick<EventAnswer, 'holdsToLevel' | 'holdsToCheck' | 'leave' | 'pondLimit'>
+/** What holds, when to leave and which pond is too much, as a part of the answer. */
+export type Limits = Pick<EventAnswer, 'holdsToLevel' | 'holdsToCheck' | 'leave' | 'pondLimit'>
 
 /** What holds, when to leave, and which pond is too much. */
 export function limitsOf(
@@ -40,8 +41,8 @@ export function limitsOf(
 }
 
 /** The section with the lowest pressure and the highest pond of the event, its uplift grown longest. */
-function worstSection(
-  { section, groundBefore = 'soaked' }: EventInput,
+export function worstSection(
+  { section, groundBefore = 'soaked' }: Pick<EventInput, 'section' | 'groundBefore'>,
   moments: readonly EventMoment[],
 ): SectionCase {
   const wet = moments.filter(({ depth }) => depth > 0)

@@ -9,16 +9,10 @@ import { evaluateState } from '../evaluate-section'
 import { sectionState } from '../section-state'
 import type { EventInput } from './event-input'
 import type { EventMoment } from './event-trace'
+import type { Conditions } from './kept-checks'
 
 /** Depth above which a case is not computed, in diameters. */
 const DEEPEST = 1.5
-
-/** What the levels make of a section at a moment. */
-interface Conditions {
-  readonly depth: number
-  readonly dryDepth: number
-  readonly airPressure: number
-}
 
 /** Water under the base with the edge depth h_e, and with the depth h; on level ground the same. */
 interface Growth {
@@ -127,8 +121,22 @@ export class EventState {
     this.last =
       this.last && !this.grown && isSame(this.last, conditions)
         ? { ...this.last, time: this.now }
-        : this.checked(conditions)
+        : this.keptOr(conditions)
     return this.last
+  }
+
+  /** The same without what is kept to a tenth of a millimetre. */
+  exactMoment(): EventMoment {
+    return this.checked(this.conditions())
+  }
+
+  /** Growing water under the skirt has a history: there nothing is shared. */
+  private keptOr(conditions: Conditions): EventMoment {
+    const { kept } = this.input
+    if (!kept || (this.grown && conditions.depth + conditions.dryDepth > 0)) {
+      return this.checked(conditions)
+    }
+    return { ...kept.at(conditions, (at) => this.checked(at)), time: this.now, ...conditions }
   }
 
   private checked(conditions: Conditions): EventMoment {

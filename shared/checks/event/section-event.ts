@@ -7,8 +7,14 @@ import type { EventInput } from './event-input'
 import { EventState } from './event-state'
 import { eventSteps, type StretchSteps } from './event-steps'
 import { emptyTrace, momentsOf, writeMoment, type EventMoment } from './event-trace'
-import { limitsOf } from './event-limits'
+import { limitsOf, type Limits } from './event-limits'
 import { least } from './least-moment'
+
+/** What happened to a section, its moments and the one under the deepest water. */
+export interface EventHistory extends Omit<EventAnswer, keyof Limits> {
+  readonly moments: readonly EventMoment[]
+  readonly highest: EventMoment
+}
 
 /** Ends of a failure are found to this width [s]. */
 const MOMENT_WIDTH = 0.5
@@ -63,6 +69,12 @@ export class SectionEvent {
 
   /** The answer; computes what is left first. */
   answer(): EventAnswer {
+    const { moments, highest, ...history } = this.history()
+    return { ...history, ...limitsOf(this.input, moments, highest) }
+  }
+
+  /** What happened, without what holds and when to leave; computes what is left first. */
+  history(): EventHistory {
     this.advance(this.total)
     const { input, trace, failures } = this
     const moments = momentsOf(trace)
@@ -77,9 +89,10 @@ export class SectionEvent {
       leastFreeboard: least(moments, ({ freeboard }) => freeboard),
       highestLevel: this.highestLevel(),
       lowestAirPressure: least(moments, ({ airPressure }) => airPressure)!,
-      ...limitsOf(input, moments, highest),
       gaps: gapsOf(input.water),
       trace,
+      moments,
+      highest,
     }
   }
 
@@ -155,7 +168,7 @@ export class SectionEvent {
     while (end.time - start.time > MOMENT_WIDTH) {
       const middle = start.copy()
       middle.advance((start.time + end.time) / 2)
-      const moment = middle.moment()
+      const moment = middle.exactMoment()
       if ((moment.verdict === 'fails') === fails) end = moment
       else start = middle
     }
