@@ -136,8 +136,10 @@ export class EventState {
     if (!kept || (this.grown && conditions.depth + conditions.dryDepth > 0)) {
       return this.checked(conditions)
     }
-    return { ...kept.at(conditions, (at) => this.checked(at)), time: this.now, ...conditions }
+    return momentNow(kept.at(conditions, this.check), conditions, this.now)
   }
+
+  private readonly check = (at: Conditions): EventMoment => this.checked(at)
 
   private checked(conditions: Conditions): EventMoment {
     const { section, gripShare } = this.input
@@ -214,6 +216,23 @@ export class EventState {
     const edge = begin(heads.edge)
     const isLevel = section.ground.fall === 0
     return { edge, skirt: isLevel ? edge : begin(heads.skirt) }
+  }
+}
+
+/** What is kept, at this very moment; written out, because spreading would cost more than the rest. */
+function momentNow(kept: EventMoment, conditions: Conditions, time: number): EventMoment {
+  return {
+    time,
+    depth: conditions.depth,
+    dryDepth: conditions.dryDepth,
+    airPressure: conditions.airPressure,
+    uplift: kept.uplift,
+    verdict: kept.verdict,
+    governs: kept.governs,
+    utilisation: kept.utilisation,
+    sliding: kept.sliding,
+    skirt: kept.skirt,
+    freeboard: kept.freeboard,
   }
 }
 

@@ -63,32 +63,42 @@ export function emptyTrace(length: number): EventTrace {
 
 /** Writes a moment into a trace. */
 export function writeMoment(trace: EventTrace, index: number, moment: EventMoment): void {
+  const { figures } = trace
   const row = index * COLUMNS.length
-  for (let i = 0; i < COLUMNS.length; i += 1) {
-    trace.figures[row + i] = moment[COLUMNS[i]!] ?? NOTHING
-  }
+  figures[row] = moment.time
+  figures[row + 1] = moment.depth
+  figures[row + 2] = moment.dryDepth
+  figures[row + 3] = moment.airPressure
+  figures[row + 4] = moment.uplift
+  figures[row + 5] = moment.utilisation ?? NOTHING
+  figures[row + 6] = moment.sliding ?? NOTHING
+  figures[row + 7] = moment.skirt ?? NOTHING
+  figures[row + 8] = moment.freeboard ?? NOTHING
   trace.verdicts[index] = VERDICTS.indexOf(moment.verdict)
   trace.governs[index] = CHECK_IDS.indexOf(moment.governs)
 }
 
 /** The moment at a place of a trace, 0 to length − 1. */
 export function momentAt(trace: EventTrace, index: number): EventMoment {
+  const { figures } = trace
   const row = index * COLUMNS.length
-  const read = (column: number): number => trace.figures[row + column]!
-  const orNull = (column: number): number | null => (read(column) === NOTHING ? null : read(column))
   return {
-    time: read(0),
-    depth: read(1),
-    dryDepth: read(2),
-    airPressure: read(3),
-    uplift: read(4),
+    time: figures[row]!,
+    depth: figures[row + 1]!,
+    dryDepth: figures[row + 2]!,
+    airPressure: figures[row + 3]!,
+    uplift: figures[row + 4]!,
     verdict: VERDICTS[trace.verdicts[index]!]!,
     governs: CHECK_IDS[trace.governs[index]!]!,
-    utilisation: orNull(5),
-    sliding: orNull(6),
-    skirt: orNull(7),
-    freeboard: orNull(8),
+    utilisation: orNull(figures[row + 5]!),
+    sliding: orNull(figures[row + 6]!),
+    skirt: orNull(figures[row + 7]!),
+    freeboard: orNull(figures[row + 8]!),
   }
+}
+
+function orNull(figure: number): number | null {
+  return figure === NOTHING ? null : figure
 }
 
 /** All moments of a trace. */
