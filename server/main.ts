@@ -15,11 +15,15 @@ import { startMailWorker } from './mail/mail-worker'
 import { createSmtpSender } from './mail/smtp-sender'
 import { demoPeopleSeed, usableDemoAccounts } from './modules/accounts/demo-accounts.service'
 import { sweepFiles } from './modules/files/files.service'
+import { stopComposing, warmComposing } from './modules/sheets/composing'
 import { firstAdministratorLink } from './modules/invitations/first-administrator.service'
 import { createParts, type RouteParts } from './parts'
 
 /** How long an answer under way may take once the server was told to stop [ms]. */
 const LAST_ANSWER = 5000
+
+/** Until the typesetter is loaded, so that whoever opens the first page does not wait for it [ms]. */
+const WARM_AFTER = 10_000
 
 const inProject = (path: string) => fileURLToPath(new URL(`../${path}`, import.meta.url))
 
@@ -63,7 +67,7 @@ function start(): void {
   })
   const stopWorkers = startWorkers(parts, env, logger)
   stopOnSignal(server, async () => {
-    await stopWorkers()
+    await Promise.all([stopWorkers(), stopComposing()])
     close()
   })
 }
@@ -95,6 +99,11 @@ function startWorkers(parts: RouteParts, env: Env, logger: Logger): () => Promis
   sweepFiles(parts).catch((error: unknown) => {
     logger.error({ err: error }, 'files without a row were not swept')
   })
+  setTimeout(() => {
+    warmComposing().catch((error: unknown) => {
+      logger.error({ err: error }, 'the typesetter did not start')
+    })
+  }, WARM_AFTER).unref()
   if (env.smtpUrl === undefined) return () => Promise.resolve(stopHousekeeping())
   const sender = createSmtpSender(env.smtpUrl, env.mailFrom)
   const mail = startMailWorker({ ...parts, sender, logger })

@@ -1,6 +1,7 @@
 import { fileURLToPath } from 'node:url'
 import { NodeCompiler } from '@myriaddreamin/typst-ts-node-compiler'
 import { readFonts } from './fonts'
+import { TypesettingError } from './typesetting-error'
 
 /** A file that travels inside the PDF. */
 export interface Attachment {
@@ -27,11 +28,6 @@ export interface Typesetter {
    * @throws TypesettingError where the template does not compile with these data.
    */
   readonly typeset: (template: string, input: TypesetInput) => Buffer
-}
-
-/** A template that does not compile: a fault of the program, or a picture that is none. */
-export class TypesettingError extends Error {
-  override readonly name = 'TypesettingError'
 }
 
 const TEMPLATES = fileURLToPath(new URL('templates/', import.meta.url))

@@ -10,7 +10,8 @@ export class DerivationDisagreementError extends Error {
     readonly lineNumber: string,
     readonly lineId: string,
     readonly reason: DisagreementReason,
-    detail: string,
+    /** What does not agree, in words. */
+    readonly detail: string,
   ) {
     super(`line ${lineNumber} (${lineId}): ${detail}`)
   }

@@ -24,6 +24,7 @@ import {
 } from './checking.queries'
 import {
   assertChecking,
+  assertSheetVersion,
   assertStatus,
   IN_FORCE,
   isEditor,
@@ -32,7 +33,8 @@ import {
   openSheet,
   sheetSubject,
 } from './open-sheet'
-import { composing, type SheetPlace, type SheetWork } from './sheet-work'
+import { linesOf } from './composing'
+import type { SheetPlace, SheetWork } from './sheet-work'
 import type { SheetRow } from './sheets.queries'
 
 /**
@@ -46,19 +48,22 @@ export async function markLine(
   { line, ...place }: SheetPlace & { readonly line: string },
   { isTicked, figure, note }: z.output<typeof sheetMarkChangeSchema>,
 ): Promise<void> {
-  const { linesOf } = await composing()
+  const before = openSheet(work.db, place)
+  assertChecking(work.db, before, actor)
+  await assertLine(before, line)
   change(work, actor, (deed) => {
     const { tx, at, by } = deed
     const row = openSheet(tx, place)
     assertChecking(tx, row, actor)
-    assertLine(linesOf(row.content), line)
+    assertSheetVersion(row, before.version)
     if (!isTicked && figure === null) deleteMark(tx, row.id, line)
     else writeMark(tx, { sheetId: row.id, line, isTicked, figure, note, at, by: by.accountId })
     noteOn(deed, row, 'sheet.marked', { line })
   })
 }
 
-function assertLine(lines: ReadonlyMap<string, number>, line: string): void {
+async function assertLine({ content }: SheetRow, line: string): Promise<void> {
+  const lines = await linesOf(content)
   if (!lines.has(line)) throw new NotFoundError(`line: "${line}" does not exist in this sheet`)
 }
 
@@ -71,6 +76,11 @@ export function mayComment(actor: SignedIn): boolean {
   return actor.mayCheck || actor.mayApprove || isEditor(actor)
 }
 
+function assertCommenting(row: SheetRow, actor: SignedIn): void {
+  assertStatus(row, OPEN_STATUSES, 'comments are made before a sheet is issued')
+  if (!mayComment(actor)) throw new ForbiddenError('Readers do not comment.')
+}
+
 /** @throws ForbiddenError for readers; ConflictError once the sheet is frozen. */
 export async function addComment(
   work: SheetWork,
@@ -78,13 +88,14 @@ export async function addComment(
   place: SheetPlace,
   { line, text }: z.output<typeof newCommentSchema>,
 ): Promise<void> {
-  const { linesOf } = await composing()
+  const before = openSheet(work.db, place)
+  assertCommenting(before, actor)
+  if (line !== null) await assertLine(before, line)
   change(work, actor, (deed) => {
     const { tx, at, by } = deed
     const row = openSheet(tx, place)
-    assertStatus(row, OPEN_STATUSES, 'comments are made before a sheet is issued')
-    if (!mayComment(actor)) throw new ForbiddenError('Readers do not comment.')
-    if (line !== null) assertLine(linesOf(row.content), line)
+    assertCommenting(row, actor)
+    assertSheetVersion(row, before.version)
     const id = randomUUID() as string
     insertComment(tx, { id, sheetId: row.id, line, text, at, by: by.accountId })
     noteOn(deed, row, 'sheet.commented', { line })

@@ -1,46 +1,76 @@
-import { DerivationDisagreementError } from '../../../shared/derivation/disagreement'
+import {
+  DerivationDisagreementError,
+  type DisagreementReason,
+} from '../../../shared/derivation/disagreement'
 import type { Sheet } from '../../../shared/schemas/sheet'
-import { composeSheet, derivationOf } from '../../../shared/sheet/compose-sheet'
-import { sheetTable } from '../../../shared/sheet/sheet-table'
 import { ConflictError } from '../../errors'
 import { toCsv } from '../../http/csv'
-import { createTypesetter, type Typesetter } from '../../typesetting/typesetter'
-import { typesetSheet } from '../../typesetting/typeset-sheet'
+import type { SentError } from '../../threads/task-messages'
+import { createTaskThread, plainError } from '../../threads/task-thread'
+import type { SheetTasks } from '../../typesetting/sheet-tasks'
+import { TypesettingError } from '../../typesetting/typesetting-error'
 
 /**
- * What needs the derivation or the typesetter. Both are large; this file is loaded when the first sheet
- * is made or read, and by nothing else.
+ * What needs the derivation or the typesetter. Both are large and take long, so they live in a thread
+ * of their own, which begins with the first sheet: nobody waits for the sheet of somebody else.
  */
 
-let kept: Typesetter | undefined
+const thread = createTaskThread<SheetTasks>(
+  new URL('../../typesetting/sheet-thread.ts', import.meta.url),
+  revived,
+)
 
-function typesetter(): Typesetter {
-  kept ??= createTypesetter()
-  return kept
+function revived(error: SentError): Error {
+  if (error.name === 'TypesettingError') return new TypesettingError(error.message)
+  if (error.name !== 'DerivationDisagreementError') return plainError(error)
+  const { lineNumber, lineId, reason, detail } = error.fields as unknown as Disagreement
+  return new DerivationDisagreementError(lineNumber, lineId, reason, detail)
+}
+
+interface Disagreement {
+  readonly lineNumber: string
+  readonly lineId: string
+  readonly reason: DisagreementReason
+  readonly detail: string
 }
 
 /** Documents that nobody changed since they were last asked for. */
 const MOST_KEPT = 6
-const documents = new Map<string, Buffer>()
+const documents = new Map<string, Promise<Buffer>>()
 
 /** A line that does not agree stops the sheet and names itself. */
-function agreeing<Result>(compose: () => Result): Result {
+async function agreeing<Result>(composed: Promise<Result>): Promise<Result> {
   try {
-    return compose()
+    return await composed
   } catch (error) {
     if (!(error instanceof DerivationDisagreementError)) throw error
     throw new ConflictError(`There is no sheet: ${error.message}`)
   }
 }
 
+/** Loads everything before somebody waits for it. */
+export async function warmComposing(): Promise<void> {
+  await thread.run('warm', null)
+}
+
+/** Ends the thread. */
+export async function stopComposing(): Promise<void> {
+  await thread.stop()
+}
+
 /** @throws ConflictError that names the line that does not agree. */
-export function assertDerives(sheet: Sheet): void {
-  agreeing(() => composeSheet(sheet))
+export async function assertDerives(sheet: Sheet): Promise<void> {
+  await agreeing(thread.run('check', sheet))
 }
 
 /** Numbers of the lines of a sheet, and the unrounded figure of each in its printed unit. */
-export function linesOf(sheet: Sheet): ReadonlyMap<string, number> {
-  return new Map(derivationOf(sheet).lines.map(({ number, result }) => [number, result.value]))
+export function linesOf(sheet: Sheet): Promise<ReadonlyMap<string, number>> {
+  return thread.run('lines', sheet)
+}
+
+async function setSheet(sheet: Sheet): Promise<Buffer> {
+  const { buffer, byteOffset, byteLength } = await agreeing(thread.run('pdf', sheet))
+  return Buffer.from(buffer, byteOffset, byteLength)
 }
 
 /**
@@ -48,28 +78,32 @@ export function linesOf(sheet: Sheet): ReadonlyMap<string, number> {
  *
  * @param key Names sheet, version and status; the same key gives the same bytes.
  */
-export function documentOf(key: string, sheet: Sheet): Buffer {
+export function documentOf(key: string, sheet: Sheet): Promise<Buffer> {
   const found = documents.get(key)
   if (found) return found
-  const pdf = agreeing(() => typesetSheet(typesetter(), sheet))
-  documents.set(key, pdf)
+  const made = setSheet(sheet)
+  documents.set(key, made)
+  // What could not be set is tried again.
+  made.catch(() => documents.delete(key))
   const [oldest] = documents.keys()
   if (documents.size > MOST_KEPT && oldest !== undefined) documents.delete(oldest)
-  return pdf
+  return made
 }
 
 /** How many pages a PDF of our typesetter has; it writes their number beside their root. */
 const PAGES = /\/Type \/Pages\s+\/Count (\d+)/
 
 /** The final document. */
-export function frozenDocument(sheet: Sheet): { readonly pdf: Buffer; readonly pages: number } {
-  const pdf = agreeing(() => typesetSheet(typesetter(), sheet))
+export async function frozenDocument(
+  sheet: Sheet,
+): Promise<{ readonly pdf: Buffer; readonly pages: number }> {
+  const pdf = await setSheet(sheet)
   const pages = Number(PAGES.exec(pdf.toString('latin1'))?.[1] ?? 0)
   if (pages === 0) throw new Error('a document without pages was set')
   return { pdf, pages }
 }
 
 /** The derivation as CSV. */
-export function tableOf(sheet: Sheet): string {
-  return agreeing(() => toCsv(sheetTable(sheet)))
+export async function tableOf(sheet: Sheet): Promise<string> {
+  return toCsv(await agreeing(thread.run('table', sheet)))
 }

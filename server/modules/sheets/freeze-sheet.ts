@@ -2,7 +2,8 @@ import { createHash, randomUUID } from 'node:crypto'
 import type { Sheet } from '../../../shared/schemas/sheet'
 import { digestText } from '../../../shared/sheet/sheet-digest'
 import { codeFrom } from '../../../shared/sheet/verification-code'
-import { codeBytes, composing, type SheetWork } from './sheet-work'
+import { frozenDocument } from './composing'
+import { codeBytes, type SheetWork } from './sheet-work'
 
 const sha256 = (bytes: string | Uint8Array) => createHash('sha256').update(bytes).digest('hex')
 
@@ -29,7 +30,7 @@ export async function freezeSheet(
   const digest = sha256(digestText(sheet))
   const address = new URL('/verify', appUrl).href
   const content = { ...sheet, verification: { code, address, digest } }
-  const { pdf, pages } = (await composing()).frozenDocument(content)
+  const { pdf, pages } = await frozenDocument(content)
   const fileId = randomUUID() as string
   await store.write(fileId, 'original', pdf)
   const file = { fileId, size: pdf.length, sha256: sha256(pdf) }

@@ -7,7 +7,8 @@ import { sendFile } from '../files/send-file'
 import { sheetAt } from './open-sheet'
 import { fileName, pdfOf } from './sheet-files.service'
 import { readChanges } from './sheet-record.service'
-import { composing, type SheetWork } from './sheet-work'
+import { tableOf } from './composing'
+import type { SheetWork } from './sheet-work'
 
 const ONE = '/api/projects/:projectId/sheets/:sheetId'
 
@@ -99,8 +100,7 @@ function dataOperations({ db }: SheetWork): readonly Operation[] {
       problems: ['conflict'],
       handle: async ({ req, res }) => {
         const row = sheetAt(db, placeOf(req))
-        const { tableOf } = await composing()
-        send(res, fileName(row, 'csv'), 'text/csv; charset=utf-8', tableOf(row.content))
+        send(res, fileName(row, 'csv'), 'text/csv; charset=utf-8', await tableOf(row.content))
       },
     }),
   ]

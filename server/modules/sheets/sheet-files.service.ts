@@ -1,6 +1,7 @@
 import type { SheetRow } from './sheets.queries'
 import { nameOf, sheetAt } from './open-sheet'
-import { composing, type SheetPlace, type SheetWork } from './sheet-work'
+import { documentOf } from './composing'
+import type { SheetPlace, SheetWork } from './sheet-work'
 
 /** A file on the disk that was frozen, or bytes that were just set. */
 export type SheetPdf =
@@ -31,8 +32,7 @@ export async function pdfOf(
   if (row.fileId !== null && !isMarked) {
     return { kind: 'frozen', id: row.fileId, checksum: row.fileSha256, name }
   }
-  const { documentOf } = await composing()
   const { id, version, status } = row
-  const bytes = documentOf(`${id} ${version} ${status}`, { ...row.content, status })
+  const bytes = await documentOf(`${id} ${version} ${status}`, { ...row.content, status })
   return { kind: 'made', bytes, name }
 }

@@ -20,8 +20,5 @@ export interface SheetPlace {
   readonly sheetId: string
 }
 
-/** Loads derivation and typesetter when they are first needed. */
-export const composing = () => import('./composing')
-
 /** Random bytes for a verification code. */
 export const codeBytes = () => randomBytes(12)

@@ -28,7 +28,8 @@ import {
 } from './open-sheet'
 import { dayIn, draftContent, sourced } from './sheet-content'
 import { nextNumber, nextRevision } from './sheet-numbers'
-import { composing, type SheetPlace, type SheetWork } from './sheet-work'
+import { assertDerives } from './composing'
+import type { SheetPlace, SheetWork } from './sheet-work'
 import {
   countSheets,
   findOwnSheetProject,
@@ -96,15 +97,16 @@ export async function createSheet(
   projectId: string,
   input: NewSheet,
 ): Promise<string> {
-  const { assertDerives } = await composing()
+  const { db, software } = work
+  openProject(db, projectId)
+  const { part, columns } = sourced(db, projectId, input)
+  const author = { accountId: actor.accountId, software, at: work.now() }
+  // Its number is taken when nothing can go wrong any more, so that none is left out.
+  const numbered = (number: string) => draftContent(db, projectId, input, { part, number, author })
+  await assertDerives(numbered('?'))
   return change(work, actor, (deed) => {
-    const { tx, at, by } = deed
-    openProject(tx, projectId)
-    const { part, columns } = sourced(tx, projectId, input)
-    const number = takeNumber(deed, projectId)
-    const author = { accountId: by.accountId, software: work.software, at }
-    const content = draftContent(tx, projectId, input, { part, number, author })
-    assertDerives(content)
+    openProject(deed.tx, projectId)
+    const content = numbered(takeNumber(deed, projectId))
     return insertDraft(deed, { projectId, actor, content, columns, previousId: null })
   })
 }
@@ -157,19 +159,14 @@ export async function changeSheet(
   place: SheetPlace,
   { version, source, ...words }: Change,
 ): Promise<void> {
-  const { assertDerives } = await composing()
+  const before = changeable(work.db, actor, place, version)
+  const fresh = source ? sourced(work.db, place.projectId, source) : null
+  const content = { ...before.content, ...words, ...fresh?.part }
+  if (fresh) await assertDerives(content)
   change(work, actor, (deed) => {
     const { tx, at, by } = deed
-    const row = openSheet(tx, place)
-    assertStatus(row, EDITABLE_STATUSES, 'only drafts and returned sheets change')
-    assertPreparer(row, actor)
-    assertSheetVersion(row, version)
-    const fresh = source ? sourced(tx, place.projectId, source) : null
-    const content = { ...row.content, ...words, ...fresh?.part }
-    if (fresh) {
-      assertDerives(content)
-      deleteMarks(tx, row.id)
-    }
+    const row = changeable(tx, actor, place, version)
+    if (fresh) deleteMarks(tx, row.id)
     const changed = { updatedAt: at, updatedBy: by.accountId, version: version + 1 }
     const { category } = content
     updateSheet(tx, row.id, { content, category, ...fresh?.columns, ...changed })
@@ -183,6 +180,15 @@ export async function changeSheet(
   })
 }
 
+/** The draft that somebody changes, as it was when they opened it. */
+function changeable(db: Db, actor: SignedIn, place: SheetPlace, version: number): SheetRow {
+  const row = openSheet(db, place)
+  assertStatus(row, EDITABLE_STATUSES, 'only drafts and returned sheets change')
+  assertPreparer(row, actor)
+  assertSheetVersion(row, version)
+  return row
+}
+
 /**
  * Begins the next revision from a frozen one: a draft with its inputs and words, computed anew.
  *
@@ -194,26 +200,28 @@ export async function reviseSheet(
   row: SheetRow,
   reason: string,
 ): Promise<string> {
-  const { assertDerives } = await composing()
+  const { timeZone } = openProject(work.db, row.projectId)
+  assertNewest(work.db, row)
+  const content: Sheet = {
+    ...row.content,
+    ...{ revision: nextRevision(row.revision), revisionReason: reason, status: 'draft' },
+    result: resultOf(row.content.case, row.content.gripShare),
+    people: { prepared: null, checked: null, approved: null },
+    ...{ checking: null, verification: null, software: work.software },
+    date: dayIn(timeZone, work.now()),
+  }
+  await assertDerives(content)
   return change(work, actor, (deed) => {
-    const { tx, at } = deed
-    const { timeZone } = openProject(tx, row.projectId)
-    const revisions = listRevisions(tx, row.projectId, row.number)
-    const newest = revisions.at(-1)!
-    if (newest.id !== row.id) {
-      throw new ConflictError(`${row.number}: revision ${newest.revision} is there already`)
-    }
-    const content: Sheet = {
-      ...row.content,
-      ...{ revision: nextRevision(row.revision), revisionReason: reason, status: 'draft' },
-      result: resultOf(row.content.case, row.content.gripShare),
-      people: { prepared: null, checked: null, approved: null },
-      ...{ checking: null, verification: null, software: work.software },
-      date: dayIn(timeZone, at),
-    }
-    assertDerives(content)
+    openProject(deed.tx, row.projectId)
+    assertNewest(deed.tx, row)
     const { lineId, scenarioId, scenarioVersion, place, projectId } = row
     const columns = { lineId, scenarioId, scenarioVersion, place }
     return insertDraft(deed, { projectId, actor, content, columns, previousId: row.id })
   })
+}
+
+function assertNewest(db: Db, row: SheetRow): void {
+  const newest = listRevisions(db, row.projectId, row.number).at(-1)!
+  if (newest.id === row.id) return
+  throw new ConflictError(`${row.number}: revision ${newest.revision} is there already`)
 }

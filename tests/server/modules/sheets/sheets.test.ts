@@ -8,8 +8,7 @@ import type { VerifiedFile, VerifiedSheet } from '../../../../shared/schemas/ver
 import { verifiedSheetSchema } from '../../../../shared/schemas/verification'
 import { digestText } from '../../../../shared/sheet/sheet-digest'
 import { readAttachment } from '../../../../server/typesetting/read-attachment'
-import { createTypesetter } from '../../../../server/typesetting/typesetter'
-import { typesetSheet } from '../../../../server/typesetting/typeset-sheet'
+import { frozenDocument } from '../../../../server/modules/sheets/composing'
 import { as, type Person, projectServer, type ProjectServer } from '../../../support/project-server'
 import { startedSheet, stepsOf } from '../../../support/sheets'
 
@@ -207,7 +206,7 @@ describe('a file that somebody holds', { timeout: 60_000 }, () => {
 
     const { content } = await read()
     const louder = { ...content, conditions: [], groundLevel: content.groundLevel! + 0.1 }
-    const tampered = await upload(server, typesetSheet(createTypesetter(), louder))
+    const tampered = await upload(server, (await frozenDocument(louder)).pdf)
     expect(tampered.answer).toBe('changed')
     expect(tampered.differences).toContainEqual({
       where: 'groundLevel',
@@ -217,7 +216,7 @@ describe('a file that somebody holds', { timeout: 60_000 }, () => {
     expect(tampered.differences.some(({ where }) => /^Page \d/.test(where))).toBe(true)
 
     const other = { ...content, verification: null }
-    expect(await upload(server, typesetSheet(createTypesetter(), other))).toEqual({
+    expect(await upload(server, (await frozenDocument(other)).pdf)).toEqual({
       ...{ answer: 'unknown', sheet: null, differences: [] },
     })
     expect((await upload(server, Buffer.from('no PDF at all'))).answer).toBe('unknown')
