@@ -74,7 +74,7 @@ export const orderAirSchema = z.strictObject({
     .meta({ unit: 'Pa', description: 'Below this it is topped up; null: none is enough' }),
   most: z.number().nullable().meta({
     unit: 'Pa',
-    description: 'Above this the fabric is at risk in the sun; null: strength not known',
+    description: 'Above this the fabric is at risk, also in the sun; null: strength not known',
   }),
 })
 
