@@ -1,4 +1,4 @@
-import type { ForecastListItem, RestingForecast } from '../schemas/forecast'
+import type { ForecastBand, ForecastListItem, RestingForecast } from '../schemas/forecast'
 
 /**
  * Whether what rests on a forecast issue still rests on the newest:
@@ -12,21 +12,37 @@ export type RestState = 'current' | 'newer-issue' | 'newer-observed' | 'gone'
 /** What the state rests on: an issue, its moment and its shift. */
 export type IssueOfGauge = Pick<ForecastListItem, 'id' | 'issuedAt' | 'shift'>
 
-/** The newest issue of a gauge: by moment of issue; the first of the list among equals. */
-export function newestIssue<Issue extends IssueOfGauge>(
-  issues: readonly Issue[],
-): Issue | undefined {
-  return issues.reduce<Issue | undefined>(
-    (newest, issue) => (newest && newest.issuedAt >= issue.issuedAt ? newest : issue),
-    undefined,
-  )
+/** An issue with the crest that a scenario takes over. */
+export type IssueWithCrest = IssueOfGauge & Pick<ForecastListItem, 'gaugeId' | 'crest'>
+
+/** State of what rests on an issue; `newest` is the newest of its gauge, if there is any. */
+export function restState(resting: RestingForecast, newest: IssueOfGauge | undefined): RestState {
+  if (!newest) return 'gone'
+  if (newest.id === resting.forecastId) {
+    return (newest.shift?.at ?? null) === resting.shiftedAt ? 'current' : 'newer-observed'
+  }
+  return newest.issuedAt >= resting.issuedAt ? 'newer-issue' : 'gone'
 }
 
-/** State of what rests on an issue; `issues` are all of its gauge, the newest first. */
-export function restState(resting: RestingForecast, issues: readonly IssueOfGauge[]): RestState {
-  const newest = newestIssue(issues)
-  if (newest && newest.id !== resting.forecastId) return 'newer-issue'
-  const own = issues.find(({ id }) => id === resting.forecastId)
-  if (!own) return 'gone'
-  return (own.shift?.at ?? null) === resting.shiftedAt ? 'current' : 'newer-observed'
+/** What a scenario takes over from an issue. */
+export interface TakenOver {
+  readonly forecast: RestingForecast
+  readonly waterLevel: number
+  readonly levelLow: number | null
+  readonly levelHigh: number | null
+}
+
+/**
+ * The crest of an issue as the level of a scenario, with its band; the scenario then rests on it.
+ *
+ * @returns null where the issue has no level, or not the band.
+ */
+export function takenOver(
+  { id, gaugeId, issuedAt, shift, crest }: IssueWithCrest,
+  band: ForecastBand,
+): TakenOver | null {
+  const waterLevel = crest?.[band] ?? null
+  if (crest === null || waterLevel === null) return null
+  const forecast = { gaugeId, forecastId: id, issuedAt, band, shiftedAt: shift?.at ?? null }
+  return { forecast, waterLevel, levelLow: crest.low, levelHigh: crest.high }
 }

@@ -54,22 +54,19 @@ export const forecastCallSchema = z.strictObject({
 })
 export type ForecastCall = z.output<typeof forecastCallSchema>
 
-const common = {
+/**
+ * `POST /api/projects/:projectId/gauges/:gaugeId/forecasts`: a call, from which the server draws the
+ * sketch, or readings from any other origin.
+ */
+export const newForecastSchema = z.strictObject({
+  origin: z.enum(FORECAST_ORIGINS),
   issuedAt: momentSchema,
   reference: z.enum(LEVEL_REFERENCES).default('siteLevel'),
+  call: forecastCallSchema.nullable().default(null),
+  readings: z.array(forecastReadingSchema).max(MOST_FORECAST_READINGS).default([]),
   observed: z.array(observedReadingSchema).max(MOST_FORECAST_READINGS).default([]),
   note: noteSchema.default(''),
-}
-
-/** `POST /api/projects/:projectId/gauges/:gaugeId/forecasts` */
-export const newForecastSchema = z.discriminatedUnion('origin', [
-  z.strictObject({ origin: z.literal('call'), ...common, call: forecastCallSchema }),
-  z.strictObject({
-    origin: z.enum(['typed', 'csv', 'waterml']),
-    ...common,
-    readings: z.array(forecastReadingSchema).min(1).max(MOST_FORECAST_READINGS),
-  }),
-])
+})
 export type NewForecast = z.output<typeof newForecastSchema>
 
 /** Highest level that is still to come, after the newest observed level has shifted it. */
@@ -117,6 +114,7 @@ export const forecastListItemSchema = forecastSchema
   .omit({ readings: true, observed: true, call: true, gauge: true })
   .extend({ readingCount: z.number().int(), observedCount: z.number().int() })
 export type ForecastListItem = z.output<typeof forecastListItemSchema>
+/** `GET …/gauges/:gaugeId/forecasts`, and `GET /api/projects/:projectId/forecasts` */
 export const forecastsSchema = z.strictObject({ forecasts: z.array(forecastListItemSchema) })
 
 /** `POST …/forecasts/:forecastId/observed`; a moment that is there already gets the new level. */

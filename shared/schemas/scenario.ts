@@ -1,4 +1,6 @@
 import { z } from 'zod'
+import { deploymentSettingsSchema } from './deployment'
+import { restingForecastSchema } from './forecast'
 import { sectionCaseSchema } from './section-case'
 import { CHECK_IDS, VERDICTS } from './section-result'
 
@@ -36,6 +38,8 @@ export type GroundAssumption = z.output<typeof groundAssumptionSchema>
 /** Everything that a scenario assumes; depth is always derived: level − ground. */
 export const scenarioContentSchema = z.strictObject({
   waterLevel: metres('Level that is checked, in the datum of the line'),
+  /** The issue that the level is the crest of; null: the level was entered. */
+  forecast: restingForecastSchema.nullable().default(null),
   levelNow: metres('Level at this moment').nullable().default(null),
   levelLow: metres('Low end of the band of the level').nullable().default(null),
   levelHigh: metres('High end of the band of the level').nullable().default(null),
@@ -52,6 +56,8 @@ export const scenarioContentSchema = z.strictObject({
   basis: parts.basis,
   rateOfRise: z.number().nullable().default(null).meta({ unit: 'm/s' }),
   timeToClear: z.number().default(1200).meta({ unit: 's' }),
+  /** The deployment plan as it is set; null: nobody has planned yet. */
+  deployment: deploymentSettingsSchema.nullable().default(null),
 })
 export type ScenarioContent = z.output<typeof scenarioContentSchema>
 

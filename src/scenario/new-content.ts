@@ -40,6 +40,7 @@ export function newContent(line: SurveyedLine, tubes: TubeBook): ScenarioContent
   const tube = BARRIERS.find(({ diameter }) => diameter > FIRST_DEPTH * 1.5) ?? BARRIERS.at(-1)!
   return {
     waterLevel: Number((lowest.groundLevel + FIRST_DEPTH).toFixed(3)),
+    forecast: null,
     levelNow: null,
     levelLow: null,
     levelHigh: null,
@@ -62,5 +63,6 @@ export function newContent(line: SurveyedLine, tubes: TubeBook): ScenarioContent
     basis: 'global-1.5',
     rateOfRise: null,
     timeToClear: INITIAL_VALUES.clearTime!,
+    deployment: null,
   }
 }

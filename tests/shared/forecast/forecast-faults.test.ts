@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest'
 import { forecastFaults, observedFaults } from '../../../shared/forecast/forecast-faults'
-import { newestIssue, restState } from '../../../shared/forecast/rests-on'
+import { restState, takenOver } from '../../../shared/forecast/rests-on'
+import type { ForecastReading } from '../../../shared/schemas/forecast'
 
 const HOUR = 3_600_000
 const issuedAt = Date.UTC(2031, 2, 3, 21, 45)
@@ -12,7 +13,7 @@ const readings = [0, 1, 2].map((hour) => ({
 }))
 const paths = (change: Partial<Parameters<typeof forecastFaults>[0]>) =>
   forecastFaults({ readings, observed: [], issuedAt, ...change }).map(({ path }) => path)
-const changed = (index: number, change: Partial<(typeof readings)[number]>) =>
+const changed = (index: number, change: Partial<ForecastReading>) =>
   readings.map((reading, i) => (i === index ? { ...reading, ...change } : reading))
 
 describe('the readings of an issue', () => {
@@ -58,21 +59,40 @@ describe('what rests on an issue', () => {
   }
 
   it('is current while the issue is the newest', () => {
-    expect(restState(resting, [old])).toBe('current')
+    expect(restState(resting, old)).toBe('current')
   })
 
-  it('is older where a newer issue is there, however it came', () => {
-    expect(restState(resting, [old, fresh])).toBe('newer-issue')
-    expect(newestIssue([old, fresh])).toBe(fresh)
+  it('is older where a newer issue is there', () => {
+    expect(restState(resting, fresh)).toBe('newer-issue')
   })
 
   it('is older where an observed level shifted the issue since', () => {
     const shifted = { ...old, shift: { at: issuedAt + HOUR, shift: 0.05 } }
-    expect(restState(resting, [shifted])).toBe('newer-observed')
-    expect(restState({ ...resting, shiftedAt: issuedAt + HOUR }, [shifted])).toBe('current')
+    expect(restState(resting, shifted)).toBe('newer-observed')
+    expect(restState({ ...resting, shiftedAt: issuedAt + HOUR }, shifted)).toBe('current')
   })
 
-  it('says when the issue is gone', () => {
-    expect(restState(resting, [])).toBe('gone')
+  it('says when the issue is gone, whether or not an older one is left', () => {
+    expect(restState(resting, undefined)).toBe('gone')
+    expect(restState(resting, { ...old, id: 'z', issuedAt: issuedAt - HOUR })).toBe('gone')
+  })
+})
+
+describe('taking over an issue', () => {
+  const crest = { time: issuedAt, expected: 3.42, low: 3.3, high: null, isReached: true }
+  const issue = { id: 'a', gaugeId: 'g', issuedAt, shift: { at: issuedAt, shift: 0.02 }, crest }
+
+  it('makes its crest the level, with the band beside it', () => {
+    expect(takenOver(issue, 'low')).toEqual({
+      forecast: { gaugeId: 'g', forecastId: 'a', issuedAt, band: 'low', shiftedAt: issuedAt },
+      waterLevel: 3.3,
+      levelLow: 3.3,
+      levelHigh: null,
+    })
+  })
+
+  it('is not possible with a band, or a level, that is not there', () => {
+    expect(takenOver(issue, 'high')).toBeNull()
+    expect(takenOver({ ...issue, crest: null }, 'expected')).toBeNull()
   })
 })
