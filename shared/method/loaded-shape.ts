@@ -1,7 +1,7 @@
 import { loadedShape, type StandingShape } from '../calc/loaded-shape/loaded-shape'
-import { seatPressure } from '../calc/loaded-shape/seat-pressure'
 import { freeSkirt } from '../calc/loaded-shape/free-skirt'
 import { evaluateSection } from '../checks/evaluate-section'
+import { seatCheck } from '../checks/seat-check'
 import { exampleSection } from '../verification/example-section'
 import { worked, type Given, type MethodSection } from './formula'
 import { symbol, SYMBOLS } from './symbols'
@@ -139,27 +139,34 @@ export const LOADED_SHAPE: MethodSection = {
       title: 'Pressure in the void under the lifted skirt',
       tex: [
         tex`\cos\varphi = \left(1 - \frac{y}{h}\right)^2 + \frac{2\,u\,y}{\rho g h^2}, \qquad \text{arc under the weld of radius } \frac{T}{p - u}`,
+        tex`u_m = u_s \left(1 + \frac{m g}{p\,c}\right), \qquad \text{the tube gives way} \iff u_p > u_m`,
       ],
       symbols: [
         symbol('u', 'Pressure in the void', 'Pa'),
         symbol('u_s', 'Seat pressure: the u at which the contact vanishes', 'Pa'),
+        symbol('u_m', 'The same with the own weight of the tube on the seat', 'Pa'),
+        symbol('c', 'Contact width, drained', 'm'),
+        symbol('u_p', 'Uplift at the point at which the skirt peels off', 'Pa'),
       ],
       assumptions: [
-        'A skirt that leaks over a seat that seals is not safe: where the uplift at the point at which the skirt peels off is larger than u_s, the tube gives way. It is a figure to judge by; no check uses it.',
+        'A skirt that leaks over a seat that seals is not safe. Where the uplift at the point at which the skirt peels off is larger than the seat bears, the tube gives way: the part “Air” of the cross-section then comes to the front and says so.',
+        'The membrane has no weight, so in a film of water it has no contact and bears nothing; there the own weight keeps the seat. It is counted to first order: it rests on the same seat as p c, the weight of the water on tube and lifted skirt.',
+        'It is no check and no part of holds-to. On level ground without water on the dry side, with the even or the developing uplift and friction up to 0.9, no section that meets all its checks loses its seat: sliding, flotation or skirt pull fail first (a property test draws them). With the deep uplift, on a slope, and above all with water standing on the dry side, for which the loaded shape is not derived, it can: then it is a warning beside checks that are met.',
       ],
       source: 'membrane theory, derived',
       tag: 'derived',
       worked: worked(TUBE, (x) => {
-        const seat = seatPressure({
-          shape: standing(x),
-          diameter: x.D,
-          airPressure: x.p,
-          depth: x.h,
-          unitWeight: 9810,
+        const section = exampleSection({
+          barrier: { diameter: x.D, airPressure: x.p, skirtLength: x.L },
+          water: { depth: x.h },
         })
+        const seat = seatCheck(section)
+        const head = section.water.density * section.gravity * x.h
         return [
-          ['u_s', seat?.pressure ?? 0, 'Pa'],
-          [tex`u_s/(\rho g h)`, seat?.ratio ?? 0, '–'],
+          ['u_s', seat?.limit ?? 0, 'Pa'],
+          [tex`u_s/(\rho g h)`, (seat?.limit ?? 0) / head, '–'],
+          ['u_m', seat?.limitWithWeight ?? head, 'Pa'],
+          ['u_p', seat?.atPeel ?? 0, 'Pa'],
         ]
       }),
     },

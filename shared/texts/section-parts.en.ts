@@ -54,6 +54,7 @@ export const sectionPartTexts = {
   },
   air: {
     now: '{air}; {seal} keep the seat closed',
+    seatGone: '{air}; a leaking skirt over a sealed seat lets the tube give way',
     cold: {
       holds: '{air} of {seal}; coldest hour {cold}, enough',
       asNow: '{air} of {seal}; coldest hour {cold}',
@@ -65,6 +66,7 @@ export const sectionPartTexts = {
     },
     least: 'Minimum air pressure at this water',
     seat: 'Pressure under the lifted skirt that the seat bears',
+    seatWeighed: 'The same with its own weight on it',
     seatAny: 'the whole head',
     there: 'What the uplift model has there',
     seatNote:

@@ -5,12 +5,8 @@ import {
   timeToPressure,
   type LinkedAir,
 } from '@shared/calc/air/linked-air'
-import { loadedShape } from '@shared/calc/loaded-shape/loaded-shape'
-import { seatPressure } from '@shared/calc/loaded-shape/seat-pressure'
 import { breachFlow } from '@shared/calc/moving-water/breach-flow'
-import { sectionGeometry } from '@shared/calc/section/section-geometry'
-import { upliftShare } from '@shared/calc/uplift/uplift-share'
-import type { SectionCase } from '@shared/schemas/section-case'
+import { seatCheck, type SeatCheck } from '@shared/checks/seat-check'
 import { leastAirPressure } from '@/quick-check/before-water'
 import { figure, said, type PartGroup, type PartInput, type PartRow } from './part'
 
@@ -21,7 +17,7 @@ export function airPart(input: PartInput): readonly PartGroup[] {
 
 function seatGroup({ section }: PartInput): PartGroup {
   const least = leastAirPressure(section)?.least ?? null
-  const seat = seatOf(section)
+  const seat = seatCheck(section)
   const rows: PartRow[] = []
   if (least !== null) {
     const isWarning = section.barrier.airPressure < least
@@ -31,49 +27,30 @@ function seatGroup({ section }: PartInput): PartGroup {
       isWarning,
     })
   }
-  if (seat) {
-    const isWarning = seat.borne !== null && seat.there > seat.borne
-    rows.push(
-      {
-        name: said('sectionDetails.part.air.seat'),
-        value:
-          seat.borne === null
-            ? said('sectionDetails.part.air.seatAny')
-            : figure(seat.borne, 'pressure', 'down'),
-      },
-      {
-        name: said('sectionDetails.part.air.there'),
-        value: figure(seat.there, 'pressure', 'up'),
-        isWarning,
-      },
-    )
-    return {
-      title: null,
-      fields: [],
-      rows,
-      notes: [
-        said(isWarning ? 'sectionDetails.part.air.seatLost' : 'sectionDetails.part.air.seatNote'),
-      ],
-    }
+  if (!seat) return { title: null, fields: [], rows, notes: [] }
+  const note = seat.givesWay ? 'seatLost' : 'seatNote'
+  return {
+    title: null,
+    fields: [],
+    rows: [...rows, ...seatRows(seat)],
+    notes: [said(`sectionDetails.part.air.${note}`)],
   }
-  return { title: null, fields: [], rows, notes: [] }
 }
 
-/** The pressure in the void under the lifted skirt that the seat bears, and what the uplift model has there [Pa]. */
-export function seatOf(
-  section: SectionCase,
-): { readonly borne: number | null; readonly there: number } | null {
-  const { barrier, water, uplift } = section
-  const { unitWeight, depth, edgeDepth, wettedSkirt, base } = sectionGeometry(section)
-  if (barrier.skirtLength === 0 || depth === 0) return null
-  const { diameter, airPressure } = barrier
-  const tube = { diameter, airPressure, depth, unitWeight }
-  const shape = loadedShape({ ...tube, wettedSkirt })
-  if (!shape.solved) return null
-  const share = upliftShare(uplift, base, wettedSkirt - shape.freeSkirt)
-  const excess = uplift.edgeFactor * edgeDepth - water.dryDepth
-  const there = uplift.model === 'none' ? 0 : unitWeight * (water.dryDepth + excess * share)
-  return { borne: seatPressure({ ...tube, shape })?.pressure ?? null, there }
+function seatRows({ limit, limitWithWeight, atPeel, givesWay }: SeatCheck): readonly PartRow[] {
+  const bears = (pressure: number | null): PartRow['value'] =>
+    pressure === null
+      ? said('sectionDetails.part.air.seatAny')
+      : figure(pressure, 'pressure', 'down')
+  return [
+    { name: said('sectionDetails.part.air.seat'), value: bears(limit) },
+    { name: said('sectionDetails.part.air.seatWeighed'), value: bears(limitWithWeight) },
+    {
+      name: said('sectionDetails.part.air.there'),
+      value: figure(atPeel, 'pressure', 'up'),
+      isWarning: givesWay,
+    },
+  ]
 }
 
 function linkedGroup(input: PartInput): PartGroup {

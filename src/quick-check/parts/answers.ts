@@ -1,3 +1,4 @@
+import { seatCheck } from '@shared/checks/seat-check'
 import type { Message } from '@shared/texts/format-text'
 import { atTemperature } from '@/quick-check/before-water'
 import { outcomeOf } from '@/quick-check/hour-notes'
@@ -64,6 +65,8 @@ function airAnswer({ section, evaluation, values }: PartInput): Message {
     air: quantity(section.barrier.airPressure, 'pressure'),
     seal: quantity(seal, 'pressure', 'up'),
   }
+  if (evaluation.verdict !== 'fails' && seatCheck(section)?.givesWay)
+    return said('sectionDetails.part.air.seatGone', named)
   if (values.filledAt === null || values.coldest === null)
     return said('sectionDetails.part.air.now', named)
   const cold = atTemperature(section, values.filledAt, values.coldest)

@@ -1,6 +1,7 @@
 import { evaluateSection } from '@shared/checks/evaluate-section'
 import { bend } from '@shared/calc/line/bend'
 import { isWorse } from '@shared/checks/compare'
+import { seatCheck } from '@shared/checks/seat-check'
 import { LARGEST_CLOSURE_TURN } from '@shared/catalogue/joints'
 import type { SectionCase } from '@shared/schemas/section-case'
 import { hourNotes } from '@/quick-check/hour-notes'
@@ -48,8 +49,14 @@ export function frontPart(input: PartInput): PartId | null {
     const best = mostGained(section, now, LOADS) ?? mostGained(section, now, EDGE)
     if (best) return best
   }
+  if (verdict !== 'fails' && losesSeat(section)) return 'air'
   if (verdict !== 'fails' && hourNotes(section, evaluation, values).length > 0) return 'air'
   return opensTooFar(input) ? 'bends' : null
+}
+
+/** True where a skirt that leaks over a seat that seals would let the tube give way. */
+function losesSeat(section: SectionCase): boolean {
+  return seatCheck(section)?.givesWay ?? false
 }
 
 function mostGained(

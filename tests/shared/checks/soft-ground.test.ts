@@ -6,7 +6,7 @@ import { evaluateSection } from '../../../shared/checks/evaluate-section'
 import { justEnough } from '../../../shared/checks/just-enough'
 import { seatCheck } from '../../../shared/checks/seat-check'
 import { OutOfRangeError } from '../../../shared/errors'
-import type { SectionCase } from '../../../shared/schemas/section-case'
+import type { SectionCase, UpliftModel } from '../../../shared/schemas/section-case'
 import { exampleSection } from '../../../shared/verification/example-section'
 import { expectClose } from '../../support/close-to'
 
@@ -70,7 +70,7 @@ describe('void pressure under the lifted skirt', () => {
     expect(long.limit!).toBeCloseTo(2481.125576, 4)
     expect(long.givesWay).toBe(false)
     const short = seatCheck(exampleSection({ barrier: { skirtLength: 0.3 } }))!
-    expect(short.atPeel).toBeGreaterThan(short.limit!)
+    expect(short.atPeel).toBeGreaterThan(short.limitWithWeight!)
     expect(short.givesWay).toBe(true)
   })
 
@@ -78,6 +78,56 @@ describe('void pressure under the lifted skirt', () => {
     expect(seatCheck(exampleSection({ water: { depth: 0 } }))).toBeNull()
     expect(seatCheck(exampleSection({ water: { depth: 0.9 } }))).toBeNull()
     expect(seatCheck(exampleSection({ uplift: { model: 'none' } }))!.atPeel).toBe(0)
+    const bare = { barrier: { skirtLength: 0 }, water: { depth: 0 } }
+    expect(seatCheck(exampleSection(bare))).toBeNull()
+  })
+
+  it('falls evenly to the dry toe, as the uplift does', () => {
+    // By hand: ρ g (h_d + (η h − h_d)(1 − L_f/B)) with the flat skirt L_f = L − free skirt.
+    const section = exampleSection({ water: { dryDepth: 0.1 }, uplift: { edgeFactor: 0.8 } })
+    const { loadedShape: shape } = evaluateSection(section)
+    if (!shape.solved) throw new Error('stands')
+    const left = 1 - (2.2 - shape.freeSkirt) / 2.32
+    expectClose(seatCheck(section)!.atPeel, 9810 * (0.1 + (0.8 * 0.55 - 0.1) * left), 1e-12)
+  })
+
+  it('counts the own weight: it rests on the same seat as p × contact', () => {
+    const { limit, limitWithWeight } = seatCheck(exampleSection())!
+    const { loadedShape: shape } = evaluateSection(exampleSection())
+    if (!shape.solved) throw new Error('stands')
+    expectClose(limitWithWeight! / limit! - 1, (4.8 * 9.81) / (15_000 * shape.contact), 1e-12)
+    // In a film of water a weightless tube bears nothing, and its weight everything.
+    const film = seatCheck(exampleSection({ water: { depth: 0.01 } }))!
+    expect(film.atPeel).toBeGreaterThan(film.limit!)
+    expect(film.limitWithWeight).toBeNull()
+    expect(film.givesWay).toBe(false)
+  })
+
+  it('never takes the seat of a section on level, dry ground that meets its checks', () => {
+    const share = fc.double({ min: 0, max: 1, noNaN: true })
+    const drawn = fc.tuple(share, share, share, share, share, share, share, share)
+    const model = fc.constantFrom<UpliftModel>('linear', 'developing')
+    fc.assert(
+      fc.property(drawn, model, ([a, b, c, d, e, f, g, h], name) => {
+        const diameter = 0.3 + 1.2 * a
+        const section = exampleSection({
+          barrier: {
+            diameter,
+            skirtLength: diameter * (0.3 + 5 * b),
+            contactWidth: 0.3 * diameter * c,
+            mass: 2 + 7 * diameter ** 2 * (0.5 + d),
+            airPressure: 5000 + 40_000 * e,
+          },
+          ground: { friction: 0.2 + 0.7 * f },
+          uplift: { model: name, edgeFactor: g, diffusivity: 10 ** (3 * c - 6), time: 1e5 * d },
+          water: { depth: diameter * (0.005 + 0.995 * h) },
+          requiredFreeboard: 0,
+        })
+        if (evaluateSection(section).verdict === 'fails') return
+        expect(seatCheck(section)?.givesWay ?? false).toBe(false)
+      }),
+      { numRuns: 1500 },
+    )
   })
 })
 

@@ -80,6 +80,15 @@ describe('the part that governs', () => {
     expect(front({ airPressure: 900, edgeFactor: 0 })).toBe('air')
   })
 
+  it('is the air where the checks are met and a leaking skirt would take the seat', () => {
+    const pond = { depth: 0.2, dryDepth: 0.06 }
+    expect(given(pond).evaluation.verdict).toBe('holds')
+    expect(front(pond)).toBe('air')
+    expect(answer('air', pond)).toContain('lets the tube give way')
+    expect(notes('air', pond).join(' ')).toContain('although the checks are met')
+    expect(front({ ...pond, dryDepth: 0 })).toBeNull()
+  })
+
   it('is the bend where both sections beside it fail and the straight line holds', () => {
     expect(front({ depth: 0.485, turn: 1.4 })).not.toBe('bends')
     expect(front({ depth: 0.45, requiredFreeboard: 0.1, turn: 1.5, sectionLength: 3 })).toBe('edge')
