@@ -110,6 +110,15 @@ export const sheetSchema = z
       .max(1)
       .default(1)
       .meta({ description: 'Share of the friction that bends leave' }),
+    /** Bends beside the section, from which that share follows; null: none. */
+    bends: z
+      .strictObject({
+        turnAtStart: z.number().meta({ unit: 'rad' }),
+        turnAtEnd: z.number().meta({ unit: 'rad' }),
+        sectionLength: z.number().positive().meta({ unit: 'm' }),
+      })
+      .nullable()
+      .default(null),
     leave: z
       .strictObject({
         rateOfRise: z.number().min(0).nullable().default(null).meta({ unit: 'm/s' }),

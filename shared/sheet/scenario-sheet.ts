@@ -1,9 +1,10 @@
 import { groundLevelAt, lineSections, surfaceAt } from '../calc/line/line-sections'
-import { gripShareOf } from '../checks/bend-loss'
+import { type Bends, gripShareBeside } from '../checks/bend-loss'
 import { evaluateSection } from '../checks/evaluate-section'
 import { holdingProfile, holdsToAt } from '../checks/holds-to'
 import { justEnough } from '../checks/just-enough'
 import { assumptionOf, caseAt, sizeAt } from '../checks/place-case'
+import { isTurnTooSharp } from '../catalogue/joints'
 import { OutOfRangeError, showValue } from '../errors'
 import type { Survey } from '../schemas/line-faults'
 import type { ScenarioContent } from '../schemas/scenario'
@@ -19,7 +20,15 @@ const SAME_PLACE = 1e-6
 /** What a sheet takes from a scenario; everything in it is computed here. */
 export type ScenarioPart = Pick<
   Sheet,
-  'case' | 'result' | 'gripShare' | 'groundLevel' | 'barrier' | 'surface' | 'leave' | 'line'
+  | 'case'
+  | 'result'
+  | 'gripShare'
+  | 'bends'
+  | 'groundLevel'
+  | 'barrier'
+  | 'surface'
+  | 'leave'
+  | 'line'
 >
 
 /** Where a section lies and what it rests on, in words. */
@@ -58,16 +67,22 @@ export function scenarioPart(
   const groundLevel = groundLevelAt(stations, place)
   const run = sizeAt(content, (section.from + section.to) / 2)
   if (!run) throw refused(place, 'a chainage at which the scenario lays a tube')
+  const { turnAtStart, turnAtEnd } = section
+  if (isTurnTooSharp(turnAtStart) || isTurnTooSharp(turnAtEnd)) {
+    throw refused(place, 'a chainage beside turns that closures can make')
+  }
   const ground = assumptionOf(content, surface)
   if (!ground) throw refused(place, 'a chainage on ground that the scenario knows')
   const at = caseAt(content, { chainage: place, groundLevel, surface }, run, ground)
   const faults = sectionFaults(at)
   if (faults.length > 0) throw new OutOfRangeError(faults)
-  const gripShare = gripShareOf(section, run.barrier.skirtLength, sectionLength)
+  const bends =
+    turnAtStart === 0 && turnAtEnd === 0 ? null : { turnAtStart, turnAtEnd, sectionLength }
+  const gripShare = gripShareBeside(bends)(run.barrier.skirtLength)
   return {
     case: at,
-    result: resultOf(at, gripShare),
-    ...{ gripShare, groundLevel, surface, barrier: run.barrier.name },
+    result: resultOf({ case: at, gripShare, bends }),
+    ...{ gripShare, bends, groundLevel, surface, barrier: run.barrier.name },
     leave: { rateOfRise: content.rateOfRise, timeToClear: content.timeToClear },
     line: {
       name: line.name,
@@ -79,12 +94,19 @@ export function scenarioPart(
   }
 }
 
-/** The whole answer for one section with the grip that bends leave. */
-export function resultOf(section: SectionCase, gripShare: number): SectionResult {
+interface Checked {
+  readonly case: SectionCase
+  readonly gripShare: number
+  /** Bends that leave that share; null: none, or not known. */
+  readonly bends: Bends | null
+}
+
+/** The whole answer for one section with the grip that bends leave, as the workbench has it. */
+export function resultOf({ case: section, gripShare, bends }: Checked): SectionResult {
   const { workings: _, ...evaluation } = evaluateSection(section, gripShare)
   return {
     ...evaluation,
-    justEnough: justEnough(section),
+    justEnough: justEnough(section, bends ? gripShareBeside(bends) : () => gripShare),
     holdsTo: holdsToAt(holdingProfile(section, gripShare), section.water.depth),
   }
 }

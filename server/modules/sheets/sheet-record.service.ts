@@ -76,7 +76,7 @@ function rightsOf(db: Db, row: SheetRow, actor: SignedIn): SheetRecord['may'] {
 
 /** What the engine of today says of the inputs of a sheet. */
 function driftOf({ software }: SheetWork, { content }: SheetRow): SheetRecord['drift'] {
-  const now = resultOf(content.case, content.gripShare)
+  const now = resultOf(content)
   return { software, differences: [...resultDifferences(content.result, now)] }
 }
 

@@ -205,7 +205,7 @@ export async function reviseSheet(
   const content: Sheet = {
     ...row.content,
     ...{ revision: nextRevision(row.revision), revisionReason: reason, status: 'draft' },
-    result: resultOf(row.content.case, row.content.gripShare),
+    result: resultOf(row.content),
     people: { prepared: null, checked: null, approved: null },
     ...{ checking: null, verification: null, software: work.software },
     date: dayIn(timeZone, work.now()),
