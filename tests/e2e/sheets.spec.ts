@@ -3,7 +3,7 @@ import { signInAs } from './support/people'
 import { FERRY_QUAY } from '../../server/demo/ferry-quay'
 
 /** A sheet is derived twice before it is shown, and set when it is approved. */
-const SLOW = { timeout: 20_000 }
+const SLOW = { timeout: 60_000 }
 
 async function asSomebody(browser: Browser, name: string, path: string): Promise<Page> {
   const page = await (await browser.newContext()).newPage()

@@ -4,9 +4,13 @@ import { expect, type Page } from '@playwright/test'
 export async function signInAs(page: Page, name: string, path: string): Promise<void> {
   await page.goto(path)
   await expect(page).toHaveURL(/\/sign-in\?next=/)
+  const answered = page.waitForResponse(
+    (answer) => answer.url().endsWith('/api/session') && answer.request().method() === 'POST',
+  )
   await page.getByRole('button', { name: new RegExp(`^${name}`) }).click()
+  expect((await answered).status(), `${name} signs in`).toBe(200)
   // The page is loaded with its area before the address changes.
-  await expect(page).toHaveURL(path, { timeout: 20_000 })
+  await expect(page).toHaveURL(path, { timeout: 30_000 })
 }
 
 export async function signOut(page: Page): Promise<void> {
