@@ -2,6 +2,7 @@ import { lineSections } from '../calc/line/line-sections'
 import { isInRange, rangeFault, showValue, type AllowedRange, type Fault } from '../errors'
 import { caseAt, sizeAt } from '../checks/place-case'
 import { STATION_RANGES } from './station-ranges'
+import { deploymentFaults } from './deployment-faults'
 import type { Survey } from './line-faults'
 import type { GroundAssumption, ScenarioContent, SizeRun } from './scenario'
 import { sectionFaults } from './section-faults'
@@ -42,6 +43,7 @@ function ownFaults(content: ScenarioContent, { stations, sectionLength }: Survey
     ...faultOutside('place', content.place, place),
     ...faultOutside('rateOfRise', content.rateOfRise, RATE_OF_RISE),
     ...faultOutside('timeToClear', content.timeToClear, TIME_TO_CLEAR),
+    ...deploymentFaults(content.deployment, place),
   ]
 }
 
