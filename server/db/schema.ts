@@ -70,6 +70,7 @@ export const meta = sqliteTable('meta', {
 
 export * from './tables/accounts'
 export * from './tables/depots'
+export * from './tables/forecasts'
 export * from './tables/orders'
 export * from './tables/projects'
 export * from './tables/sheets'

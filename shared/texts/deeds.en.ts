@@ -18,6 +18,11 @@ export const deedsTexts = {
       removed: 'removed the depot',
     },
     file: { added: 'added the file', changed: 'changed the file', deleted: 'deleted the file' },
+    forecast: {
+      created: 'entered a forecast for the gauge',
+      deleted: 'removed a forecast of the gauge',
+      observed: 'entered what was observed at the gauge',
+    },
     gauge: {
       changed: 'changed the gauge',
       created: 'made the gauge',
@@ -43,6 +48,7 @@ export const deedsTexts = {
       removed: 'removed the member',
       'role-changed': 'changed the role of the member',
     },
+    order: { issued: 'issued the order', withdrawn: 'withdrew the order' },
     organisation: { created: 'added the organisation', renamed: 'renamed the organisation' },
     'password-reset': { requested: 'asked for a new password', used: 'chose a new password' },
     person: {

@@ -100,7 +100,8 @@ export function removeGauge(work: ProjectWork, actor: Doer, place: GaugePlace): 
   })
 }
 
-function gaugeAt(db: Db, { projectId, gaugeId }: GaugePlace): Gauge {
+/** @throws NotFoundError for a gauge that is not in the project. */
+export function gaugeAt(db: Db, { projectId, gaugeId }: GaugePlace): Gauge {
   const gauge = findGauge(db, projectId, gaugeId)
   if (!gauge) throw new NotFoundError(`gauge: "${gaugeId}" does not exist in this project`)
   return gauge

@@ -36,7 +36,9 @@ export function copyLine(
   const background = to.projectId === from.projectId ? line.background : null
   const id = makeLine(deed, to.projectId, { ...line, background, name: to.name })
   for (const text of listScenarioContents(deed.tx, line.id)) {
-    makeScenario(deed, { ...line, id }, text)
+    // A forecast belongs to a gauge of the other project.
+    const forecast = to.projectId === from.projectId ? (text.content.forecast ?? null) : null
+    makeScenario(deed, { ...line, id }, { ...text, content: { ...text.content, forecast } })
   }
   return id
 }
