@@ -8,6 +8,7 @@ import { healthOperations } from './modules/health/health.routes'
 import { invitationsOperations } from './modules/invitations/invitations.routes'
 import { mailsOperations } from './modules/mails/mails.routes'
 import { openapiOperations } from './modules/openapi/openapi.routes'
+import { ordersOperations } from './modules/orders/orders.routes'
 import { organisationsOperations } from './modules/organisations/organisations.routes'
 import { passwordResetsOperations } from './modules/password-resets/password-resets.routes'
 import { peopleOperations } from './modules/people/people.routes'
@@ -44,6 +45,7 @@ export function allOperations(
     ...projectOperations(parts),
     ...sheetsOperations(sheetWork),
     ...verificationOperations(sheetWork),
+    ...ordersOperations(parts),
   ]
   return [...operations, ...openapiOperations(version, operations)]
 }

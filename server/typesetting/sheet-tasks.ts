@@ -2,6 +2,7 @@ import type { Sheet } from '../../shared/schemas/sheet'
 import { composeSheet, derivationOf } from '../../shared/sheet/compose-sheet'
 import { sheetTable } from '../../shared/sheet/sheet-table'
 import { createTypesetter, type Typesetter } from './typesetter'
+import { typesetOrder, type IssuedOrder } from './typeset-order'
 import { typesetSheet } from './typeset-sheet'
 
 /** What is done to sheets in a thread of their own. */
@@ -24,6 +25,8 @@ export function sheetTasks() {
       new Map(derivationOf(sheet).lines.map(({ number, result }) => [number, result.value])),
     /** @throws DerivationDisagreementError; TypesettingError */
     pdf: (sheet: Sheet): Uint8Array => Uint8Array.from(typesetSheet(typesetter(), sheet)),
+    /** @throws TypesettingError */
+    order: (issued: IssuedOrder): Uint8Array => Uint8Array.from(typesetOrder(typesetter(), issued)),
     /** @throws DerivationDisagreementError */
     table: (sheet: Sheet) => sheetTable(sheet),
   }

@@ -1,6 +1,7 @@
 import { laidSections, layoutBill } from '../checks/layout/layout-bill'
 import { checkLine, type LineAnswer } from '../checks/line-check'
 import { waterWays } from '../checks/water-ways'
+import { OutOfRangeError } from '../errors'
 import type { DeploymentPlan } from '../schemas/deployment'
 import { orderSchema, type Order } from '../schemas/order'
 import { orderAir } from './order-air'
@@ -16,11 +17,12 @@ export const ROUND_EVERY = 1800
  * What a deployment order says: scenario, layout and plan computed once more, here, and put into the
  * order of the work. Same input, same order.
  *
- * @throws ZodError where nothing at all is laid.
+ * @throws OutOfRangeError where nothing at all is laid.
  */
 export function buildOrder(input: OrderInput): Order {
   const { head, survey, content, gauge, resting, plan } = input
   const laid = laidSections(survey, content)
+  if (laid.every(({ run }) => run === null)) throw nothingLaid()
   const answer = checkLine(survey, content)
   const { sectionLength } = survey
   const answers = answer.sections
@@ -40,6 +42,12 @@ export function buildOrder(input: OrderInput): Order {
     leave: { ...leave, stage: leave.level === null ? null : staged(leave.level, gauge).stage },
     rounds: { every: ROUND_EVERY },
   })
+}
+
+function nothingLaid(): OutOfRangeError {
+  const allowed = 'a size on one section of the line or more'
+  const message = `content.sizes: no section is laid; it must be ${allowed}`
+  return new OutOfRangeError([{ path: 'content.sizes', value: [], allowed, unit: '–', message }])
 }
 
 function verdictOf({ verdict, weakest }: LineAnswer, gauge: OrderInput['gauge']) {

@@ -34,8 +34,8 @@ export const newOrderSchema = z.strictObject({
 })
 export type NewOrder = z.output<typeof newOrderSchema>
 
-/** What a tick is about: a section by its position, a plug, or a step. */
-export const tickItemSchema = z.string().regex(/^(?:section|plug|step|round)-[1-9]\d{0,3}$/)
+/** What a tick is about: a section or a plug, by its place in the order. */
+export const tickItemSchema = z.string().regex(/^(?:section|plug)-[1-9]\d{0,3}$/)
 
 /** A tick as a phone sends it, again and again until it is taken. */
 export const newTickSchema = z.strictObject({

@@ -15,6 +15,7 @@ import { type Access, mountOperations } from '../../server/http/mount-operations
 import type { SignedIn } from '../../server/http/operation'
 import { requestLog } from '../../server/logger'
 import { findMember } from '../../server/modules/members/members.queries'
+import { ordersOperations } from '../../server/modules/orders/orders.routes'
 import { sheetsOperations } from '../../server/modules/sheets/sheets.routes'
 import { verificationOperations } from '../../server/modules/verification/verification.routes'
 import { projectOperations } from '../../server/project-operations'
@@ -92,6 +93,7 @@ export function projectServer(): ProjectServer {
     ...projectOperations(work),
     ...sheetsOperations(sheetWork),
     ...verificationOperations(sheetWork),
+    ...ordersOperations(sheetWork),
   ]
   app.use(mountOperations(operations, accessByHeader(db)))
   app.use(errorHandler)

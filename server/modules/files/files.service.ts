@@ -14,6 +14,7 @@ import { MOST_PIXELS, prepareImage } from '../../files/prepare-image'
 import type { ReceivedFile } from '../../files/receive-file'
 import { change, type Doer, noteChange, type ProjectWork } from '../projects/deed'
 import { openProject } from '../projects/open-project'
+import { listKnownOrderFileIds } from '../orders/orders.queries'
 import { listKnownSheetFileIds } from '../sheets/sheets.queries'
 import {
   countFiles,
@@ -167,7 +168,11 @@ export async function sweepFiles({ db, now, store }: FileWork): Promise<number> 
   let removed = 0
   for (let i = 0; i < ids.length; i += IDS_AT_ONCE) {
     const some = ids.slice(i, i + IDS_AT_ONCE)
-    const known = new Set([...listKnownFileIds(db, some), ...listKnownSheetFileIds(db, some)])
+    const known = new Set([
+      ...listKnownFileIds(db, some),
+      ...listKnownSheetFileIds(db, some),
+      ...listKnownOrderFileIds(db, some),
+    ])
     const orphans = some.filter((id) => !known.has(id))
     for (const id of orphans) await store.remove(id)
     removed += orphans.length

@@ -8,6 +8,7 @@ import { toCsv } from '../../http/csv'
 import type { SentError } from '../../threads/task-messages'
 import { createTaskThread, plainError } from '../../threads/task-thread'
 import type { SheetTasks } from '../../typesetting/sheet-tasks'
+import type { IssuedOrder } from '../../typesetting/typeset-order'
 import { TypesettingError } from '../../typesetting/typesetting-error'
 
 /**
@@ -93,11 +94,23 @@ export function documentOf(key: string, sheet: Sheet): Promise<Buffer> {
 /** How many pages a PDF of our typesetter has; it writes their number beside their root. */
 const PAGES = /\/Type \/Pages\s+\/Count (\d+)/
 
+interface FrozenPdf {
+  readonly pdf: Buffer
+  readonly pages: number
+}
+
 /** The final document. */
-export async function frozenDocument(
-  sheet: Sheet,
-): Promise<{ readonly pdf: Buffer; readonly pages: number }> {
-  const pdf = await setSheet(sheet)
+export async function frozenDocument(sheet: Sheet): Promise<FrozenPdf> {
+  return counted(await setSheet(sheet))
+}
+
+/** A deployment order, final from the start. */
+export async function frozenOrder(issued: IssuedOrder): Promise<FrozenPdf> {
+  const { buffer, byteOffset, byteLength } = await thread.run('order', issued)
+  return counted(Buffer.from(buffer, byteOffset, byteLength))
+}
+
+function counted(pdf: Buffer): FrozenPdf {
   const pages = Number(PAGES.exec(pdf.toString('latin1'))?.[1] ?? 0)
   if (pages === 0) throw new Error('a document without pages was set')
   return { pdf, pages }
