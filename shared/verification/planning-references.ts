@@ -67,6 +67,15 @@ export const PLANNING_REFERENCES: readonly ReferenceRow[] = [
     why: 'The product does not compute a chance of failure.',
   },
   {
+    id: 'score-interval',
+    topic: 'chance',
+    title: 'Score interval at 95 % for 57 failures in 1000 draws',
+    source: 'Wilson 1927 (formula from memory), figures derived',
+    tag: 'derived',
+    printed: '0.044253 to 0.073137',
+    why: 'The product does not compute a chance of failure.',
+  },
+  {
     id: 'variation',
     topic: 'chance',
     title: 'Coefficients of variation: friction angle, saturated permeability',

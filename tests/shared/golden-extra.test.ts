@@ -12,13 +12,13 @@ import { waveThrust } from '../../shared/calc/moving-water/wave-thrust'
 import { developingMean, developingMoment } from '../../shared/calc/uplift/developing-uplift'
 import { upliftForce } from '../../shared/calc/uplift/uplift-force'
 import { windOnEmptyBarrier } from '../../shared/calc/wind/wind-on-empty-barrier'
-import { compare } from '../../shared/checks/compare'
+import { compare, type DemandAndResistance } from '../../shared/checks/compare'
 import { evaluateSection } from '../../shared/checks/evaluate-section'
 import { globalPairs } from '../../shared/checks/global-checks'
 import { holdingProfile, holdsToAt } from '../../shared/checks/holds-to'
 import { justEnough } from '../../shared/checks/just-enough'
-import { partialSliding } from '../../shared/checks/partial-checks'
-import { sectionState } from '../../shared/checks/section-state'
+import { partialSliding, UPL } from '../../shared/checks/partial-checks'
+import { sectionState, type SectionState } from '../../shared/checks/section-state'
 import { parseSectionCase } from '../../shared/schemas/parse-section-case'
 import type { SectionCase } from '../../shared/schemas/section-case'
 import extra from '../golden/extra.json'
@@ -191,6 +191,18 @@ describe('skirt grip', () => {
   })
 })
 
+/**
+ * Uplift against what presses net of the lifts, the milder reading of EN 1997-1 UPL. The product counts
+ * the lifts among what is unfavourable; both come from the same loads.
+ */
+function netFlotation({ vertical }: SectionState): DemandAndResistance {
+  const { uplift, waterOnSkirt, self, dryLift } = vertical
+  return {
+    demand: UPL.unfavourable * uplift.force,
+    resistance: UPL.favourable * (waterOnSkirt + self - dryLift),
+  }
+}
+
 describe('check bases', () => {
   const words = { holds: 'Holds', narrow: 'Holds narrowly', fails: 'Does not hold', notChecked: '' }
 
@@ -201,10 +213,10 @@ describe('check bases', () => {
     const combinations = {
       slidingC1: compare(partialSliding(state, 1), 1),
       slidingC2: compare(partialSliding(state, 2), 1),
+      flotationNet: compare(netFlotation(state), 1),
     }
     const { expected } = block(`basis-${basis}`)
     for (const [check, figures] of Object.entries(expected)) {
-      if (check === 'flotationNet') continue
       const { utilisation, verdict } = figures as { utilisation: number; verdict: string }
       const actual =
         check in combinations
@@ -254,6 +266,22 @@ describe('one section', () => {
     const { sliding } = block('required').expected as { sliding: Figures }
     expectFigures(justEnough(FIRST) as Record<string, number>, sliding)
   })
+
+  it.each(['sliding', 'flotation', 'overturning'] as const)(
+    'is just enough for %s there',
+    (check) => {
+      const needed = (block('required').expected as Record<string, Record<string, number>>)[check]!
+      const { skirtLength, friction, edgeFactor } = needed
+      const long = { ...FIRST.barrier, skirtLength: skirtLength! }
+      const open = { ...FIRST.uplift, edgeFactor: edgeFactor! }
+      const changes = [{ barrier: long }, { uplift: open }]
+      const rough = friction === undefined ? [] : [{ ground: { ...FIRST.ground, friction } }]
+      for (const change of [...changes, ...rough]) {
+        const { factor, required } = evaluateSection({ ...FIRST, ...change })[check]
+        expectPrinted(factor!, required!, JSON.stringify(change))
+      }
+    },
+  )
 
   it.each(['0.05', '0.1', '0.2'])('loses grip to %s m of water on the dry side', (dryDepth) => {
     const { thrust, vertical, sliding } = evaluateSection(withWater({ dryDepth: Number(dryDepth) }))

@@ -14,6 +14,8 @@ import { measureWith } from '../../../shared/drawing/text-width'
 import { loadedShape } from '../../../shared/calc/loaded-shape/loaded-shape'
 import { textResolver } from '../../../shared/texts/format-text'
 import { methodAreaTexts } from '../../../shared/texts/method-area'
+import { evaluateSection } from '../../../shared/checks/evaluate-section'
+import type { SceneItem, TextItem } from '../../../shared/drawing/scene'
 import { exampleSection } from '../../../shared/verification/example-section'
 
 const resolve = textResolver(methodAreaTexts.en, 'metric')
@@ -23,6 +25,38 @@ const present = presentCase(exampleSection())
 function sceneFor(width: number, height: number, marked = present) {
   return designChartScene({ view: { width, height }, measure, present: marked })
 }
+
+interface Tick {
+  readonly value: number
+  readonly at: number
+}
+
+/** Value at a place on an axis, straight between its first and its last tick. */
+function valueAt(ticks: readonly Tick[], place: number): number {
+  const [first, last] = [ticks[0]!, ticks.at(-1)!]
+  return first.value + ((place - first.at) / (last.at - first.at)) * (last.value - first.value)
+}
+
+function ticksOf(items: readonly SceneItem[], name: string, placeOf: (text: TextItem) => number) {
+  return items.flatMap((item): Tick[] => {
+    const value = Number(item.id.replace(name, ''))
+    const isTick = item.kind === 'text' && item.id.startsWith(name) && Number.isFinite(value)
+    return isTick ? [{ value, at: placeOf(item) }] : []
+  })
+}
+
+const readAcross = (items: readonly SceneItem[], name: string, x: number) =>
+  valueAt(
+    ticksOf(items, name, (text) => text.x),
+    x,
+  )
+
+/** A label stands lower than its tick by 0.35 of its size, so that it is level with it. */
+const readUp = (items: readonly SceneItem[], y: number) =>
+  valueAt(
+    ticksOf(items, 'crest-', (text) => text.y - 0.35 * text.size),
+    y,
+  )
 
 describe('curves of the design chart', () => {
   // Figures derived by two programs; they stand in shared/verification as well.
@@ -84,7 +118,12 @@ describe('the chart', () => {
     expect(present.ratio).toBeCloseTo(15_000 / (9810 * 0.7), 10)
     const { items } = sceneFor(900, 460)
     const dot = items.find(({ id }) => id === 'now-dot')
-    expect(dot).toBeDefined()
+    if (dot?.kind !== 'circle') throw new Error('no dot')
+    // Read as a person reads it: from the ticks on both sides of it, in proportion.
+    expect(readAcross(items, 'depth-', dot.cx)).toBeCloseTo(0.55 / 0.7, 6)
+    expect(readUp(items, dot.cy)).toBeCloseTo(0.987, 3)
+    const { loadedShape: shape } = evaluateSection(exampleSection())
+    expect(readUp(items, dot.cy)).toBeCloseTo(shape.solved ? shape.crest / 0.7 : NaN, 6)
     const text = items.find(({ id }) => id === 'present')
     expect(text?.kind === 'text' && resolve(text.message)).toBe(
       'p/(ρgD) 2.18: crest/D 0.987 at h/D 0.79',

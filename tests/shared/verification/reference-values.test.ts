@@ -111,6 +111,19 @@ describe('reference values that the product does not compute, by formulas of thi
     closes('lognormal-index', '1.02', 100 * below(index))
   })
 
+  it('closes for the score interval: both ends lie 1.96 of their own deviations from the share', () => {
+    const [draws, share, quantile] = [1000, 0.057, 1.959964]
+    const middle = (share + quantile ** 2 / (2 * draws)) / (1 + quantile ** 2 / draws)
+    const inner = (share * (1 - share)) / draws + quantile ** 2 / (4 * draws ** 2)
+    const half = (quantile * Math.sqrt(inner)) / (1 + quantile ** 2 / draws)
+    closes('score-interval', '0.044253', middle - half)
+    closes('score-interval', '0.073137', middle + half)
+    for (const end of [middle - half, middle + half]) {
+      const deviation = Math.sqrt((end * (1 - end)) / draws)
+      expect(Math.abs(end - share) / deviation).toBeCloseTo(quantile, 9)
+    }
+  })
+
   it('closes for the chance of underseepage at four heads', () => {
     const chance = (head: number) => {
       const mean = (1.1696 * head) / 20
