@@ -65,9 +65,9 @@ export function sandbagWall(sections: readonly LineSection[], level: number): Sa
   const heights = parts.map(({ height }) => height)
   const highest = Math.max(0, ...heights)
   if (highest > HIGHEST) return null
-  const bags = Math.ceil(
-    parts.reduce((sum, { length, height }) => sum + length * sandbagsPerMetre(height), 0) - 1e-9,
-  )
+  const exact = parts.reduce((all, part) => all + part.length * sandbagsPerMetre(part.height), 0)
+  // 1e-9: what binary arithmetic adds to a whole number of bags.
+  const bags = Math.ceil(Math.max(0, exact - 1e-9))
   const { bagMass, bagsPerPersonHour, tabled } = SANDBAG_SOURCE
   return {
     bags,
