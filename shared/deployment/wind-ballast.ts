@@ -55,7 +55,11 @@ export function sectionBallast(
   const perMetre = Math.max(0, ...demands)
   const mass = perMetre * sectionLength
   // 1e-9: what binary arithmetic adds to a whole number of bags.
-  return { perMetre, mass, bags: bagMass === null ? null : Math.ceil(Math.max(0, mass / bagMass - 1e-9)) }
+  return {
+    perMetre,
+    mass,
+    bags: bagMass === null ? null : Math.ceil(Math.max(0, mass / bagMass - 1e-9)),
+  }
 }
 
 /** Bags of one kind in all depots; of several masses the lightest counts, which asks for most bags. */
