@@ -46,6 +46,7 @@ function readable(bound: number): string {
 /** The range in words: "0 to 1.05 m", "above 0 m", "0.2 to 3 m". */
 export function describeRange(range: AllowedRange): string {
   const unit = range.unit === '–' ? '' : ` ${range.unit}`
+  if (range.min === range.max) return `${readable(range.min)}${unit}`
   const lower = `${range.minExcluded ? 'above ' : ''}${readable(range.min)}`
   if (range.max === Infinity)
     return range.minExcluded ? `${lower}${unit}` : `${lower}${unit} or more`

@@ -24,7 +24,7 @@ export function eventCaseFaults(event: EventCase): readonly Fault[] {
   ]
   if (faults.length > 0) return faults
   const input = eventInputOf(event)
-  const own = eventFaults(input)
+  const own = eventFaults(input).map((fault) => asSent(event, fault))
   return own.length > 0 ? own : strangeLevels(event, input)
 }
 
@@ -133,6 +133,21 @@ function momentFault(path: string, value: string): Fault[] {
   if (parseMoment(value) !== null) return []
   const message = `${path}: ${showValue(value)} is not allowed; it must be ${MOMENT_FORM}`
   return [{ path, value, allowed: MOMENT_FORM, unit: '–', message }]
+}
+
+const READING = /^(water|pond|air)\.readings\[(\d+)\]\.time$/
+
+/** A reading out of its turn in the words in which it was sent, not in seconds. */
+function asSent(event: EventCase, fault: Fault): Fault {
+  const [, name, index] = READING.exec(fault.path) ?? []
+  if (name === undefined) return fault
+  const readings = event[name as 'water' | 'pond' | 'air']?.readings ?? []
+  const [before = '', sent = ''] = [Number(index) - 1, Number(index)].map((i) => readings[i]?.time)
+  const isTwice = parseMoment(before) === parseMoment(sent)
+  const what = isTwice ? 'the same moment twice' : showValue(sent)
+  const allowed = `after the reading before it, ${showValue(before)}`
+  const message = `${fault.path}: ${what} is not allowed; it must be ${allowed}`
+  return { ...fault, value: sent, allowed, unit: '–', message }
 }
 
 /** Water that never is below 1.5 diameters above the ground is in feet, or in another datum. */

@@ -303,7 +303,7 @@ describe('calc event', () => {
     [
       'times that fall',
       withReadings((all) => [...all].reverse()),
-      /^water\.readings\[1\]\.time: \d+ is not allowed; it must be after the reading before it/,
+      /^water\.readings\[1\]\.time: "[-+:T\d]+" is not allowed; it must be after the reading before it, "/,
     ],
     ['one reading', withReadings((all) => [all[0]]), /^water\.readings\.length: 1 is not allowed/],
     [
