@@ -15,6 +15,7 @@ export function securityHeaders(appUrl: string): RequestHandler {
         defaultSrc: ["'self'"],
         scriptSrc: ["'self'"],
         scriptSrcAttr: ["'none'"],
+        workerSrc: ["'self'"],
         styleSrc: ["'self'"],
         connectSrc: ["'self'"],
         imgSrc: ["'self'", 'data:', 'blob:'],

@@ -1,6 +1,7 @@
 import { lineSections } from '../calc/line/line-sections'
 import { isInRange, rangeFault, showValue, type AllowedRange, type Fault } from '../errors'
 import { caseAt, sizeAt } from '../checks/place-case'
+import { eventSettingsFaults } from './event-settings-faults'
 import { STATION_RANGES } from './station-ranges'
 import { deploymentFaults } from './deployment-faults'
 import type { Survey } from './line-faults'
@@ -43,6 +44,7 @@ function ownFaults(content: ScenarioContent, { stations, sectionLength }: Survey
     ...faultOutside('place', content.place, place),
     ...faultOutside('rateOfRise', content.rateOfRise, RATE_OF_RISE),
     ...faultOutside('timeToClear', content.timeToClear, TIME_TO_CLEAR),
+    ...(content.event ? eventSettingsFaults(content.event) : []),
     ...deploymentFaults(content.deployment, place),
   ]
 }

@@ -1,5 +1,6 @@
 import { z } from 'zod'
 import { deploymentSettingsSchema } from './deployment'
+import { eventSettingsSchema } from './event-settings'
 import { restingForecastSchema } from './forecast'
 import { sectionCaseSchema } from './section-case'
 import { CHECK_IDS, VERDICTS } from './section-result'
@@ -56,6 +57,8 @@ export const scenarioContentSchema = z.strictObject({
   basis: parts.basis,
   rateOfRise: z.number().nullable().default(null).meta({ unit: 'm/s' }),
   timeToClear: z.number().default(1200).meta({ unit: 's' }),
+  /** How it is taken through its forecast; null: nobody has said anything of the night. */
+  event: eventSettingsSchema.nullable().default(null),
   /** The deployment plan as it is set; null: nobody has planned yet. */
   deployment: deploymentSettingsSchema.nullable().default(null),
 })

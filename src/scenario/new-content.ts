@@ -41,6 +41,7 @@ export function newContent(line: SurveyedLine, tubes: TubeBook): ScenarioContent
   return {
     waterLevel: Number((lowest.groundLevel + FIRST_DEPTH).toFixed(3)),
     forecast: null,
+    event: null,
     levelNow: null,
     levelLow: null,
     levelHigh: null,

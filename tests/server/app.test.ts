@@ -33,6 +33,7 @@ describe('every answer', () => {
       'default-src': "'self'",
       'script-src': "'self'",
       'script-src-attr': "'none'",
+      'worker-src': "'self'",
       'style-src': "'self'",
       'connect-src': "'self'",
       'img-src': "'self' data: blob:",

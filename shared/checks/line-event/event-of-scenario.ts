@@ -27,10 +27,7 @@ const MOST = 1000
  *
  * @param water What is expected; moments in s.
  */
-export function settingsOf(
-  content: ScenarioContent & { readonly event?: EventSettings | null | undefined },
-  water: TimeSeries,
-): LineEventSettings {
+export function settingsOf(content: ScenarioContent, water: TimeSeries): LineEventSettings {
   const { groundBefore, filledAt, air } = content.event ?? NO_EVENT_SETTINGS
   const temperature = air.map(({ time, temperature: value }) => ({ time: time / 1000, value }))
   const [first] = temperature
