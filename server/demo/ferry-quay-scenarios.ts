@@ -6,6 +6,9 @@ import {
   type SizeRun,
 } from '../../shared/schemas/scenario'
 
+import { FERRY_QUAY_NOW, LOCK_ISSUE } from './ferry-quay-forecast'
+import { FERRY_QUAY } from './ferry-quay-ids'
+
 export interface DemoScenario {
   /** Ending of the id; the line stands before it. */
   readonly key: string
@@ -19,6 +22,15 @@ const WEIGHED = 0.5
 
 /** 0.13 m in an hour, the steepest of the forecast [m/s]. */
 const RISE = 0.13 / 3600
+
+/** The crest of the forecast of 21:45. */
+const RESTS_ON = {
+  gaugeId: FERRY_QUAY.lockGauge,
+  forecastId: LOCK_ISSUE.id,
+  issuedAt: LOCK_ISSUE.issuedAt,
+  band: 'expected',
+  shiftedAt: FERRY_QUAY_NOW,
+} as const
 
 /** A tube of the catalogue from chainage to chainage; the edge is open unless it says otherwise. */
 function run(
@@ -39,7 +51,10 @@ function content(
 ): ScenarioContent {
   const parsed = scenarioContentSchema.parse({
     waterLevel: 3.42,
+    forecast: RESTS_ON,
     levelNow: 2.34,
+    levelLow: 3.3,
+    levelHigh: 3.54,
     place,
     sizes,
     grounds: GROUNDS.map(({ id, friction, permeability, layerThickness, isSuitable }) => ({
@@ -94,7 +109,10 @@ export const LOW_ROAD_SCENARIOS: readonly DemoScenario[] = [
     key: 'upper-band',
     name: 'Upper band 3.54',
     note: 'The upper end of the forecast band on the best layout: what then, and when does everybody leave?',
-    content: content(WEIGHED_LAYOUT, 45, { waterLevel: 3.54 }),
+    content: content(WEIGHED_LAYOUT, 45, {
+      waterLevel: 3.54,
+      forecast: { ...RESTS_ON, band: 'high' },
+    }),
   },
 ]
 

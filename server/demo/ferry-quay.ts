@@ -3,6 +3,7 @@ import type { Station } from '../../shared/schemas/line'
 import type { LineEnds, LineMark } from '../../shared/schemas/mark'
 import type { Clock } from '../clock'
 import type { DemoSeed } from '../db/demo-seed'
+import { makeForecast } from '../modules/forecasts/forecasts.service'
 import { makeGauge } from '../modules/gauges/gauges.service'
 import { makeLine } from '../modules/lines/line-rows'
 import { insertMember } from '../modules/members/members.queries'
@@ -10,6 +11,8 @@ import { change, type Deed, noteChange } from '../modules/projects/deed'
 import { makeProject } from '../modules/projects/projects.service'
 import { makeScenario } from '../modules/scenarios/scenario-rows'
 import { DEMO_PEOPLE } from './demo-people'
+import { FERRY_QUAY_OBSERVED, FERRY_QUAY_READINGS, LOCK_ISSUE } from './ferry-quay-forecast'
+import { FERRY_QUAY } from './ferry-quay-ids'
 import {
   BEHIND_THE_KERB_STATIONS,
   LOW_ROAD_STATIONS,
@@ -22,15 +25,7 @@ import {
   LOW_ROAD_SCENARIOS,
 } from './ferry-quay-scenarios'
 
-/** Ids that other seeds of the demonstration refer to. */
-export const FERRY_QUAY = {
-  project: 'demo-ferry-quay',
-  lockGauge: 'demo-gauge-lock',
-  boardGauge: 'demo-gauge-quay-board',
-  lowRoad: 'demo-line-low-road',
-  offTheGravel: 'demo-line-off-the-gravel',
-  behindTheKerb: 'demo-line-behind-the-kerb',
-} as const
+export { FERRY_QUAY } from './ferry-quay-ids'
 
 const { engineerA, engineerB, approver, checker, viewer } = DEMO_PEOPLE
 
@@ -119,6 +114,19 @@ function seedGauges(deed: Deed): void {
   noteMade(deed, 'gauge', FERRY_QUAY.lockGauge, lock.name)
   makeGauge(deed, FERRY_QUAY.project, board, FERRY_QUAY.boardGauge)
   noteMade(deed, 'gauge', FERRY_QUAY.boardGauge, board.name)
+  seedForecast(deed, { id: FERRY_QUAY.lockGauge, ...lock })
+}
+
+function seedForecast(deed: Deed, gauge: Parameters<typeof makeForecast>[1]): void {
+  const { id, issuedAt } = LOCK_ISSUE
+  const forecast = {
+    ...({ origin: 'typed', issuedAt, reference: 'siteLevel', call: null } as const),
+    readings: [...FERRY_QUAY_READINGS],
+    observed: [...FERRY_QUAY_OBSERVED],
+    note: 'By telephone at 21:45: stage 2.86 at 07:00, ±0.12. Levels at Ferry Quay.',
+  }
+  makeForecast(deed, gauge, forecast, id)
+  noteMade(deed, 'forecast', id, gauge.name)
 }
 
 function seedLine(deed: Deed, line: DemoLine): void {

@@ -23,6 +23,14 @@ export interface Drawn {
 
 const ADDRESSES = ['lead@people.test', 'invited@people.test', 'new@people.test', 'no address']
 
+const FIRST_MOMENT = 1_930_000_000_000
+
+/** Levels hour by hour. */
+const LEVELS = [2, 2.4, null, 2.2].map((expected, hour) => ({
+  ...{ time: FIRST_MOMENT + hour * 3_600_000, expected },
+  ...{ low: null, high: null },
+}))
+
 /** Values that a stranger to the program could not guess. */
 function hintsFor({ ids, visitors }: WholeServer): Hints {
   const people = ['the-lead', 'the-admin', ...visitors.map(({ what }) => what), 'nobody']
@@ -42,6 +50,14 @@ function hintsFor({ ids, visitors }: WholeServer): Hints {
     content: fc.constant(SHORT_CONTENT),
     from: fc.constantFrom('0', '1930000000000'),
     to: fc.constantFrom('0', '1930000000000'),
+    origin: fc.constantFrom('typed', 'csv', 'waterml', 'typed', 'csv', 'call'),
+    call: fc.constant(null),
+    readings: fc.constantFrom(LEVELS.slice(0, 1), LEVELS),
+    observed: fc.constantFrom(
+      [],
+      LEVELS.map(({ time, expected }) => ({ time, level: expected })),
+    ),
+    issuedAt: fc.constant(FIRST_MOMENT),
     page: fc.constantFrom('1', '2', '100000'),
   }
 }

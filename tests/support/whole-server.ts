@@ -58,6 +58,12 @@ async function furnish(server: ReturnType<typeof freshApp>) {
   const projectId = await post('/api/projects', { name: 'Quay', datum: 'QD' })
   const project = `/api/projects/${projectId}`
   const gaugeId = await post(`${project}/gauges`, { name: 'Lock', zero: 0.6 })
+  const readings = [0, 1, 2].map((hour) => ({
+    time: 1_930_000_000_000 + hour * 3_600_000,
+    expected: 2,
+  }))
+  const issue = { origin: 'typed', issuedAt: 1_930_000_000_000, readings }
+  const forecastId = await post(`${project}/gauges/${gaugeId}/forecasts`, issue)
   const stations = SHORT_STATIONS.map((row) => ({ ...row, x: row.chainage, y: 0 }))
   const lineId = await post(`${project}/lines`, { name: 'Low road', stations })
   const depotId = await post('/api/depots', { name: 'Mill Lane' })
@@ -77,7 +83,7 @@ async function furnish(server: ReturnType<typeof freshApp>) {
   const invitation = await office.post('/api/admin/invitations').send(invited).expect(201)
   await browser(app).post('/api/password-resets').send({ email: lead.email }).expect(202)
   return {
-    ...{ projectId, gaugeId, lineId, scenarioId, sheetId, depotId },
+    ...{ projectId, gaugeId, forecastId, lineId, scenarioId, sheetId, depotId },
     commentId: (commented.body as SheetRecord).comments[0]!.id,
     line: '2.1',
     fileId: (uploaded.body as { id: string }).id,
