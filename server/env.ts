@@ -37,6 +37,7 @@ const environmentSchema = z.object({
   APP_URL: z.url({ protocol: /^https?$/, message: 'must be an http or https address' }).optional(),
   SESSION_SECRET: z.string().optional(),
   SMTP_URL: z.url({ protocol: /^smtps?$/, message: 'must be an smtp or smtps address' }).optional(),
+  DEMO_SHEETS: z.enum(['yes', 'no']).optional(),
   MAIL_FROM: z
     .string()
     .regex(/^[^\r\n]*[^\s@<]+@[^\s@>]+>?$/, 'must hold an address for mail')
@@ -50,6 +51,8 @@ const environmentSchema = z.object({
 export interface Env {
   readonly mode: Mode
   readonly port: number
+  /** Whether the demonstration begins with its sheets; they take some seconds to make. */
+  readonly hasDemoSheets: boolean
   /** Interface to listen on; left out: all. */
   readonly host: string | undefined
   readonly databaseFile: string
@@ -84,8 +87,10 @@ export function readEnv(source: Record<string, string | undefined>): Env {
   if (variables.SMTP_URL && !variables.MAIL_FROM) {
     throw new EnvironmentError('MAIL_FROM: mail over SMTP_URL needs the address of its sender')
   }
+  const demoSheets = variables.DEMO_SHEETS ?? (variables.NODE_ENV === 'test' ? 'no' : 'yes')
   return {
     mode,
+    hasDemoSheets: mode === 'demonstration' && demoSheets === 'yes',
     port: variables.PORT,
     host: variables.HOST,
     databaseFile: variables.DATABASE_FILE,

@@ -5,9 +5,10 @@ import type { Logger } from 'pino'
 import { createApp } from './app'
 import { startHousekeeping } from './auth/housekeeping'
 import { openDatabase } from './db/client'
-import type { DemoSeed } from './db/demo-seed'
+import { type DemoSeed, seedSlowlyOnce } from './db/demo-seed'
 import { prepareDatabase } from './db/prepare-database'
 import { ferryQuaySeed } from './demo/ferry-quay'
+import { ferryQuaySheetsSeed } from './demo/ferry-quay-sheets'
 import { ferryQuayStoreSeed } from './demo/ferry-quay-store'
 import { type Env, EnvironmentError, readEnv } from './env'
 import { createLogger } from './logger'
@@ -50,15 +51,18 @@ function readVersion(): string {
   return version
 }
 
-function start(): void {
+async function start(): Promise<void> {
   const env = readEnvironment()
   const logger = createLogger(env.logLevel)
   const { db, close } = openDatabase(env.databaseFile)
   const parts = createParts(db, env)
   prepareDatabase(db, { mode: env.mode, demoSeeds: demoSeeds(parts) })
   if (env.mode === 'production') refuseDemoAccounts(parts, env)
-  const siteFolder = inProject('dist')
-  const app = createApp({ parts, env, logger, version: readVersion(), siteFolder })
+  const version = readVersion()
+  if (env.hasDemoSheets) {
+    await seedSlowlyOnce(db, ferryQuaySheetsSeed({ ...parts, software: `Toehold ${version}` }))
+  }
+  const app = createApp({ parts, env, logger, version, siteFolder: inProject('dist') })
 
   const server = app.listen({ port: env.port, host: env.host }, (error?: Error) => {
     if (error) refuseToStart(describeListenError(error, env.port))
@@ -148,4 +152,4 @@ function stopOnSignal(server: Server, closeAll: () => Promise<void>): void {
   process.on('SIGTERM', stop)
 }
 
-start()
+await start()

@@ -12,6 +12,7 @@ describe('the environment', () => {
   it('needs nothing for a demonstration', () => {
     expect(readEnv({})).toEqual({
       mode: 'demonstration',
+      hasDemoSheets: true,
       port: 3000,
       host: undefined,
       databaseFile: 'data/toehold.sqlite',
@@ -23,6 +24,13 @@ describe('the environment', () => {
       mailFrom: 'Toehold <toehold@localhost.invalid>',
       trustedProxies: 'loopback',
     })
+  })
+
+  it('leaves the sheets of the demonstration out where it is told to, in tests and in production', () => {
+    expect(readEnv({ DEMO_SHEETS: 'no' }).hasDemoSheets).toBe(false)
+    expect(readEnv({ NODE_ENV: 'test' }).hasDemoSheets).toBe(false)
+    expect(readEnv({ NODE_ENV: 'test', DEMO_SHEETS: 'yes' }).hasDemoSheets).toBe(true)
+    expect(readEnv({ ...production, DEMO_SHEETS: 'yes' }).hasDemoSheets).toBe(false)
   })
 
   it('takes an empty variable for an absent one', () => {

@@ -17,6 +17,7 @@ import { requestLog } from '../../server/logger'
 import { findMember } from '../../server/modules/members/members.queries'
 import { ordersOperations } from '../../server/modules/orders/orders.routes'
 import { sheetsOperations } from '../../server/modules/sheets/sheets.routes'
+import type { SheetWork } from '../../server/modules/sheets/sheet-work'
 import { verificationOperations } from '../../server/modules/verification/verification.routes'
 import { projectOperations } from '../../server/project-operations'
 import { createKeyedHash } from '../../server/auth/keyed-hash'
@@ -67,6 +68,8 @@ export interface ProjectServer {
   readonly db: Db
   readonly filesFolder: string
   readonly clock: { now: number }
+  /** What services of sheets work with, for seeds. */
+  readonly sheetWork: SheetWork
 }
 
 /** Routes of desk and projects on a database of their own, with the people of the demonstration. */
@@ -97,7 +100,7 @@ export function projectServer(): ProjectServer {
   ]
   app.use(mountOperations(operations, accessByHeader(db)))
   app.use(errorHandler)
-  return { app, db, filesFolder, clock }
+  return { app, db, filesFolder, clock, sheetWork }
 }
 
 type Method = 'get' | 'post' | 'put' | 'patch' | 'delete'

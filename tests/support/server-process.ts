@@ -26,7 +26,11 @@ export interface Running {
 }
 
 /** What the program needs from its surroundings, without what the test runner adds. */
-const SURROUNDINGS = { PATH: process.env.PATH ?? '', HOME: process.env.HOME ?? '' }
+const SURROUNDINGS = {
+  PATH: process.env.PATH ?? '',
+  HOME: process.env.HOME ?? '',
+  DEMO_SHEETS: 'no',
+}
 
 /** Starts Node in the project; the process ends with the test at the latest. */
 export function startNode(
