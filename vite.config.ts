@@ -24,6 +24,12 @@ function recordModules(): Plugin {
   }
 }
 
+/** What the API server answers while the page is developed. */
+function proxied(paths: readonly string[]): Record<string, string> {
+  const address = `http://localhost:${process.env.API_PORT ?? 3001}`
+  return Object.fromEntries(paths.map((path) => [path, address]))
+}
+
 const ENGINE_TESTS = ['tests/shared/**/*.test.ts']
 
 /** Parts of vue-i18n that are not used: options API, global components, message compiler. */
@@ -44,7 +50,7 @@ export default defineConfig({
     },
   },
   define: WITHOUT_I18N_EXTRAS,
-  server: { proxy: { '/api': `http://localhost:${process.env.API_PORT ?? 3001}` } },
+  server: { proxy: proxied(['/api', '/order', '/service-worker.js']) },
   // check-bundle reads manifest and modules to learn what the first page loads.
   build: {
     manifest: true,

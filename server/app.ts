@@ -13,6 +13,7 @@ import { securityHeaders } from './http/security-headers'
 import { site } from './http/site'
 import { requestLog } from './logger'
 import { allOperations } from './operations'
+import { pages } from './pages/pages'
 import type { RouteParts } from './parts'
 
 export interface AppParts {
@@ -43,6 +44,7 @@ export function createApp({ parts, env, logger, version, siteFolder }: AppParts)
   app.use(mountOperations(operations, createAccess(parts.db, parts.sessions)))
   app.locals.operations = operations
 
+  app.use(pages(parts))
   app.use(site(siteFolder))
   app.use((req) => {
     throw new NotFoundError(`${req.method} ${req.path}: there is nothing at this address`)

@@ -237,7 +237,7 @@ export const orderTexts = {
     pdf: 'Paper form (PDF)',
     lost: 'Not sent: {count}',
     contents: 'Parts of the order',
-    jump: { lay: 'Lay', leave: 'Leave', round: 'Round' },
+    jump: { plug: 'Plug', lay: 'Lay', leave: 'Leave', round: 'Round' },
     unknownTitle: 'No such order',
     unknown: 'There is no order at this address. Check every sign, or scan the code again.',
     slow: 'Too many wrong addresses from here. Wait a little and try again.',

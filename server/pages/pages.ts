@@ -1,0 +1,60 @@
+import { Router, type Request, type Response } from 'express'
+import { orderTexts } from '../../shared/texts/order.en'
+import { NotFoundError, TooManyRequestsError } from '../errors'
+import { senderOf } from '../http/sender'
+import { pathPart } from '../http/parse-input'
+import { orderOfToken } from '../modules/orders/open-order'
+import { orderStateOf } from '../modules/orders/order-state'
+import type { OrderWork } from '../modules/orders/order-work'
+import { messagePage } from './order/document'
+import { orderPage } from './order/order-page'
+import { FILES_PATH, type PageFiles, readPageFiles } from './page-files'
+
+/**
+ * Pages that the server writes itself, for phones with little signal: no application, no account. The
+ * service worker of the whole origin is served here, at its root.
+ */
+export function pages(work: OrderWork): Router {
+  const files = readPageFiles()
+  const router = Router()
+  router.get('/order/:token', (req, res) => sendOrder(work, files, req, res))
+  router.get(`${FILES_PATH}/:version/:name`, (req, res) => sendPageFile(files, req, res))
+  router.get('/service-worker.js', (_req, res) => {
+    res.set({ 'Cache-Control': 'no-cache', 'Content-Type': 'text/javascript; charset=utf-8' })
+    res.send(files.serviceWorker)
+  })
+  return router
+}
+
+/** Whoever opens an order gets a page, whatever is wrong: not everybody reads JSON. */
+function sendOrder(work: OrderWork, files: PageFiles, req: Request, res: Response): void {
+  res.set({ 'Cache-Control': 'no-cache', 'Referrer-Policy': 'no-referrer' })
+  const { unknownTitle, unknown, slow } = orderTexts.page
+  try {
+    const row = orderOfToken(work, pathPart(req, 'token'), senderOf(req))
+    const state = orderStateOf(work.db, row, work.now())
+    res.type('html').send(orderPage({ order: row.content, token: row.token, state }, files))
+  } catch (error) {
+    if (error instanceof NotFoundError) {
+      res
+        .status(404)
+        .type('html')
+        .send(messagePage(unknownTitle, unknown, files))
+    } else if (error instanceof TooManyRequestsError) {
+      res.status(429).set('Retry-After', String(error.retryAfter))
+      res.type('html').send(messagePage(unknownTitle, slow, files))
+    } else {
+      throw error
+    }
+  }
+}
+
+/** Files keep their address only while they stay as they are, so they are kept for ever. */
+function sendPageFile(files: PageFiles, req: Request, res: Response): void {
+  const file = files.find(pathPart(req, 'name'))
+  if (!file) throw new NotFoundError(`${req.path}: there is nothing at this address`)
+  const isThisVersion = pathPart(req, 'version') === files.version
+  const keep = isThisVersion ? 'public, max-age=31536000, immutable' : 'no-cache'
+  res.set({ 'Cache-Control': keep, 'Content-Type': file.mediaType })
+  res.send(file.bytes)
+}
