@@ -94,6 +94,8 @@ export const SHAPE_PAINTS: Readonly<Record<ShapeRole, Paint>> = {
   sectionUnchecked: { fill: 'muted' },
   weakest: { fill: 'holds' },
   placeLine: { stroke: 'ink', width: 1.4 },
+  guess: { stroke: 'ink', width: 2, dash: '6 4' },
+  workFill: { fill: 'barrier' },
 }
 
 /** Colours of texts. */

@@ -62,6 +62,8 @@ export const SHAPE_ROLES = [
   'sectionUnchecked',
   'weakest',
   'placeLine',
+  'guess',
+  'workFill',
 ] as const
 export type ShapeRole = (typeof SHAPE_ROLES)[number]
 

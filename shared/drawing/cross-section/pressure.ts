@@ -17,13 +17,19 @@ const FIRST_ARROW = 0.35
 export function drawPressure(drawing: Composition): void {
   if (drawing.input.case.water.depth <= 0) return
   if (drawing.body.state === 'standing') drawFace(drawing)
+  drawOnSkirt(drawing)
+}
+
+/** The water that stands on the skirt. */
+export function drawOnSkirt(drawing: Composition): void {
   const down = skirtArrows(drawing)
   addArrows(drawing, 'on-skirt', 'pressure', down)
   const [first, last] = [down[0], down.at(-1)]
   if (first && last) drawing.placer.avoid(boxAround(first.from, last.to, 3))
 }
 
-function drawFace(drawing: Composition): void {
+/** The water against the face of a standing tube. */
+export function drawFace(drawing: Composition): void {
   const { frame, input, placer } = drawing
   const { depth } = input.case.water
   const surface = levelY(frame, depth)
