@@ -1,8 +1,12 @@
-import type { OrderGauge, OrderInput } from '../../../shared/order/order-input'
+import type { OrderForecast, OrderGauge, OrderInput } from '../../../shared/order/order-input'
+import { planOfScenario } from '../../../shared/order/plan-of-scenario'
 import type { NewOrder } from '../../../shared/schemas/order-api'
+import type { ScenarioContent } from '../../../shared/schemas/scenario'
 import type { Db } from '../../db/client'
 import { ConflictError, NotFoundError } from '../../errors'
 import { findShownAccount } from '../accounts/accounts.queries'
+import { readProjectStore } from '../depots/depots.service'
+import { findForecast } from '../forecasts/forecasts.queries'
 import { findGauge } from '../gauges/gauges.queries'
 import { openProject } from '../projects/open-project'
 import { openScenario } from '../scenarios/open-scenario'
@@ -35,6 +39,10 @@ export function orderSource(
   }
   const { organisation, unitSystem } = findShownAccount(db, accountId)!
   const { stations, sectionLength, marks, ends } = line
+  const survey = { stations, sectionLength, marks, ends }
+  const { content } = scenario
+  const resting = restingOf(db, content)
+  const { depots } = readProjectStore(db, projectId)
   return {
     scenarioVersion: scenario.version,
     input: {
@@ -51,13 +59,23 @@ export function orderSource(
         expiresAt,
         ...words,
       },
-      survey: { stations, sectionLength, marks, ends },
-      content: scenario.content,
+      ...{ survey, content, resting },
       gauge: gaugeOf(db, projectId, gaugeId),
-      resting: null,
-      plan: null,
+      plan: planOfScenario({
+        ...{ survey, content, depots, now: at },
+        forecast: resting?.forecast ?? null,
+      }),
     },
   }
+}
+
+/**
+ * The issue that the scenario rests on, as it is now: with every level that was observed since. Null
+ * where the level was entered, or the issue is gone.
+ */
+function restingOf(db: Db, { forecast: rest = null }: ScenarioContent): OrderForecast | null {
+  const forecast = rest === null ? undefined : findForecast(db, rest.gaugeId, rest.forecastId)
+  return rest !== null && forecast ? { forecast, band: rest.band } : null
 }
 
 function gaugeOf(db: Db, projectId: string, gaugeId: string | null): OrderGauge | null {
