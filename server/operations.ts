@@ -9,6 +9,7 @@ import { invitationsOperations } from './modules/invitations/invitations.routes'
 import { mailsOperations } from './modules/mails/mails.routes'
 import { openapiOperations } from './modules/openapi/openapi.routes'
 import { ordersOperations } from './modules/orders/orders.routes'
+import { letterheadsOperations } from './modules/organisations/letterheads.routes'
 import { organisationsOperations } from './modules/organisations/organisations.routes'
 import { passwordResetsOperations } from './modules/password-resets/password-resets.routes'
 import { peopleOperations } from './modules/people/people.routes'
@@ -40,6 +41,7 @@ export function allOperations(
     ...passwordResetsOperations(parts),
     ...peopleOperations(parts),
     ...organisationsOperations(parts),
+    ...letterheadsOperations(parts),
     ...auditOperations(parts),
     ...mailsOperations(parts),
     ...projectOperations(parts),

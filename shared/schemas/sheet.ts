@@ -39,6 +39,8 @@ export const letterheadSchema = z.strictObject({
   logo: pictureSchema.nullable().default(null),
 })
 
+export type Letterhead = z.output<typeof letterheadSchema>
+
 /** A thing that the answer rests on, and whether somebody still has to confirm it. */
 export const assumptionSchema = z.strictObject({
   text: words(400).min(1),
@@ -138,7 +140,14 @@ export const sheetSchema = z
     line: sheetLineSchema.nullable().default(null),
     checking: checkingSchema.nullable().default(null),
     photographs: z
-      .array(z.strictObject({ caption: words(300), picture: pictureSchema }))
+      .array(
+        z.strictObject({
+          caption: words(300),
+          picture: pictureSchema,
+          /** File of the project that it was taken from; empty: from elsewhere. */
+          fileId: words(80).default(''),
+        }),
+      )
       .max(24)
       .default([]),
     letterhead: letterheadSchema.prefault({}),

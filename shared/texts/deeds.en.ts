@@ -49,7 +49,11 @@ export const deedsTexts = {
       'role-changed': 'changed the role of the member',
     },
     order: { issued: 'issued the order', withdrawn: 'withdrew the order' },
-    organisation: { created: 'added the organisation', renamed: 'renamed the organisation' },
+    organisation: {
+      created: 'added the organisation',
+      'letterhead-changed': 'changed the letterhead of',
+      renamed: 'renamed the organisation',
+    },
     'password-reset': { requested: 'asked for a new password', used: 'chose a new password' },
     person: {
       'address-erased': 'erased the address of',

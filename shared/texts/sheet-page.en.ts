@@ -103,5 +103,16 @@ export const sheetPageTexts = {
     after: 'Now',
     none: 'Nothing but its revision.',
   },
+  conflict: {
+    title: 'Somebody else changed it meanwhile',
+    text: 'Nothing that you typed is lost. Choose what shall stand, then save.',
+    caption: 'What differs',
+    field: 'Field',
+    mine: 'Yours',
+    theirs: 'There now',
+    nothing: 'nothing',
+    takeMine: 'Go on with yours',
+    takeTheirs: 'Take what is there now',
+  },
   copy: { action: 'Open a copy', name: 'Copy of {sheet}' },
 } as const

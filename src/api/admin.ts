@@ -13,6 +13,7 @@ import type {
   Person,
   PersonChange,
 } from '@shared/schemas/account'
+import type { LetterheadRecord } from '@shared/schemas/letterhead'
 import { getJson, sendJson } from './request'
 
 export type PeoplePage = z.output<typeof peoplePageSchema>
@@ -43,6 +44,23 @@ export async function deactivatePerson(id: string, handOverTo: string | null): P
 
 export async function eraseAddress(id: string): Promise<Person> {
   return (await sendJson('DELETE', `${personPath(id)}/address`)) as Person
+}
+
+const letterheadPath = (organisationId: string) =>
+  `/api/admin/organisations/${encodeURIComponent(organisationId)}/letterhead`
+
+export async function fetchLetterhead(
+  organisationId: string,
+  signal?: AbortSignal,
+): Promise<LetterheadRecord> {
+  return (await getJson(letterheadPath(organisationId), signal)) as LetterheadRecord
+}
+
+export async function changeLetterhead(
+  organisationId: string,
+  letterhead: LetterheadRecord,
+): Promise<LetterheadRecord> {
+  return (await sendJson('PUT', letterheadPath(organisationId), letterhead)) as LetterheadRecord
 }
 
 export async function fetchInvitations(signal?: AbortSignal): Promise<Invitation[]> {

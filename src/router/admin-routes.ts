@@ -27,6 +27,12 @@ export const adminRoutes: RouteRecordRaw[] = [
         meta: { titleKey: 'admin.organisations.title' },
       },
       {
+        path: 'letterhead',
+        name: 'admin-letterhead',
+        component: () => import('@/views/admin/LetterheadView.vue'),
+        meta: { titleKey: 'admin.letterhead.title' },
+      },
+      {
         path: 'audit',
         name: 'admin-audit',
         component: () => import('@/views/admin/AuditView.vue'),

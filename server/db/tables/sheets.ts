@@ -8,7 +8,7 @@ import {
   uniqueIndex,
 } from 'drizzle-orm/sqlite-core'
 import { SEPARATE_APPROVER } from '../../../shared/access/sheet-moves'
-import type { Sheet } from '../../../shared/schemas/sheet'
+import type { Letterhead, Sheet } from '../../../shared/schemas/sheet'
 import { SHEET_STATUSES } from '../../../shared/schemas/sheet-status'
 import { accounts, organisations } from './accounts'
 import { projects } from './projects'
@@ -165,3 +165,18 @@ export const sheetMoves = sqliteTable(
   },
   (table) => [index('moves_by_sheet').on(table.sheetId)],
 )
+
+/** What the sheets of an organisation bear at their head; a row comes with the first change. */
+export const letterheads = sqliteTable('letterheads', {
+  organisationId: text('organisation_id')
+    .primaryKey()
+    .references(() => organisations.id),
+  /** Empty: the name of the organisation. */
+  name: text().notNull(),
+  address: text().notNull(),
+  disclaimer: text().notNull(),
+  logo: text({ mode: 'json' }).$type<Letterhead['logo']>(),
+  version: integer().notNull(),
+  updatedAt: moment('updated_at').notNull(),
+  updatedBy: author('updated_by'),
+})

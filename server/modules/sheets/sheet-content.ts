@@ -7,6 +7,7 @@ import { parseInput } from '../../http/parse-input'
 import { findShownAccount } from '../accounts/accounts.queries'
 import { lineAt } from '../lines/open-line'
 import { findProject } from '../projects/projects.queries'
+import { letterheadOf } from '../organisations/letterheads.service'
 import { scenarioAt } from '../scenarios/open-scenario'
 
 type NewSheet = z.output<typeof newSheetSchema>
@@ -80,7 +81,7 @@ export function draftContent(
     ...words,
     ...part,
     datum: shortDatum(datum),
-    letterhead: { name: organisation.name },
+    letterhead: letterheadOf(db, organisation.id),
     date: dayIn(timeZone, author.at),
     software: author.software,
     units: unitSystem,

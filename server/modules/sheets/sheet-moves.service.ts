@@ -2,13 +2,12 @@ import type { z } from 'zod'
 import { decideMove, type MoveRow, type SheetMove } from '../../../shared/access/sheet-moves'
 import { InvalidInputError } from '../../../shared/errors'
 import type { sheetMoveSchema } from '../../../shared/schemas/sheet-api'
-import type { Sheet } from '../../../shared/schemas/sheet'
 import type { Db } from '../../db/client'
 import { ConflictError, ForbiddenError } from '../../errors'
 import type { SignedIn } from '../../http/operation'
 import { change, type Deed, noteChange } from '../projects/deed'
-import { findProject } from '../projects/projects.queries'
-import { insertMove, listMarks } from './checking.queries'
+import { insertMove } from './checking.queries'
+import { contentAfter } from './content-after'
 import { type Frozen, freezeSheet } from './freeze-sheet'
 import {
   assertSheetVersion,
@@ -18,7 +17,6 @@ import {
   REFUSAL_WORDS,
   sheetSubject,
 } from './open-sheet'
-import { dayIn, signatory } from './sheet-content'
 import { type Notice, queueNotice } from './sheet-mails'
 import { reviseSheet } from './sheets.service'
 import type { SheetPlace, SheetWork } from './sheet-work'
@@ -124,57 +122,6 @@ async function frozenFor(
   const status = move === 'approve' ? 'approved' : 'issued-for-information'
   const by = { accountId: actor.accountId, at: work.now() }
   return freezeSheet(work, { ...contentAfter(work.db, row, move, by), status })
-}
-
-interface Signing {
-  readonly accountId: string
-  readonly at: number
-}
-
-/** The content of a sheet with the name that a move puts on it. */
-function contentAfter(db: Db, row: SheetRow, move: SheetMove, by: Signing): Sheet {
-  const { content } = row
-  const date = dayIn(findProject(db, row.projectId)!.timeZone, by.at)
-  const name = () => signatory(db, by.accountId, date)
-  const { people } = content
-  switch (move) {
-    case 'submit':
-      return { ...content, date, people: { prepared: name(), checked: null, approved: null } }
-    case 'check':
-      return {
-        ...content,
-        date,
-        people: { ...people, checked: name() },
-        checking: marksOf(db, row, name().name),
-      }
-    case 'return':
-      return { ...content, people: { ...people, checked: null }, checking: null }
-    case 'approve':
-      return { ...content, date, people: { ...people, approved: name() } }
-    case 'issue-for-information':
-      return { ...content, date, people: { ...people, prepared: name() } }
-    default:
-      return content
-  }
-}
-
-function marksOf(db: Db, { id }: SheetRow, by: string): Sheet['checking'] {
-  const marks = listMarks(db, id)
-  const ticked = marks.filter(({ isTicked }) => isTicked).map(({ line }) => line)
-  const figures = marks.flatMap(({ line, figure, note }) =>
-    figure === null ? [] : [{ line, value: figure, note }],
-  )
-  return {
-    by,
-    ticked: inOrder(ticked, (line) => line),
-    figures: inOrder(figures, ({ line }) => line),
-  }
-}
-
-/** "3.2" before "3.10". */
-function inOrder<Item>(items: readonly Item[], lineOf: (item: Item) => string): Item[] {
-  const collator = new Intl.Collator('en', { numeric: true })
-  return [...items].sort((a, b) => collator.compare(lineOf(a), lineOf(b)))
 }
 
 interface Applied {
