@@ -196,6 +196,6 @@ describe('the file of an order', () => {
     const read = (Math.floor(leave.stage! * 100 + 1e-9) / 100).toFixed(2)
     expect(text).toContain(`${read} m on Quay board`)
     expect(leave.stage).toBeCloseTo(leave.level! - 0.4 + 0.04, 9)
-    expect(text).toContain(order.token)
+    expect(text.replaceAll('\u2011', '-')).toContain(order.token)
   })
 })
