@@ -1,7 +1,10 @@
 import { accountTexts } from './account.en'
 import { adminTexts } from './admin.en'
 import { deedsTexts } from './deeds.en'
+import { deploymentTexts } from './deployment.en'
+import { depotsTexts } from './depots.en'
 import { deskTexts } from './desk.en'
+import { eventTexts } from './event.en'
 import { layoutTexts } from './layout.en'
 import { lineTexts } from './line.en'
 import { linePlanTexts } from './line-plan.en'
@@ -18,7 +21,10 @@ export const areaTexts = {
     account: accountTexts,
     admin: adminTexts,
     deeds: deedsTexts,
+    deployment: deploymentTexts,
+    depotsPage: depotsTexts,
     desk: deskTexts,
+    eventPage: eventTexts,
     layout: layoutTexts,
     linePage: lineTexts,
     linePlan: linePlanTexts,

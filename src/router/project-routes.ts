@@ -36,6 +36,26 @@ export const projectRoutes: RouteRecordRaw[] = [
     meta: { titleKey: 'scenarioPage.title' },
   },
   {
+    path: '/projects/:projectId/lines/:lineId/scenarios/:scenarioId/event',
+    name: 'event',
+    component: () => import('@/views/EventView.vue'),
+    props: true,
+    meta: { titleKey: 'eventPage.title' },
+  },
+  {
+    path: '/projects/:projectId/lines/:lineId/scenarios/:scenarioId/deployment',
+    name: 'deployment',
+    component: () => import('@/views/DeploymentView.vue'),
+    props: true,
+    meta: { titleKey: 'deployment.title' },
+  },
+  {
+    path: '/depots',
+    name: 'depots',
+    component: () => import('@/views/DepotsView.vue'),
+    meta: { titleKey: 'depotsPage.title' },
+  },
+  {
     path: '/sheets/:sheetId',
     name: 'sheet',
     component: () => import('@/views/SheetView.vue'),

@@ -25,14 +25,20 @@ export interface DepotRow {
 
 type Wanted = Pick<StoreRow, 'kind' | 'barrierId' | 'diameter' | 'needed'>
 
+/** What is counted against the store. */
+export type Needs = Pick<LayoutBill, 'tubes' | 'closures' | 'edgeBags'> & {
+  /** Bags against the wind; left out where no gust is known. */
+  readonly ballastBags?: number
+}
+
 /**
- * Compares what a layout needs with what the depots hold: tubes by size, closures, bags for the edge,
- * and a plug for each pipe that is still open.
+ * Compares what a layout needs with what the depots hold: tubes by size, closures, bags for edge and
+ * ballast, and a plug for each pipe that is still open.
  *
  * @param marks Marks of the line.
  */
 export function againstStore(
-  bill: Pick<LayoutBill, 'tubes' | 'closures' | 'edgeBags'>,
+  bill: Needs,
   store: Pick<Store, 'depots'>,
   marks: readonly LineMark[] = [],
 ): readonly StoreRow[] {
@@ -40,7 +46,7 @@ export function againstStore(
 }
 
 function wantedOf(
-  { tubes, closures, edgeBags }: Pick<LayoutBill, 'tubes' | 'closures' | 'edgeBags'>,
+  { tubes, closures, edgeBags, ballastBags = 0 }: Needs,
   marks: readonly LineMark[],
 ): readonly Wanted[] {
   const none = { barrierId: null, diameter: null }
@@ -53,6 +59,7 @@ function wantedOf(
     })),
     ...(closures > 0 ? [{ kind: 'closure' as const, ...none, needed: closures }] : []),
     ...(edgeBags > 0 ? [{ kind: 'edge-bag' as const, ...none, needed: edgeBags }] : []),
+    ...(ballastBags > 0 ? [{ kind: 'ballast-bag' as const, ...none, needed: ballastBags }] : []),
     ...plugsOf(marks),
   ]
 }
