@@ -19,6 +19,12 @@ export const quickCheckTexts = {
     dry: 'no water',
     beyond: 'over the crest',
     moving: 'Current, waves, debris',
+    acting: {
+      none: 'none',
+      current: 'current {speed}',
+      waves: 'waves {height}',
+      debris: 'debris {force}',
+    },
     more: 'Density and gravity',
     derived: 'Level {level}, depth {depth}',
     shallow:

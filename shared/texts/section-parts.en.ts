@@ -3,6 +3,11 @@ export const sectionPartTexts = {
   title: 'One by one',
   lead: 'Each with its answer in one line. What governs comes first and opens.',
   governs: 'governs',
+  enter: {
+    waves: 'Enter height and period',
+    current: 'Enter the speed',
+    debris: 'Enter force and draught',
+  },
   name: {
     waves: 'Waves',
     current: 'Current',
@@ -16,7 +21,7 @@ export const sectionPartTexts = {
   waves: {
     none: 'none',
     some: '{force} of the {total} of thrust',
-    where: 'Height and period are entered on the wet side. They are used as they are.',
+    where: 'Height and period stand on the wet side. They are used as they are.',
     thrust: 'Thrust of the waves (Goda)',
     freeboard: 'Taken off the freeboard',
     over: 'Thrown over the crest, mean',
@@ -32,7 +37,7 @@ export const sectionPartTexts = {
   current: {
     none: 'none',
     some: '{force} of the {total} of thrust',
-    where: 'Speed straight towards the barrier, entered on the wet side.',
+    where: 'Speed straight towards the barrier; it stands on the wet side.',
     thrust: 'Thrust of the current',
     head: 'Taken off the freeboard',
     drag: 'Drag coefficient 2.0 for a long line (ASCE 7, chapter 5; FEMA P-259). A current along the line gives no thrust, but it lifts the skirt edge: see there.',
@@ -42,7 +47,7 @@ export const sectionPartTexts = {
     some: '{whole} on one section, {force}',
     aground: 'does not reach: it floats only from {draught} of water',
     where:
-      'Force and draught are entered on the wet side. The force is spread over one section and acts at the water surface.',
+      'Force and draught stand on the wet side. The force is spread over one section and acts at the water surface.',
     thrust: 'Thrust of the debris',
     spread: 'Published methods differ 75-fold. Choose the force with care, and name its method.',
     impact: 'From mass, speed and stopping time',

@@ -19,6 +19,10 @@ for (const [width, colorScheme] of [
     const first = parts.getByRole('button', { expanded: true })
     await expect(first).toHaveText(/Waves\s*governs/)
 
+    // What is entered on the wet side is one press away, also where the side is folded.
+    await parts.getByRole('button', { name: 'Enter height and period' }).click()
+    await expect(page.getByLabel('Wave height')).toBeFocused()
+
     // With the keyboard: fold it, open the air, type into it.
     const air = parts.getByRole('button', { name: /^Air/ })
     await air.focus()

@@ -34,6 +34,7 @@ export interface PartProposal {
 export interface PartSlots {
   field(props: { readonly id: FieldId }): unknown
   put(props: { readonly proposal: PartProposal }): unknown
+  enter(props: { readonly field: FieldId; readonly label: Message }): unknown
 }
 
 /** Inputs of a part with what follows from them. */
@@ -42,6 +43,8 @@ export interface PartGroup {
   readonly fields: readonly FieldId[]
   readonly rows: readonly PartRow[]
   readonly proposal?: PartProposal | null
+  /** The first of the inputs that stand elsewhere, and what leads there. */
+  readonly entered?: { readonly field: FieldId; readonly label: Message }
   readonly notes: readonly Message[]
 }
 

@@ -48,7 +48,8 @@ function wavesNow(input: PartInput): PartGroup {
     said('sectionDetails.part.waves.where'),
     ...(isActing && waveHeight > 0.35 * depth ? [said('sectionDetails.part.waves.breaking')] : []),
   ]
-  return { title: null, fields: [], rows, notes }
+  const entered = { field: 'waveHeight', label: said('sectionDetails.part.enter.waves') } as const
+  return { title: null, fields: [], rows, entered, notes }
 }
 
 function wavesGrown({ section, values }: PartInput): PartGroup {
@@ -97,6 +98,7 @@ export function currentPart({ section, evaluation }: PartInput): readonly PartGr
       title: null,
       fields: [],
       rows,
+      entered: { field: 'currentSpeed', label: said('sectionDetails.part.enter.current') },
       notes: [said('sectionDetails.part.current.where'), said('sectionDetails.part.current.drag')],
     },
   ]
@@ -121,6 +123,7 @@ export function debrisPart({ section, evaluation, values }: PartInput): readonly
       title: null,
       fields: [],
       rows,
+      entered: { field: 'debrisForce', label: said('sectionDetails.part.enter.debris') },
       notes: [said('sectionDetails.part.debris.where'), said('sectionDetails.part.debris.spread')],
     },
     {

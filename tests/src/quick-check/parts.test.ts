@@ -1,7 +1,9 @@
 import { describe, expect, it } from 'vitest'
 import { evaluateSection } from '../../../shared/checks/evaluate-section'
 import { textResolver } from '../../../shared/texts/format-text'
+import { texts } from '../../../shared/texts'
 import { sectionDetails } from '../../../shared/texts/section-details.en'
+import { actingWater } from '../../../src/quick-check/acting-water'
 import { INITIAL_VALUES } from '../../../src/quick-check/address'
 import { sectionCase, type FieldValues } from '../../../src/quick-check/case-input'
 import { FIELD_IDS, fieldOf } from '../../../src/quick-check/fields'
@@ -97,6 +99,31 @@ describe('the part that governs', () => {
 
   it('is none without a skirt', () => {
     expect(front({ skirtLength: 0, waveHeight: 0.1, wavePeriod: 2 })).toBeNull()
+  })
+})
+
+describe('what moves in the water', () => {
+  const acting = (change: Partial<FieldValues>) =>
+    actingWater(given(change).section).map(({ key, values }) =>
+      plain(textResolver(texts.en, 'metric')(values ? { key, values } : { key })),
+    )
+
+  it('is told in a line while its inputs are folded', () => {
+    expect(acting({})).toEqual(['none'])
+    expect(acting({ currentSpeed: 0.5, debrisForce: 2000 })).toEqual([
+      'current 0.50 m/s',
+      'debris 2.00 kN',
+    ])
+    expect(acting({ waveHeight: 0.1, wavePeriod: 2 })).toEqual(['waves 0.100 m'])
+  })
+
+  it('leads from each part to the first of its inputs', () => {
+    const first = (id: PartId) => PART_DETAILS[id](given())[0]!.entered?.field
+    expect([first('waves'), first('current'), first('debris')]).toEqual([
+      'waveHeight',
+      'currentSpeed',
+      'debrisForce',
+    ])
   })
 })
 
