@@ -32,6 +32,9 @@ const RESTS_ON = {
   shiftedAt: FERRY_QUAY_NOW,
 } as const
 
+/** Decided at 22:10, in a light wind; two pairs with one blower, from the lower end. */
+const PLAN = { decidedAt: Date.UTC(2031, 2, 3, 22, 10), gust: 9 }
+
 /** A tube of the catalogue from chainage to chainage; the edge is open unless it says otherwise. */
 function run(
   id: 'tube-0.50' | 'tube-0.70' | 'tube-1.00',
@@ -63,6 +66,7 @@ function content(
       suitable: isSuitable,
     })),
     rateOfRise: RISE,
+    deployment: PLAN,
   })
   return { ...parsed, ...changes }
 }
