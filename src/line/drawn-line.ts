@@ -52,7 +52,10 @@ export function flowingMarks(
 }
 
 /** Where runs overlap the later one counts: neighbours of one size are drawn as one. */
-function drawnRuns({ sizes }: ScenarioContent, sections: LineAnswer['sections']) {
+export function drawnRuns(
+  { sizes }: ScenarioContent,
+  sections: readonly { readonly from: number; readonly to: number }[],
+) {
   const runs: { from: number; to: number; diameter: number }[] = []
   for (const { from, to } of sections) {
     const middle = (from + to) / 2
