@@ -5,9 +5,11 @@ import { deploymentTexts } from './deployment.en'
 import { depotsTexts } from './depots.en'
 import { deskTexts } from './desk.en'
 import { eventTexts } from './event.en'
+import { forecastTexts } from './forecast.en'
 import { layoutTexts } from './layout.en'
 import { lineTexts } from './line.en'
 import { linePlanTexts } from './line-plan.en'
+import { orderCardTexts } from './order-card.en'
 import { projectTexts } from './project.en'
 import { scenarioTexts } from './scenario.en'
 import { sheetTexts } from './sheet.en'
@@ -25,9 +27,11 @@ export const areaTexts = {
     depotsPage: depotsTexts,
     desk: deskTexts,
     eventPage: eventTexts,
+    forecast: forecastTexts,
     layout: layoutTexts,
     linePage: lineTexts,
     linePlan: linePlanTexts,
+    orderCard: orderCardTexts,
     projectPage: projectTexts,
     scenarioPage: scenarioTexts,
     sheet: sheetTexts,

@@ -22,6 +22,13 @@ export const projectRoutes: RouteRecordRaw[] = [
     meta: { titleKey: 'projectPage.title' },
   },
   {
+    path: '/projects/:projectId/gauges/:gaugeId',
+    name: 'gauge',
+    component: () => import('@/views/GaugeView.vue'),
+    props: true,
+    meta: { titleKey: 'forecast.title' },
+  },
+  {
     path: '/projects/:projectId/lines/:lineId',
     name: 'line',
     component: () => import('@/views/LineView.vue'),
