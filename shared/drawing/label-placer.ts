@@ -103,6 +103,11 @@ export class LabelPlacer {
     return this.measure(label.message, label.size, label.weight ?? 400)
   }
 
+  /** True where the label would meet nothing at a spot, lines aside. */
+  hasRoom(label: Label, spot: Spot): boolean {
+    return this.isFree(textBox(spot, this.width(label), label.size))
+  }
+
   /** Puts the label on the first spot that is free; false: it found none. */
   place(label: Label, spots: readonly Spot[]): boolean {
     const width = this.width(label)

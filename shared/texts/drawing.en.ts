@@ -20,6 +20,7 @@ export const drawingTexts = {
   onSkirtShort: 'on the skirt {force}',
   underSkirt: 'water under the skirt {force}',
   underSkirtShort: 'under the skirt {force}',
+  forceAlone: '{force}',
   friction: 'friction resistance {force}',
   frictionShort: 'friction {force}',
   edgeOpen: 'open edge',

@@ -79,7 +79,21 @@ export function drawMarks(drawing: Composition): void {
   labelLevel(drawing)
   const marks = marksOf(drawing)
   const heights = columnHeights(drawing, marks)
-  marks.forEach((mark, index) => drawMark(drawing, mark, heights[index]!))
+  const rise = riseOf(drawing, marks, heights)
+  marks.forEach((mark, index) => drawMark(drawing, mark, heights[index]! - rise))
+}
+
+/** How far all texts of the column rise together, so that each has room [px]; 0: no rise gives it. */
+function riseOf(drawing: Composition, marks: readonly Mark[], heights: readonly number[]): number {
+  const hasRoom = (rise: number): boolean =>
+    marks.every((mark, index) =>
+      drawing.placer.hasRoom(markLabel(drawing, mark), textSpot(heights[index]! - rise)),
+    )
+  return MOVES.find(hasRoom) ?? 0
+}
+
+function textSpot(y: number): Spot {
+  return { x: TEXT_X, y, anchor: 'start' }
 }
 
 /** The level of the water, where the level of the ground is known; on a phone the depth without it. */
@@ -144,7 +158,7 @@ function columnHeights(drawing: Composition, marks: readonly Mark[]): readonly n
   return [...above, ...below]
 }
 
-/** Only downwards, so that the texts keep the order of their marks [px]. */
+/** One by one only downwards, so that the texts keep the order of their marks [px]. */
 const MOVES = [0, 6, 12, 18, 24, 30, 36, 42, 48] as const
 
 function drawMark(drawing: Composition, mark: Mark, baseline: number): void {
@@ -164,7 +178,7 @@ function drawMark(drawing: Composition, mark: Mark, baseline: number): void {
       { x: TEXT_X - 4, y: middle },
     ]),
   )
-  const spots = MOVES.map((move) => ({ x: TEXT_X, y: baseline + move, anchor: 'start' as const }))
+  const spots = MOVES.map((move) => textSpot(baseline + move))
   placer.placeOverLines(label, spots)
   if (mark.name !== 'holdsTo' || frame.layout.name === 'narrow') return
   const from = TEXT_X + placer.width(label) + 8

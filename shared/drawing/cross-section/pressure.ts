@@ -134,16 +134,16 @@ export function labelPressure(drawing: Composition): void {
   labelUnderSkirt(drawing)
 }
 
-/** A label in full, and in short for where that does not fit. */
-function bothLengths(
+/** A label in full, in short for where that does not fit, and its figure alone beside its arrows. */
+function allLengths(
   drawing: Composition,
   name: 'onSkirt' | 'underSkirt',
   role: TextRole,
   force: Quantity,
-): readonly [Label, Label] {
+): readonly [Label, Label, Label] {
   const label = (text: string) =>
     valueLabel(drawing, `${name}-value`, role, drawingText(text, { force }))
-  return [label(name), label(`${name}Short`)]
+  return [label(name), label(`${name}Short`), label('forceAlone')]
 }
 
 function labelOnSkirt(drawing: Composition): void {
@@ -168,9 +168,9 @@ function labelOnSkirt(drawing: Composition): void {
     { x: middle, y: surface - 26, anchor: 'middle' },
     { x: middle, y: surface - 44, anchor: 'middle' },
   ]
-  const [long, short] = bothLengths(drawing, 'onSkirt', 'label', force)
+  const [long, short, alone] = allLengths(drawing, 'onSkirt', 'label', force)
   if (frame.layout.name !== 'narrow' && placer.place(long, spots)) return
-  placer.place(short, spots)
+  if (!placer.place(short, spots)) placer.placeSurely(alone, spots)
 }
 
 function labelUnderSkirt(drawing: Composition): void {
@@ -192,7 +192,8 @@ function labelUnderSkirt(drawing: Composition): void {
   )
   const { cut } = frame.axis
   if (cut) spots.push(under(cut.toPx + 14, barrier.skirtLength + cut.toX))
-  const [long, short] = bothLengths(drawing, 'underSkirt', 'labelUplift', force)
+  const [long, short, alone] = allLengths(drawing, 'underSkirt', 'labelUplift', force)
   if (frame.layout.name !== 'narrow' && placer.place(long, spots)) return
-  placer.placeSurely(short, spots)
+  // Over the water it would take the room of what belongs there.
+  if (!placer.place(short, spots) && !placer.place(alone, spots)) placer.placeSurely(short, spots)
 }

@@ -139,3 +139,19 @@ it('gives every item a role that has a look', () => {
     expect(kind === 'text' ? TEXT_ROLES : SHAPE_ROLES).toContain(role)
   }
 })
+
+it.each([2.2, 4, 6.5, 9, 12, 15])(
+  'names both waters, holds-to and leave level on a phone, with a skirt of %s m',
+  (skirtLength) => {
+    for (const depth of [0.2, 0.3, 0.42, 0.5]) {
+      const section = tube({ barrier: { skirtLength }, water: { depth } })
+      const scene = draw(section, { view: NARROW, marks: { holdsTo: 0.588, leave: 0.538 } })
+      const ids = textsOf(scene).map(({ id }) => id)
+      const wanted = ['onSkirt-value', 'underSkirt-value', 'mark-holdsTo-value', 'mark-leave-value']
+      expect(
+        wanted.filter((id) => !ids.includes(id)),
+        `${depth} m`,
+      ).toEqual([])
+    }
+  },
+)
