@@ -1,5 +1,5 @@
 import { Router, type Request, type Response } from 'express'
-import { orderTexts } from '../../shared/texts/order.en'
+import { orderPageTexts } from '../../shared/texts/order-page.en'
 import { NotFoundError, TooManyRequestsError } from '../errors'
 import { senderOf } from '../http/sender'
 import { pathPart } from '../http/parse-input'
@@ -29,7 +29,7 @@ export function pages(work: OrderWork): Router {
 /** Whoever opens an order gets a page, whatever is wrong: not everybody reads JSON. */
 function sendOrder(work: OrderWork, files: PageFiles, req: Request, res: Response): void {
   res.set({ 'Cache-Control': 'no-cache', 'Referrer-Policy': 'no-referrer' })
-  const { unknownTitle, unknown, slow } = orderTexts.page
+  const { unknownTitle, unknown, slow } = orderPageTexts.page
   try {
     const row = orderOfToken(work, pathPart(req, 'token'), senderOf(req))
     const state = orderStateOf(work.db, row, work.now())

@@ -3,7 +3,7 @@ import { localText } from '../../shared/forecast/project-time'
 import { composeOrder } from '../../shared/order/compose-order'
 import { orderResolver } from '../../shared/order/order-words'
 import type { Order } from '../../shared/schemas/order'
-import { orderTexts } from '../../shared/texts/order.en'
+import { orderPageTexts } from '../../shared/texts/order-page.en'
 import { qrCode } from './qr-code'
 import type { Typesetter } from './typesetter'
 
@@ -31,7 +31,7 @@ export function orderData({ order, token, address }: IssuedOrder): unknown {
     date: localText(order.issuedAt, order.timeZone).slice(0, 10),
     paper: order.units === 'us' ? 'us-letter' : 'a4',
     language: 'en',
-    words: orderTexts.word,
+    words: orderPageTexts.word,
     lay: { ...lay, hasTimes: lay.rows.some(({ times }) => times !== '') },
     skirt: {
       ...picture,

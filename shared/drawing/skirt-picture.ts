@@ -26,8 +26,8 @@ export function skirtPicture(): Scene {
   return {
     width: WIDTH,
     height: HEIGHT,
-    title: { key: 'order.skirt.picture.title' },
-    description: [{ key: 'order.skirt.picture.describe' }],
+    title: { key: 'deploymentOrder.skirt.picture.title' },
+    description: [{ key: 'deploymentOrder.skirt.picture.describe' }],
     items: [...shapes(), ...labels()],
   }
 }
@@ -96,7 +96,7 @@ function person(): readonly SceneItem[] {
 function labels(): readonly SceneItem[] {
   const label = (key: string, role: TextRole, place: Point, anchor: TextAnchor): SceneItem => ({
     ...{ kind: 'text', id: key, role, ...place, anchor, size: TEXT_SIZE, weight: 600 },
-    message: { key: `order.skirt.picture.${key}` },
+    message: { key: `deploymentOrder.skirt.picture.${key}` },
   })
   const below = GROUND_Y + 25
   return [

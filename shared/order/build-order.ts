@@ -1,5 +1,5 @@
 import { laidSections, layoutBill } from '../checks/layout/layout-bill'
-import { checkLine, type LineAnswer } from '../checks/line-check'
+import { checkLine, type HoldingProfiles, type LineAnswer } from '../checks/line-check'
 import { waterWays } from '../checks/water-ways'
 import { OutOfRangeError } from '../errors'
 import type { DeploymentPlan } from '../schemas/deployment'
@@ -17,13 +17,14 @@ export const ROUND_EVERY = 1800
  * What a deployment order says: scenario, layout and plan computed once more, here, and put into the
  * order of the work. Same input, same order.
  *
+ * @param profiles See `checkLine`.
  * @throws OutOfRangeError where nothing at all is laid.
  */
-export function buildOrder(input: OrderInput): Order {
+export function buildOrder(input: OrderInput, profiles?: HoldingProfiles): Order {
   const { head, survey, content, gauge, resting, plan } = input
   const laid = laidSections(survey, content)
   if (laid.every(({ run }) => run === null)) throw nothingLaid()
-  const answer = checkLine(survey, content)
+  const answer = checkLine(survey, content, profiles)
   const { sectionLength } = survey
   const answers = answer.sections
   const leave = orderLeave(content, answer, resting)

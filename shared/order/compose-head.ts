@@ -5,16 +5,16 @@ export function headOf({ order, words }: OrderWork) {
   const { say, time } = words
   const { number, line, project, organisation, issuedAt, expiresAt } = order
   return {
-    title: say('order.title', { number }),
-    windowTitle: say('order.windowTitle', { number, line }),
-    place: say('order.place', { line, project: project.name }),
+    title: say('deploymentOrder.title', { number }),
+    windowTitle: say('deploymentOrder.windowTitle', { number, line }),
+    place: say('deploymentOrder.place', { line, project: project.name }),
     site: project.site,
     issue: [
-      say('order.issuedBy', { organisation }),
-      say('order.issued', { time: time(issuedAt) }),
-      say('order.expires', { time: time(expiresAt) }),
+      say('deploymentOrder.issuedBy', { organisation }),
+      say('deploymentOrder.issued', { time: time(issuedAt) }),
+      say('deploymentOrder.expires', { time: time(expiresAt) }),
     ],
-    source: say('order.madeFrom', {
+    source: say('deploymentOrder.madeFrom', {
       scenario: order.scenario,
       datum: order.datum,
       timeZone: order.timeZone,
@@ -27,8 +27,9 @@ export function headOf({ order, words }: OrderWork) {
 export function keysOf(work: OrderWork): readonly KeyFact[] {
   const { order, words } = work
   const { say } = words
-  const meet = fact('meet', say('order.key.meet'), order.meetAt)
-  const call = order.contact === '' ? [] : [fact('call', say('order.key.call'), order.contact)]
+  const meet = fact('meet', say('deploymentOrder.key.meet'), order.meetAt)
+  const call =
+    order.contact === '' ? [] : [fact('call', say('deploymentOrder.key.call'), order.contact)]
   return [meet, ...call, startOf(work), leaveOf(work), ...waterOf(work)]
 }
 
@@ -40,25 +41,34 @@ function fact(id: KeyFact['id'], label: string, value: string, more = ''): KeyFa
 function startOf({ order, words }: OrderWork): KeyFact {
   const { say, time, minutes } = words
   const { startBy, onSite, wantedMargin } = order.times
-  const label = say('order.key.start')
-  if (onSite === null) return fact('start', label, say('order.key.startNone'))
+  const label = say('deploymentOrder.key.start')
+  if (onSite === null) return fact('start', label, say('deploymentOrder.key.startNone'))
   if (startBy === null) return fact('start', label, time(onSite))
   if (onSite <= startBy) {
-    return fact('start', label, time(startBy), say('order.times.onSite', { time: time(onSite) }))
+    return fact(
+      'start',
+      label,
+      time(startBy),
+      say('deploymentOrder.times.onSite', { time: time(onSite) }),
+    )
   }
   const wanted = { margin: minutes(wantedMargin ?? 0), time: time(startBy) }
-  return fact('start', label, time(onSite), say('order.key.startWanted', wanted))
+  return fact('start', label, time(onSite), say('deploymentOrder.key.startWanted', wanted))
 }
 
 function leaveOf({ order, words }: OrderWork): KeyFact {
   const { say, level, stage } = words
   const { state, level: leave, stage: read, at } = order.leave
-  const label = say('order.key.leave')
-  if (state === 'none' || leave === null) return fact('leave', label, say('order.key.leaveNone'))
-  if (state === 'leave-now') return fact('leave', label, say('order.key.leaveNow'))
-  const until = at === null ? '' : say('order.leave.time', { time: words.time(at) })
+  const label = say('deploymentOrder.key.leave')
+  if (state === 'none' || leave === null)
+    return fact('leave', label, say('deploymentOrder.key.leaveNone'))
+  if (state === 'leave-now') return fact('leave', label, say('deploymentOrder.key.leaveNow'))
+  const until = at === null ? '' : say('deploymentOrder.leave.time', { time: words.time(at) })
   if (read === null || !order.gauge) return fact('leave', label, level(leave, 'down'), until)
-  const value = say('order.stage', { stage: stage(read, 'down'), gauge: order.gauge.name })
+  const value = say('deploymentOrder.stage', {
+    stage: stage(read, 'down'),
+    gauge: order.gauge.name,
+  })
   return fact('leave', label, value, [level(leave, 'down'), until].filter(Boolean).join(' · '))
 }
 
@@ -66,8 +76,8 @@ function waterOf({ order, words }: OrderWork): readonly KeyFact[] {
   if (order.times.layingFrom === null) return []
   const { firstWater } = order.times
   const { say, time } = words
-  const value = firstWater === null ? say('order.key.waterNone') : time(firstWater)
-  return [fact('water', say('order.key.water'), value)]
+  const value = firstWater === null ? say('deploymentOrder.key.waterNone') : time(firstWater)
+  return [fact('water', say('deploymentOrder.key.water'), value)]
 }
 
 /** A level as the crew reads it where it can, else in the datum. */
@@ -77,7 +87,7 @@ export function asRead(
 ): string {
   if (stage === null || !order.gauge) return words.level(level)
   const values = { stage: words.stage(stage), gauge: order.gauge.name, level: words.level(level) }
-  return words.say('order.onGauge', values)
+  return words.say('deploymentOrder.onGauge', values)
 }
 
 /** Verdict, and the answer before its reason. */
@@ -86,10 +96,12 @@ export function verdictOf({ order, words }: OrderWork): OrderDocument['verdict']
   const { verdict: id, holdsTo, waterLevel } = order
   const place = chainage(order.weakestAt)
   const holds = holdsTo
-    ? say('order.answer.holds', { level: level(holdsTo.level, 'down'), place })
-    : say('order.answer.none', { place })
+    ? say('deploymentOrder.answer.holds', { level: level(holdsTo.level, 'down'), place })
+    : say('deploymentOrder.answer.none', { place })
   const fails =
-    id === 'fails' && holdsTo ? [say('order.answer.fails', { water: level(waterLevel.level) })] : []
+    id === 'fails' && holdsTo
+      ? [say('deploymentOrder.answer.fails', { water: level(waterLevel.level) })]
+      : []
   return { id, word: say(`checks.verdict.${id}`), answers: [holds, ...fails] }
 }
 
@@ -98,25 +110,28 @@ export function forecastOf(work: OrderWork): TextBlock {
   const { order, words } = work
   const { say, level, time } = words
   const { forecast, waterLevel } = order
-  const title = say('order.forecast.title')
-  const checked = say('order.forecast.checked', { level: asRead(work, waterLevel) })
+  const title = say('deploymentOrder.forecast.title')
+  const checked = say('deploymentOrder.forecast.checked', { level: asRead(work, waterLevel) })
   if (!forecast) {
-    return { title, lines: [say('order.forecast.none', { level: asRead(work, waterLevel) })] }
+    return {
+      title,
+      lines: [say('deploymentOrder.forecast.none', { level: asRead(work, waterLevel) })],
+    }
   }
   const { crest, crestAt, low, high } = forecast
   const issue = { gauge: forecast.gauge, time: time(forecast.issuedAt) }
   return {
     title,
     lines: [
-      say('order.forecast.issue', issue),
-      ...(forecast.isSketch ? [say('order.forecast.sketch')] : []),
+      say('deploymentOrder.forecast.issue', issue),
+      ...(forecast.isSketch ? [say('deploymentOrder.forecast.sketch')] : []),
       ...(crest === null || crestAt === null
         ? []
-        : [say('order.forecast.crest', { level: level(crest), time: time(crestAt) })]),
+        : [say('deploymentOrder.forecast.crest', { level: level(crest), time: time(crestAt) })]),
       ...(low === null || high === null
         ? []
-        : [say('order.forecast.band', { low: level(low), high: level(high) })]),
-      say(`order.forecast.bandName.${forecast.band}`),
+        : [say('deploymentOrder.forecast.band', { low: level(low), high: level(high) })]),
+      say(`deploymentOrder.forecast.bandName.${forecast.band}`),
       checked,
     ],
   }
@@ -131,16 +146,18 @@ export function timesOf({ order, words }: OrderWork): TextBlock {
   const margin = (): readonly string[] => {
     if (worstMargin === null || worstAt === null) return []
     const values = { margin: minutes(Math.abs(worstMargin)), place: chainage(worstAt) }
-    return [say(worstMargin < 0 ? 'order.times.late' : 'order.times.margin', values)]
+    return [
+      say(worstMargin < 0 ? 'deploymentOrder.times.late' : 'deploymentOrder.times.margin', values),
+    ]
   }
   return {
-    title: say('order.times.title'),
+    title: say('deploymentOrder.times.title'),
     lines: [
-      ...at('order.times.decide', decideBy),
-      ...at('order.times.onSite', onSite),
-      ...at('order.times.laying', layingFrom),
-      ...at('order.times.finish', finish),
-      ...at('order.times.water', firstWater),
+      ...at('deploymentOrder.times.decide', decideBy),
+      ...at('deploymentOrder.times.onSite', onSite),
+      ...at('deploymentOrder.times.laying', layingFrom),
+      ...at('deploymentOrder.times.finish', finish),
+      ...at('deploymentOrder.times.water', firstWater),
       ...margin(),
     ],
   }

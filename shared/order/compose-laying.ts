@@ -24,25 +24,25 @@ export function loadOf({ order, words }: OrderWork): LoadBlock {
   const ballast = isShort
     ? [
         {
-          label: say('order.load.ballastBags'),
-          value: say('order.load.short', { count: wanted, inStore }),
+          label: say('deploymentOrder.load.ballastBags'),
+          value: say('deploymentOrder.load.short', { count: wanted, inStore }),
         },
       ]
-    : row('order.load.ballastBags', wanted)
+    : row('deploymentOrder.load.ballastBags', wanted)
   const pipes = plugs.filter(({ diameter }) => diameter !== null)
   return {
-    title: say('order.load.title'),
-    depot: store.depot === null ? '' : say('order.load.depot', { depot: store.depot }),
+    title: say('deploymentOrder.load.title'),
+    depot: store.depot === null ? '' : say('deploymentOrder.load.depot', { depot: store.depot }),
     rows: [
       ...air.map(({ tube, pieces }) => ({ label: tube, value: String(pieces) })),
-      ...row('order.load.closures', store.closures),
-      ...row('order.load.edgeBags', store.edgeBags),
+      ...row('deploymentOrder.load.closures', store.closures),
+      ...row('deploymentOrder.load.edgeBags', store.edgeBags),
       ...ballast,
-      ...row('order.load.plugs', pipes.length),
-      ...row('order.load.blowers', store.blowers),
-      ...row('order.load.crews', store.pairs),
+      ...row('deploymentOrder.load.plugs', pipes.length),
+      ...row('deploymentOrder.load.blowers', store.blowers),
+      ...row('deploymentOrder.load.crews', store.pairs),
     ],
-    also: say('order.load.always'),
+    also: say('deploymentOrder.load.always'),
   }
 }
 
@@ -56,23 +56,25 @@ export function plugsOf({ order, words }: OrderWork): PlugBlock {
       height: height(plug.shortBy),
     }
     const key = plug.isEnd ? (plug.shortBy > 0 ? 'end' : 'open') : plug.kind
-    const text = say(`order.plug.${key}`, values)
+    const text = say(`deploymentOrder.plug.${key}`, values)
     const { offset } = plug
     const side = offset === null || offset === 0 ? '' : offset > 0 ? 'dry' : 'wet'
     const where =
-      side === '' ? '' : say(`order.plug.${side}`, { distance: size(Math.abs(offset ?? 0)) })
-    const waits = plug.flows ? '' : say('order.plug.waits')
+      side === ''
+        ? ''
+        : say(`deploymentOrder.plug.${side}`, { distance: size(Math.abs(offset ?? 0)) })
+    const waits = plug.flows ? '' : say('deploymentOrder.plug.waits')
     return {
       id: `plug-${i + 1}`,
       text,
       more: [where, plug.note, waits].filter((part) => part !== '').join('. '),
-      label: say('order.tick.mark', { what: text }),
+      label: say('deploymentOrder.tick.mark', { what: text }),
     }
   })
   return {
-    title: say('order.plug.title'),
-    lead: say('order.plug.lead'),
-    none: say('order.plug.none'),
+    title: say('deploymentOrder.plug.title'),
+    lead: say('deploymentOrder.plug.lead'),
+    none: say('deploymentOrder.plug.none'),
     rows,
   }
 }
@@ -80,8 +82,8 @@ export function plugsOf({ order, words }: OrderWork): PlugBlock {
 /** The picture that says which side the water is on. */
 export function skirtOf({ words }: OrderWork): OrderDocument['skirt'] {
   return {
-    title: words.say('order.skirt.title'),
-    text: words.say('order.skirt.text'),
+    title: words.say('deploymentOrder.skirt.title'),
+    text: words.say('deploymentOrder.skirt.text'),
     scene: skirtPicture(),
   }
 }
@@ -90,10 +92,10 @@ export function skirtOf({ words }: OrderWork): OrderDocument['skirt'] {
 export function layOf(work: OrderWork): LayBlock {
   const { order, words } = work
   const { say, chainage } = words
-  const column = (name: LayColumn) => say(`order.lay.column.${name}`)
+  const column = (name: LayColumn) => say(`deploymentOrder.lay.column.${name}`)
   return {
-    title: say('order.lay.title'),
-    lead: say('order.lay.lead'),
+    title: say('deploymentOrder.lay.title'),
+    lead: say('deploymentOrder.lay.lead'),
     columns: {
       ...{ position: column('position'), place: column('place'), tube: column('tube') },
       ...{ pair: column('pair'), times: column('times'), water: column('water') },
@@ -101,7 +103,7 @@ export function layOf(work: OrderWork): LayBlock {
     },
     rows: order.sections.map((section) => layRow(work, section)),
     unlaid: order.unlaid.map(({ from, to }) =>
-      say('order.answer.unlaid', { from: chainage(from), to: chainage(to) }),
+      say('deploymentOrder.answer.unlaid', { from: chainage(from), to: chainage(to) }),
     ),
   }
 }
@@ -111,21 +113,29 @@ const some = (count: number | null): string => (count === null || count === 0 ? 
 function layRow(work: OrderWork, section: OrderSection): LayRow {
   const { say, chainage, time } = work.words
   const { position, from, to, tube, pair, start, finish, deadline, margin, verdict } = section
+  const times = start === null || finish === null ? '' : span(time(start), time(finish))
+  const water = deadline === null ? '' : time(deadline)
   return {
     id: `section-${position}`,
     position,
-    place: say('order.lay.place', { from: chainage(from), to: chainage(to) }),
+    place: say('deploymentOrder.lay.place', { from: chainage(from), to: chainage(to) }),
     tube,
     pair: some(pair),
     edgeBags: some(section.edgeBags),
     ballast: ballastOf(work, section),
     bend: bendOf(work, section),
-    times: start === null || finish === null ? '' : span(time(start), time(finish)),
-    water: deadline === null ? '' : time(deadline),
+    ...{ times, water },
+    hours: [
+      pair === null ? '' : say('deploymentOrder.lay.pair', { pair }),
+      times,
+      water === '' ? '' : say('deploymentOrder.lay.water', { time: water }),
+    ]
+      .filter((part) => part !== '')
+      .join(' · '),
     extras: extrasOf(work, section),
     isLate: margin !== null && margin < 0,
-    fails: verdict === 'fails' ? say('order.lay.fails') : '',
-    label: say('order.lay.done', { position }),
+    fails: verdict === 'fails' ? say('deploymentOrder.lay.fails') : '',
+    label: say('deploymentOrder.lay.done', { position }),
   }
 }
 
@@ -138,8 +148,8 @@ function ballastOf({ words }: OrderWork, { ballast, ballastBags }: OrderSection)
 function bendOf({ words }: OrderWork, { turn }: OrderSection): string {
   const degrees = Math.round(Math.abs(turn) / DEGREE)
   if (degrees === 0) return ''
-  const side = words.say(turn > 0 ? 'order.lay.left' : 'order.lay.right')
-  return words.say('order.lay.bend', { degrees, side })
+  const side = words.say(turn > 0 ? 'deploymentOrder.lay.left' : 'deploymentOrder.lay.right')
+  return words.say('deploymentOrder.lay.bend', { degrees, side })
 }
 
 /** From one time to another; the day stands once where it is the same. */
@@ -154,23 +164,23 @@ function extrasOf(work: OrderWork, section: OrderSection): readonly string[] {
   const bend = bendOf(work, section)
   const minutes = margin === null ? 0 : Math.ceil(-margin / 60)
   return [
-    ...(bend === '' ? [] : [say('order.lay.bends', { bend })]),
-    ...(edgeBags > 0 ? [say('order.lay.edge', { count: edgeBags })] : []),
+    ...(bend === '' ? [] : [say('deploymentOrder.lay.bends', { bend })]),
+    ...(edgeBags > 0 ? [say('deploymentOrder.lay.edge', { count: edgeBags })] : []),
     ...(ballastBags !== null && ballastBags > 0
-      ? [say('order.lay.ballast', { count: ballastBags })]
+      ? [say('deploymentOrder.lay.ballast', { count: ballastBags })]
       : ballastBags === null && ballast !== null && ballast > 0
-        ? [say('order.lay.ballastMass', { mass: mass(ballast) })]
+        ? [say('deploymentOrder.lay.ballastMass', { mass: mass(ballast) })]
         : []),
-    ...(minutes > 0 ? [say('order.lay.late', { minutes })] : []),
+    ...(minutes > 0 ? [say('deploymentOrder.lay.late', { minutes })] : []),
   ]
 }
 
 /** How hard each size is filled. */
 export function airOf({ order, words }: OrderWork): AirBlock {
   const { say, pressure } = words
-  const column = (name: string) => say(`order.air.column.${name}`)
+  const column = (name: string) => say(`deploymentOrder.air.column.${name}`)
   return {
-    title: say('order.air.title'),
+    title: say('deploymentOrder.air.title'),
     columns: {
       tube: column('tube'),
       fill: column('fill'),
@@ -184,14 +194,14 @@ export function airOf({ order, words }: OrderWork): AirBlock {
         most: most === null ? '' : pressure(most, 'down'),
       }
       const parts = [
-        say('order.air.fill', { pressure: shown.fill }),
+        say('deploymentOrder.air.fill', { pressure: shown.fill }),
         least === null
-          ? say('order.air.noWater')
-          : say('order.air.least', { pressure: shown.least }),
-        ...(most === null ? [] : [say('order.air.most', { pressure: shown.most })]),
+          ? say('deploymentOrder.air.noWater')
+          : say('deploymentOrder.air.least', { pressure: shown.least }),
+        ...(most === null ? [] : [say('deploymentOrder.air.most', { pressure: shown.most })]),
       ]
       return { tube, ...shown, sentence: parts.join(', ') }
     }),
-    notes: [say('order.air.plate'), say('order.air.cold')],
+    notes: [say('deploymentOrder.air.plate'), say('deploymentOrder.air.cold')],
   }
 }

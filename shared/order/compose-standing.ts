@@ -7,17 +7,17 @@ export function ballastOf({ order, words }: OrderWork): TextBlock {
   const isShort = bags !== null && inStore !== null && bags > inStore
   const laid =
     bags === null || gust === null
-      ? [say('order.ballast.unknown')]
+      ? [say('deploymentOrder.ballast.unknown')]
       : [
-          say('order.ballast.laid', { bags, gust: speed(gust) }),
-          ...(isShort ? [say('order.ballast.short', { inStore })] : []),
+          say('deploymentOrder.ballast.laid', { bags, gust: speed(gust) }),
+          ...(isShort ? [say('deploymentOrder.ballast.short', { inStore })] : []),
         ]
   const list = edgesOf({ order, words })
   return {
-    title: say('order.ballast.title'),
+    title: say('deploymentOrder.ballast.title'),
     lines: [
       ...laid,
-      ...(edgeBags > 0 ? [say('order.ballast.edge', { bags: edgeBags, list })] : []),
+      ...(edgeBags > 0 ? [say('deploymentOrder.ballast.edge', { bags: edgeBags, list })] : []),
     ],
   }
 }
@@ -33,7 +33,9 @@ function edgesOf({ order, words }: OrderWork): string {
   }
   const { say, chainage } = words
   return stretches
-    .map(({ from, to }) => say('order.ballast.edgeAt', { from: chainage(from), to: chainage(to) }))
+    .map(({ from, to }) =>
+      say('deploymentOrder.ballast.edgeAt', { from: chainage(from), to: chainage(to) }),
+    )
     .join(', ')
 }
 
@@ -41,13 +43,14 @@ function edgesOf({ order, words }: OrderWork): string {
 export function leaveOf({ order, words }: OrderWork): TextBlock {
   const { say, level, stage, time } = words
   const { state, level: leave, stage: read, at } = order.leave
-  const title = say('order.leave.title')
-  const count = say('order.leave.count')
-  if (state === 'none' || leave === null) return { title, lines: [say('order.leave.none'), count] }
+  const title = say('deploymentOrder.leave.title')
+  const count = say('deploymentOrder.leave.count')
+  if (state === 'none' || leave === null)
+    return { title, lines: [say('deploymentOrder.leave.none'), count] }
   const shown =
     read === null || !order.gauge
       ? level(leave, 'down')
-      : say('order.onGauge', {
+      : say('deploymentOrder.onGauge', {
           stage: stage(read, 'down'),
           gauge: order.gauge.name,
           level: level(leave, 'down'),
@@ -56,12 +59,12 @@ export function leaveOf({ order, words }: OrderWork): TextBlock {
   return {
     title,
     lines: [
-      ...(state === 'leave-now' ? [say('order.leave.now')] : []),
-      say('order.leave.at', { level: shown }),
-      ...(order.gauge ? [] : [say('order.leave.noGauge')]),
-      ...(isForecast && at !== null ? [say('order.leave.time', { time: time(at) })] : []),
-      ...(isForecast && at === null ? [say('order.leave.never')] : []),
-      ...(state === 'leave-before-level' ? [say('order.leave.early')] : []),
+      ...(state === 'leave-now' ? [say('deploymentOrder.leave.now')] : []),
+      say('deploymentOrder.leave.at', { level: shown }),
+      ...(order.gauge ? [] : [say('deploymentOrder.leave.noGauge')]),
+      ...(isForecast && at !== null ? [say('deploymentOrder.leave.time', { time: time(at) })] : []),
+      ...(isForecast && at === null ? [say('deploymentOrder.leave.never')] : []),
+      ...(state === 'leave-before-level' ? [say('deploymentOrder.leave.early')] : []),
       count,
     ],
   }
@@ -77,15 +80,15 @@ export function roundsOf({ order, words }: OrderWork): RoundBlock {
   const hasGauge = order.gauge !== null
   const triggers = TRIGGERS.filter((id) => id !== 'ahead' || hours.length > 0)
   return {
-    title: say('order.round.title', { minutes: Math.round(order.rounds.every / 60) }),
-    lead: say('order.round.lead'),
-    when: say('order.round.when'),
-    do: say('order.round.do'),
+    title: say('deploymentOrder.round.title', { minutes: Math.round(order.rounds.every / 60) }),
+    lead: say('deploymentOrder.round.lead'),
+    when: say('deploymentOrder.round.when'),
+    do: say('deploymentOrder.round.do'),
     rows: triggers.map((id) => ({
-      when: say(`order.round.${id}.when`),
-      do: say(`order.round.${id}.do`),
+      when: say(`deploymentOrder.round.${id}.when`),
+      do: say(`deploymentOrder.round.${id}.do`),
     })),
-    hoursTitle: say(hasGauge ? 'order.round.hours' : 'order.round.hoursLevel'),
+    hoursTitle: say(hasGauge ? 'deploymentOrder.round.hours' : 'deploymentOrder.round.hoursLevel'),
     hours: hours.map((hour) => ({
       time: time(hour.at),
       shown: hour.stage === null ? level(hour.level) : stage(hour.stage),
@@ -98,8 +101,8 @@ const RETRIEVAL = ['order', 'wait', 'bags', 'air', 'closures', 'plugs', 'back'] 
 /** How the line is taken up again. */
 export function retrieveOf({ words }: OrderWork): OrderDocument['retrieve'] {
   return {
-    title: words.say('order.retrieve.title'),
-    steps: RETRIEVAL.map((id) => words.say(`order.retrieve.${id}`)),
+    title: words.say('deploymentOrder.retrieve.title'),
+    steps: RETRIEVAL.map((id) => words.say(`deploymentOrder.retrieve.${id}`)),
   }
 }
 
@@ -108,7 +111,7 @@ const CAUTIONS = ['leave', 'people', 'ground', 'power', 'guarantee', 'codes'] as
 /** The cautions of every verdict, those for the crew first. */
 export function cautionsOf({ words }: OrderWork): OrderDocument['cautions'] {
   return {
-    title: words.say('order.cautions.title'),
+    title: words.say('deploymentOrder.cautions.title'),
     lines: CAUTIONS.map((id) => words.say(`shell.cautions.${id}`)),
   }
 }

@@ -85,6 +85,8 @@ export interface LayRow {
   /** "23:41 – 23:55", with the day where it is another one; empty without a plan. */
   readonly times: string
   readonly water: string
+  /** Pair, times and water in one line. */
+  readonly hours: string
   /** What is to be done besides, in sentences. */
   readonly extras: Lines
   readonly isLate: boolean

@@ -8,7 +8,11 @@ import { formatQuantity, type Quantity } from '../units'
 import type { OrderWords } from './order-document'
 
 /** Every text that an order says something with. */
-export const ORDER_TEXTS = { checks: checksTexts, order: orderTexts, shell: shellTexts } as const
+export const ORDER_TEXTS = {
+  checks: checksTexts,
+  deploymentOrder: orderTexts,
+  shell: shellTexts,
+} as const
 
 /** Turns the texts of drawings and orders into words. */
 export function orderResolver(system: Order['units']): ResolveText {
@@ -40,7 +44,7 @@ export function orderWords({
     chainage: (value) => length(value, { isBare: true, decimals: isWhole(value) ? 0 : 1 }),
     time: (moment) => dayTime(moment, timeZone),
     minutes: (value) =>
-      resolve({ key: 'order.times.minutes', values: { count: Math.round(value / 60) } }),
+      resolve({ key: 'deploymentOrder.times.minutes', values: { count: Math.round(value / 60) } }),
   }
 }
 

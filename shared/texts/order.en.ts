@@ -1,4 +1,4 @@
-/** Texts of a deployment order: its PDF and its page for phones. Short, and each one an order. */
+/** Words of a deployment order, on paper and on the page for phones alike. Short, and each an order. */
 export const orderTexts = {
   title: 'Deployment order {number}',
   windowTitle: 'Order {number} · {line}',
@@ -7,23 +7,6 @@ export const orderTexts = {
   expires: 'Good until {time}',
   issuedBy: 'Issued by {organisation}',
   madeFrom: 'Made from “{scenario}”. Levels in {datum}. Times in {timeZone}.',
-  word: {
-    page: 'Page',
-    pageOf: 'of',
-    scan: 'Scan it for the page: tick off what is done, works without signal once opened.',
-  },
-  status: {
-    'in-force': 'In force',
-    expired: 'Expired',
-    replaced: 'Replaced',
-    withdrawn: 'Withdrawn',
-  },
-  notice: {
-    expired: 'This order ran out at {time}. Do not work by it. Ask for a new one.',
-    replaced: 'Replaced by order {number} at {time}. Do not work by this one.',
-    withdrawn: 'Withdrawn at {time}: {reason}. Do not work by it.',
-    open: 'Open order {number}',
-  },
   key: {
     meet: 'Meet',
     call: 'Call',
@@ -221,26 +204,5 @@ export const orderTexts = {
   cautions: {
     title: 'Always',
   },
-  tick: {
-    plug: 'Plugged and cleared',
-    mark: 'Tick off: {what}',
-    done: 'done {time}',
-    waiting: 'not sent yet',
-    sent: 'sent',
-    progress: '{done} of {all} done',
-  },
-  page: {
-    online: 'Connected',
-    offline: 'No signal: ticks stay on this phone and are sent later',
-    kept: 'Kept on this phone',
-    notKept: 'Not kept: needs signal to open again',
-    pdf: 'Paper form (PDF)',
-    lost: 'Not sent: {count}',
-    contents: 'Parts of the order',
-    jump: { plug: 'Plug', lay: 'Lay', leave: 'Leave', round: 'Round' },
-    unknownTitle: 'No such order',
-    unknown: 'There is no order at this address. Check every sign, or scan the code again.',
-    slow: 'Too many wrong addresses from here. Wait a little and try again.',
-    broken: 'The order cannot be shown now. Try again in a moment, or use the paper form.',
-  },
+  tick: { mark: 'Tick off: {what}' },
 } as const

@@ -2,6 +2,7 @@ import { describe, expect, it } from 'vitest'
 import { texts } from '../../shared/texts'
 import { areaTexts } from '../../shared/texts/member-area'
 import { methodAreaTexts } from '../../shared/texts/method-area'
+import { orderTexts } from '../../shared/texts/order.en'
 import { sectionDetails } from '../../shared/texts/section-details.en'
 import { verifyAreaTexts } from '../../shared/texts/verify-area'
 import { sourceFiles } from '../support/source-files'
@@ -24,6 +25,8 @@ const all = {
   ...sectionDetails.en,
   ...methodAreaTexts.en,
   ...verifyAreaTexts.en,
+  // Words of documents and pages that the server writes.
+  deploymentOrder: orderTexts,
 }
 const keys = [...leaves(all).keys()]
 const AREAS = Object.keys(all).join('|')

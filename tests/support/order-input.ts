@@ -102,6 +102,8 @@ export function ferryQuayPlan(content: ScenarioContent = WEIGHED) {
   })
 }
 
+const PLAN = ferryQuayPlan()
+
 /** Everything that the order of Ferry Quay is made from. */
 export function ferryQuayOrder(changes: Partial<OrderInput> = {}): OrderInput {
   return {
@@ -124,7 +126,7 @@ export function ferryQuayOrder(changes: Partial<OrderInput> = {}): OrderInput {
     content: WEIGHED,
     gauge: { name: 'Quay board', zero: 0, correction: 0 },
     resting: { forecast: LOCK_FORECAST, band: 'expected' },
-    plan: ferryQuayPlan(),
+    plan: PLAN,
     ...changes,
   }
 }

@@ -5,7 +5,8 @@ import type { OrderDocument, TextBlock } from '../../../shared/order/order-docum
 import { orderResolver, orderWords } from '../../../shared/order/order-words'
 import type { Order } from '../../../shared/schemas/order'
 import type { OrderState } from '../../../shared/schemas/order-api'
-import { orderTexts } from '../../../shared/texts/order.en'
+import { textResolver } from '../../../shared/texts/format-text'
+import { orderPageTexts } from '../../../shared/texts/order-page.en'
 import { markup, type Markup, NOTHING } from '../markup'
 import type { PageFiles } from '../page-files'
 import { document } from './document'
@@ -36,7 +37,7 @@ ${textBlock(words.forecast, 'forecast')}
 ${loadBlock(words.load)}
 ${plugBlock(words.plugs)}
 ${skirtOf(order, words.skirt)}
-${layBlock(words.lay, orderTexts.lay.water)}
+${layBlock(words.lay)}
 ${airBlock(words.air)}
 ${textBlock(words.ballast, 'ballast')}
 ${textBlock(words.times, 'times')}
@@ -68,18 +69,20 @@ ${note === '' ? NOTHING : markup`<p class="note">${note}</p>`}
 function noticeOf({ order, state }: ShownOrder): Markup {
   const { status, replacedBy, withdrawnAt, expiresAt, reason } = state
   if (status === 'in-force') return markup`<p id="notice" class="notice" role="alert" hidden></p>`
-  const { say, time } = orderWords(order)
+  const { time } = orderWords(order)
+  const resolve = textResolver(orderPageTexts, order.units)
   const moment = replacedBy?.at ?? withdrawnAt ?? expiresAt
   const number = replacedBy?.number ?? ''
-  const text = say(`order.notice.${status}`, { time: time(moment), reason, number })
+  const values = { time: time(moment), reason, number }
+  const text = resolve({ key: `notice.${status}`, values })
   const link = replacedBy
-    ? markup` <a href="/order/${replacedBy.token}">${say('order.notice.open', { number })}</a>`
+    ? markup` <a href="/order/${replacedBy.token}">${resolve({ key: 'notice.open', values })}</a>`
     : NOTHING
   return markup`<p id="notice" class="notice" role="alert">${text}${link}</p>`
 }
 
 function jumps(): Markup {
-  const { contents, jump } = orderTexts.page
+  const { contents, jump } = orderPageTexts.page
   const links = (['plug', 'lay', 'leave', 'round'] as const).map(
     (id) => markup`<a href="#${id}">${jump[id]}</a>`,
   )
@@ -113,7 +116,7 @@ function skirtOf({ units }: Order, { title, text, scene }: OrderDocument['skirt'
 }
 
 function footOf({ source }: OrderDocument, token: string): Markup {
-  return markup`<footer><p><a class="button" href="/api/orders/${token}/order.pdf">${orderTexts.page.pdf}</a></p>
+  return markup`<footer><p><a class="button" href="/api/orders/${token}/order.pdf">${orderPageTexts.page.pdf}</a></p>
 <p class="quiet">${source}</p></footer>`
 }
 

@@ -39,22 +39,20 @@ export function plugBlock({ title, lead, none, rows }: PlugBlock): Markup {
   return markup`<section id="plug"><h2>${title}</h2><p>${lead}</p><ul class="ticks">${ticks}</ul></section>`
 }
 
-/** @param water Words before the hour at which the water comes: "water {time}". */
-export function layBlock({ title, lead, rows, unlaid }: LayBlock, water: string): Markup {
+export function layBlock({ title, lead, rows, unlaid }: LayBlock): Markup {
   const warnings = unlaid.map((text) => markup`<p class="warn">${text}</p>`)
-  const ticks = rows.map((row) => tickRow(row.id, row.label, sectionOf(row, water)))
+  const ticks = rows.map((row) => tickRow(row.id, row.label, sectionOf(row)))
   return markup`<section id="lay"><h2>${title}</h2><p>${lead}</p>${warnings}
 <ol class="ticks">${ticks}</ol></section>`
 }
 
-function sectionOf(row: LayRow, water: string): Markup {
-  const { position, place, tube, times, isLate, fails, extras } = row
-  const hours = [times, row.water === '' ? '' : water.replace('{time}', row.water)]
+function sectionOf(row: LayRow): Markup {
+  const { position, place, tube, hours, isLate, fails, extras } = row
   const late = isLate ? ' late' : ''
   const line = (text: string, kind: string) =>
     text === '' ? NOTHING : markup`<span class="${kind}">${text}</span>`
   return markup`<b><i>${position}</i> ${place} · ${tube}</b>
-${line(hours.filter((part) => part !== '').join(' · '), `hours${late}`)}
+${line(hours, `hours${late}`)}
 ${line(extras.join(' · '), 'extra')}${line(fails, 'warn')}`
 }
 

@@ -1,6 +1,6 @@
-import { orderTexts } from '../../../shared/texts/order.en'
+import { orderPageTexts } from '../../../shared/texts/order-page.en'
 
-const { tick, page, notice } = orderTexts
+const { tick, page, notice } = orderPageTexts
 
 /** Words that the script of the page needs, by the names under which it asks for them. */
 export const SCRIPT_WORDS: Readonly<Record<string, string>> = {

@@ -1,12 +1,18 @@
 import { describe, expect, it } from 'vitest'
+import type { HoldingProfiles } from '../../../shared/checks/line-check'
 import { OutOfRangeError } from '../../../shared/errors'
-import { buildOrder } from '../../../shared/order/build-order'
+import { buildOrder as build } from '../../../shared/order/build-order'
+import type { OrderInput } from '../../../shared/order/order-input'
 import { composeOrder } from '../../../shared/order/compose-order'
 import { mostPressure } from '../../../shared/order/order-air'
 import { orderStatus } from '../../../shared/order/order-status'
 import { readToken, tokenFrom } from '../../../shared/order/order-token'
 import { orderSchema } from '../../../shared/schemas/order'
 import { ferryQuayOrder, ferryQuayPlan, floodHour, WEIGHED } from '../../support/order-input'
+
+/** Most of these orders are of the same sections. */
+const profiles: HoldingProfiles = new Map()
+const buildOrder = (input: OrderInput) => build(input, profiles)
 
 const order = buildOrder(ferryQuayOrder())
 const words = composeOrder(order)
