@@ -42,3 +42,20 @@ function encoded(picture: Sharp, type: 'image/jpeg' | 'image/png' | 'image/webp'
   if (type === 'image/jpeg') return picture.jpeg({ quality: 88 })
   return type === 'image/png' ? picture.png() : picture.webp({ quality: 88 })
 }
+
+/** Longest side of a photograph in print, 8 cm wide at 400 dpi [pixel]. */
+const PRINT_SIDE = 1280
+
+/** A photograph as JPEG, as large as print needs it; null where it cannot be read. */
+export async function printImage(bytes: Uint8Array): Promise<Buffer | null> {
+  try {
+    return await sharp(bytes, READING)
+      .autoOrient()
+      .resize(PRINT_SIDE, PRINT_SIDE, { fit: 'inside', withoutEnlargement: true })
+      .flatten({ background: '#ffffff' })
+      .jpeg({ quality: 82 })
+      .toBuffer()
+  } catch {
+    return null
+  }
+}

@@ -10,6 +10,7 @@ import {
   sheetSchema,
 } from './sheet'
 import { SHEET_STATUSES } from './sheet-status'
+import { UNIT_SYSTEMS } from '../units'
 
 const person = z.strictObject({ id: z.string(), name: z.string(), organisation: z.string() })
 const reasonSchema = z.string().trim().max(400)
@@ -52,8 +53,23 @@ const scenarioSource = z.strictObject({
 /** `POST /api/projects/:projectId/sheets` */
 export const newSheetSchema = sheetWords.partial().extend(scenarioSource.shape)
 
+/** A photograph of the project's files, with what it shows. */
+const photographSchema = z.strictObject({
+  fileId: z.string().min(1).max(80),
+  caption: z.string().trim().max(300),
+})
+
+/** All that somebody writes of a draft beside its figures. */
+export const draftWordsSchema = sheetWords.extend({
+  title: z.string().trim().min(1).max(200),
+  project: sheetSchema.shape.project,
+  units: z.enum(UNIT_SYSTEMS),
+  photographs: z.array(photographSchema).max(24),
+})
+export type DraftWords = z.output<typeof draftWordsSchema>
+
 /** `PATCH …/sheets/:sheetId`; with `source` its figures are taken from a scenario anew. */
-export const sheetChangeSchema = sheetWords
+export const sheetChangeSchema = draftWordsSchema
   .partial()
   .extend({ version: versionSchema, source: scenarioSource.optional() })
 

@@ -4,10 +4,12 @@ import type {
   commentChangeSchema,
   newCommentSchema,
   newSheetSchema,
+  sheetChangeSchema,
   sheetChangesSchema,
   sheetMarkChangeSchema,
   sheetMoveSchema,
   SheetRecord,
+  SheetSettings,
   sheetsPageSchema,
 } from '@shared/schemas/sheet-api'
 import { queryOf, type ListQuery } from './list-query'
@@ -48,6 +50,30 @@ export async function fetchSheet(sheet: SheetRef, signal?: AbortSignal): Promise
 
 export async function createSheet(projectId: string, sheet: NewSheet): Promise<SheetRecord> {
   return (await sendJson('POST', path(projectId), sheet)) as SheetRecord
+}
+
+/** Changes words of a draft, or takes its figures from its scenario anew. */
+export async function changeSheet(
+  sheet: SheetRef,
+  change: z.input<typeof sheetChangeSchema>,
+): Promise<SheetRecord> {
+  return (await sendJson('PATCH', one(sheet), change)) as SheetRecord
+}
+
+const settingsPath = (projectId: string) => `${projectPath(projectId)}/sheet-settings`
+
+export async function fetchSheetSettings(
+  projectId: string,
+  signal?: AbortSignal,
+): Promise<SheetSettings> {
+  return (await getJson(settingsPath(projectId), signal)) as SheetSettings
+}
+
+export async function changeSheetSettings(
+  projectId: string,
+  settings: SheetSettings,
+): Promise<SheetSettings> {
+  return (await sendJson('PUT', settingsPath(projectId), settings)) as SheetSettings
 }
 
 /** The sheet to look at next; null after a draft was deleted. */

@@ -6,6 +6,7 @@ import {
 } from '../../../shared/access/sheet-moves'
 import type { SheetSettings } from '../../../shared/schemas/sheet-api'
 import type { SheetStatus } from '../../../shared/schemas/sheet-status'
+import { draftWords } from '../../../shared/sheet/draft-words'
 import type { Db } from '../../db/client'
 import { ConflictError, ForbiddenError, NotFoundError } from '../../errors'
 import { openProject } from '../projects/open-project'
@@ -90,11 +91,12 @@ export function isEditor({ member }: SheetActor): boolean {
   return member === 'lead' || member === 'editor'
 }
 
-/** @throws ConflictError where somebody changed the sheet meanwhile. */
+/** @throws ConflictError with the words that are there now, where somebody changed the sheet meanwhile. */
 export function assertSheetVersion(row: SheetRow, madeOn: number): void {
   if (row.version === madeOn) return
   throw new ConflictError(
     `${nameOf(row)} was changed meanwhile: version ${row.version} is there, ` +
       `yours was made on ${madeOn}. Load it again, then repeat your change.`,
+    { version: row.version, ...draftWords(row.content) },
   )
 }

@@ -29,6 +29,7 @@ import {
 import { dayIn, draftContent, sourced } from './sheet-content'
 import { nextNumber, nextRevision } from './sheet-numbers'
 import { assertDerives } from './composing'
+import { printedPhotographs } from './sheet-photographs'
 import type { SheetPlace, SheetWork } from './sheet-work'
 import {
   countSheets,
@@ -148,8 +149,8 @@ function insertDraft(
 }
 
 /**
- * Changes words of a draft, or takes its figures from a scenario anew; new figures take ticks and own
- * figures away, because they were made on the old ones.
+ * Changes words of a draft, or takes its figures from a scenario anew; new figures, or the same in other
+ * units, take ticks and own figures away, because they were made on the old ones.
  *
  * @throws ForbiddenError for anybody but the preparer; ConflictError past the draft, or on an older version.
  */
@@ -157,16 +158,25 @@ export async function changeSheet(
   work: SheetWork,
   actor: SignedIn,
   place: SheetPlace,
-  { version, source, ...words }: Change,
+  { version, source, title, photographs, ...words }: Change,
 ): Promise<void> {
   const before = changeable(work.db, actor, place, version)
+  const given = { ...words, title, photographs, source }
+  const fields = Object.entries(given).flatMap(([name, value]) =>
+    value === undefined ? [] : [name],
+  )
   const fresh = source ? sourced(work.db, place.projectId, source) : null
-  const content = { ...before.content, ...words, ...fresh?.part }
-  if (fresh) await assertDerives(content)
+  const content: Sheet = {
+    ...{ ...before.content, ...words, ...fresh?.part },
+    ...(title === undefined ? {} : { place: title }),
+    ...(photographs ? { photographs: await printedPhotographs(work, before, photographs) } : {}),
+  }
+  const isNew = fresh !== null || content.units !== before.content.units
+  if (isNew) await assertDerives(content)
   change(work, actor, (deed) => {
     const { tx, at, by } = deed
     const row = changeable(tx, actor, place, version)
-    if (fresh) deleteMarks(tx, row.id)
+    if (isNew) deleteMarks(tx, row.id)
     const changed = { updatedAt: at, updatedBy: by.accountId, version: version + 1 }
     const { category } = content
     updateSheet(tx, row.id, { content, category, ...fresh?.columns, ...changed })
@@ -175,7 +185,7 @@ export async function changeSheet(
       action: 'sheet.changed',
       fromVersion: version,
       toVersion: version + 1,
-      detail: { fields: [...Object.keys(words), ...(source ? ['source'] : [])] },
+      detail: { fields },
     })
   })
 }

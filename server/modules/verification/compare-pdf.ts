@@ -3,7 +3,9 @@ import type { VerifiedFile } from '../../../shared/schemas/verification'
 import { answerCover } from '../../../shared/sheet/answer-cover'
 import { digestText } from '../../../shared/sheet/sheet-digest'
 import { readCode } from '../../../shared/sheet/verification-code'
+import { changeRows } from '../../../shared/sheet/change-rows'
 import { sheetChanges } from '../../../shared/sheet/sheet-changes'
+import { sheetWords } from '../../../shared/sheet/sheet-words'
 import type { ReadPdf } from './read-pdf'
 
 type Differences = VerifiedFile['differences']
@@ -55,10 +57,11 @@ export function differencesIn(pdf: ReadPdf, content: Sheet, issued: ReadPdf): Di
 
 function insideDifferences(issued: Sheet, found: Sheet): Differences {
   if (digestText(issued) === digestText(found)) return []
-  const listed = sheetChanges(issued, found).map(({ path, before, after }) => ({
-    where: path,
-    issued: String(before ?? ''),
-    found: String(after ?? ''),
+  const words = sheetWords(issued.units, issued.datum)
+  const listed = changeRows(sheetChanges(issued, found), words).map(({ name, before, after }) => ({
+    where: name,
+    issued: before,
+    found: after,
   }))
   // Names and dates are left out of the list of figures, and count all the same.
   return listed.length > 0 ? listed : [{ where: 'sheet.json', issued: '', found: '' }]

@@ -102,7 +102,7 @@ describe('a report that a sheet went into', { timeout: 120_000 }, () => {
     const answer = await upload(server, edited)
     expect(answer.answer).toBe('changed')
     expect(answer.differences).toContainEqual({
-      where: 'case.ground.friction',
+      where: 'Friction, skirt on ground',
       issued: String(friction),
       found: '0.75',
     })

@@ -209,9 +209,9 @@ describe('a file that somebody holds', { timeout: 60_000 }, () => {
     const tampered = await upload(server, (await frozenDocument(louder)).pdf)
     expect(tampered.answer).toBe('changed')
     expect(tampered.differences).toContainEqual({
-      where: 'groundLevel',
-      issued: String(content.groundLevel),
-      found: String(louder.groundLevel),
+      where: 'Ground level at the weld line',
+      issued: `${content.groundLevel!.toFixed(3)}\u00a0m`,
+      found: `${louder.groundLevel.toFixed(3)}\u00a0m`,
     })
     expect(tampered.differences.some(({ where }) => /^Page \d/.test(where))).toBe(true)
 
