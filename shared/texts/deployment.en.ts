@@ -104,8 +104,9 @@ export const deploymentTexts = {
     pair: 'Pair {number}',
     sections: 'Sections by chainage, and the water that comes to them',
     chainage: 'ch {chainage}',
-    late: '{minutes} min late',
-    left: '{minutes} min left',
+    margin: 'Margin',
+    late: '{minutes} late',
+    left: '{minutes} min',
     describe: {
       work: '{pairs} pairs lay {sections} sections from {from} to {to}.',
       late: 'Ch {chainage} is finished {minutes} min after the water has come.',

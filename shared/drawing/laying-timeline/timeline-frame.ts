@@ -27,6 +27,8 @@ const LANE = 26
 const HOUR = 3_600_000
 /** Steps of the axis [ms]. */
 const STEPS = [0.25, 0.5, 1, 2, 3, 6, 12, 24, 48, 96].map((hours) => hours * HOUR)
+/** Room for the margins at the right, in heights of letters. */
+const MARGIN_COLUMN = 4.6
 /** Room for one tick [px]. */
 const TICK = 58
 /** Water that comes later than this share of the whole work after its end is not drawn. */
@@ -37,7 +39,7 @@ export function timelineFrame(input: TimelineInput): TimelineFrame {
   const { plan, width } = input
   const font = width >= 520 ? 12.5 : 11
   const left = 10 + font * 4.4
-  const right = width - 12
+  const right = width - 10 - font * MARGIN_COLUMN
   const { from, to } = spanOf(plan)
   const row = rowHeight(plan.sections.length)
   const lanesTop = font + 12

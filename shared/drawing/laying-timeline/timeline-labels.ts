@@ -30,7 +30,7 @@ export function labelTimeline(
   placer.place({ ...heading, size: size - 1 }, [
     { x: frame.left, y: frame.sectionsTop - 7, anchor: 'start' },
   ])
-  labelWorst(input, frame, placer)
+  labelMargins(input, frame, placer)
   labelRows(frame, placer)
   labelBars(input, frame, placer)
 }
@@ -80,26 +80,28 @@ function labelBars({ plan }: TimelineInput, frame: TimelineFrame, placer: LabelP
   }
 }
 
-function labelWorst({ plan }: TimelineInput, frame: TimelineFrame, placer: LabelPlacer): void {
-  const worst = plan.worst[plan.judgedBy]
-  if (!worst) return
-  const { section, y } = frame.rows.find((one) => one.section.position === worst.position)!
-  const minutes = Math.round(Math.abs(worst.margin) / 60)
-  const isLate = worst.margin < 0
-  const size = frame.font
-  const at = Math.max(section.finish, isLate ? 0 : section.deadline[plan.judgedBy]!)
-  const x = frame.toX(Math.min(at, frame.to))
-  const label = {
-    id: 'worst',
-    role: isLate ? 'labelFails' : 'labelHolds',
-    message: own(isLate ? 'late' : 'left', { minutes }),
-  } as const
-  const beside = [0, -frame.row, frame.row]
-  placer.placeSurely({ ...label, size, weight: 600 }, [
-    ...beside.map((dy) => ({ x: x + 6, y: y + dy + size * 0.35, anchor: 'start' as const })),
-    ...beside.map((dy) => ({
-      ...{ x: frame.toX(section.start) - 6, y: y + dy + size * 0.35 },
-      anchor: 'end' as const,
-    })),
-  ])
+/** The margin of each section beside its row; the worst stands out. */
+function labelMargins({ plan }: TimelineInput, frame: TimelineFrame, placer: LabelPlacer): void {
+  const { rows, row, font, right, sectionsTop } = frame
+  const worst = plan.worst[plan.judgedBy]?.position
+  if (worst === undefined) return
+  const x = right + font * 4.6
+  const heading = { id: 'margins', role: 'labelQuiet', message: own('margin') } as const
+  placer.place({ ...heading, size: font - 1 }, [{ x, y: sectionsTop - 7, anchor: 'end' }])
+  const every = Math.max(1, Math.ceil(NAMED_ROW / row))
+  const shown = rows.filter(({ section }, i) => i % every === 0 || section.position === worst)
+  // The worst first, so that nothing takes its place.
+  shown.sort((a, b) => Number(b.section.position === worst) - Number(a.section.position === worst))
+  for (const { section, y } of shown) {
+    const margin = section.margin[plan.judgedBy]
+    if (margin === null) continue
+    const isLate = margin < 0
+    const isWorst = section.position === worst
+    const minutes = Math.max(isLate ? 1 : 0, Math.round(Math.abs(margin) / 60))
+    const role = isLate ? 'labelFails' : isWorst ? 'labelHolds' : 'labelQuiet'
+    const label = { id: `margin-${section.position}`, role, size: font - 1 } as const
+    const message = own(isLate ? 'late' : 'left', { minutes })
+    const weight = isWorst || isLate ? 600 : 400
+    placer.place({ ...label, message, weight }, [{ x, y: y + font * 0.33, anchor: 'end' }])
+  }
 }

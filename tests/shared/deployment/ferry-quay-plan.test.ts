@@ -1,35 +1,16 @@
 import { describe, expect, it } from 'vitest'
-import { OFF_THE_GRAVEL_STATIONS } from '../../../server/demo/ferry-quay-lines'
-import { LOW_ROAD_SCENARIOS } from '../../../server/demo/ferry-quay-scenarios'
-import { MILL_LANE, WORKS_YARD } from '../../../server/demo/ferry-quay-store'
 import { compareOrders, gains } from '../../../shared/deployment/compare-orders'
 import { deploymentPlan } from '../../../shared/deployment/deployment-plan'
-import type { DeploymentInput } from '../../../shared/deployment/groundwork'
-import {
-  deploymentSettingsSchema,
-  LAYING_ORDERS,
-  type DeploymentSettings,
-} from '../../../shared/schemas/deployment'
-import { forecastLevels, quayMoment } from './forecast-levels'
+import { LAYING_ORDERS } from '../../../shared/schemas/deployment'
+import { ferryQuayInput, OPEN_EDGE } from './ferry-quay-input'
+import { quayMoment } from './forecast-levels'
 
 const MINUTE = 60
-const CONTENT = LOW_ROAD_SCENARIOS.find(({ key }) => key === 'open-edge')!.content
-
-function input(changes: Partial<DeploymentSettings> = {}): DeploymentInput {
-  const settings = deploymentSettingsSchema.parse({ gust: 9, ...changes })
-  return {
-    survey: { stations: OFF_THE_GRAVEL_STATIONS, sectionLength: 10, marks: [] },
-    content: CONTENT,
-    settings: { ...settings, decidedAt: quayMoment('22:10') },
-    depots: [MILL_LANE, WORKS_YARD],
-    levels: forecastLevels,
-  }
-}
 
 const minutes = (seconds: number | null) => Math.round((seconds ?? NaN) / MINUTE)
 
 describe('Ferry Quay laid by two pairs with one blower', () => {
-  const plan = deploymentPlan(input())
+  const plan = deploymentPlan(ferryQuayInput())
 
   it('is on site at 23:20 and lays from 23:40 on', () => {
     expect(plan.onSite).toBe(quayMoment('23:20'))
@@ -75,7 +56,7 @@ describe('Ferry Quay laid by two pairs with one blower', () => {
   })
 
   it('leaves 36 min outward from the slipway, and proves that no joined order leaves more', () => {
-    const rows = compareOrders(input())
+    const rows = compareOrders(ferryQuayInput())
     const of = (order: string) => rows.find((row) => row.order === order)!
     expect(rows.map(({ order }) => order)).toEqual([...LAYING_ORDERS])
     expect(of('outward').begins).toBe(40)
@@ -87,7 +68,7 @@ describe('Ferry Quay laid by two pairs with one blower', () => {
 
   it('gains what an independent program found: a blower 4 to 9, a third pair 37 to 61 min', () => {
     for (const order of ['from-start', 'outward', 'lowest-first'] as const) {
-      const [pair, blower] = gains(input({ order }))
+      const [pair, blower] = gains(ferryQuayInput({ order }))
       for (const gain of [blower!.finish, blower!.margin!]) {
         expect(minutes(gain)).toBeGreaterThanOrEqual(4)
         expect(minutes(gain)).toBeLessThanOrEqual(9)
@@ -102,9 +83,9 @@ describe('Ferry Quay laid by two pairs with one blower', () => {
   })
 
   it('decides at the latest moment so that exactly the wanted margin is left', () => {
-    const wanted = deploymentPlan(input({ wantedMargin: 15 * MINUTE, order: 'outward' }))
+    const wanted = deploymentPlan(ferryQuayInput({ wantedMargin: 15 * MINUTE, order: 'outward' }))
     const start = wanted.decideBy.expected!
-    const late = input({ order: 'outward' })
+    const late = ferryQuayInput({ order: 'outward' })
     const again = deploymentPlan({ ...late, settings: { ...late.settings, decidedAt: start } })
     expect(again.worst.expected!.margin).toBeCloseTo(15 * MINUTE, 2)
     // T0 = T1 − mobilisation of 70 min.
@@ -119,7 +100,7 @@ describe('Ferry Quay laid by two pairs with one blower', () => {
 })
 
 describe('ballast at Ferry Quay before the water', () => {
-  const plan = deploymentPlan(input())
+  const plan = deploymentPlan(ferryQuayInput())
 
   it.each([
     ['turf, 0.50 m', 160, 6.9],
@@ -139,11 +120,11 @@ describe('ballast at Ferry Quay before the water', () => {
 
   it('needs three times as many in a gust of 14 m/s', () => {
     // An independent program: 306. It has ch 140 to 150 on asphalt; its last 2 m are turf.
-    expect(deploymentPlan(input({ gust: 14 })).ballast!.bags).toBe(308)
+    expect(deploymentPlan(ferryQuayInput({ gust: 14 })).ballast!.bags).toBe(308)
   })
 
   it('says nothing of ballast without a gust', () => {
-    const calm = deploymentPlan(input({ gust: null }))
+    const calm = deploymentPlan(ferryQuayInput({ gust: null }))
     expect(calm.ballast).toBeNull()
     expect(calm.sections[0]!.ballast).toBeNull()
   })
@@ -153,9 +134,9 @@ describe('settings of a plan', () => {
   it('takes times of its own for a size, and lays bags on a weighed edge as a step', () => {
     const times = { carry: 60, unroll: 60, align: 60, fill: 60, join: 60, ballast: 60 }
     const sizeTimes = [{ diameter: 1, times }]
-    const edges = CONTENT.sizes.map((run) => ({ ...run, edgeFactor: 0.5 }))
-    const asked = input({ sizeTimes, edgeBagTime: 45 })
-    const plan = deploymentPlan({ ...asked, content: { ...CONTENT, sizes: edges } })
+    const edges = OPEN_EDGE.sizes.map((run) => ({ ...run, edgeFactor: 0.5 }))
+    const asked = ferryQuayInput({ sizeTimes, edgeBagTime: 45 })
+    const plan = deploymentPlan({ ...asked, content: { ...OPEN_EDGE, sizes: edges } })
     const [first] = plan.sections.filter(({ barrier }) => barrier.diameter === 1)
     expect(first!.steps.map(({ step }) => step).at(-1)).toBe('edge')
     // 20 bags on 10 m at 45 s, after six steps of a minute.
@@ -165,7 +146,7 @@ describe('settings of a plan', () => {
   })
 
   it('takes a pair that no depot has to come with the last that one has', () => {
-    const plan = deploymentPlan(input({ pairs: 4 }))
+    const plan = deploymentPlan(ferryQuayInput({ pairs: 4 }))
     expect(plan.pairs.map(({ depot }) => depot)).toEqual([
       ...['Mill Lane', 'Mill Lane', 'Mill Lane'],
       null,
@@ -174,7 +155,7 @@ describe('settings of a plan', () => {
   })
 
   it('goes without depots by times of its own', () => {
-    const asked = input({ callOutTime: 600, loadTime: 600, driveTime: 600 })
+    const asked = ferryQuayInput({ callOutTime: 600, loadTime: 600, driveTime: 600 })
     const plan = deploymentPlan({ ...asked, depots: [] })
     expect(plan.onSite - plan.decidedAt).toBe(1800 * 1000)
     expect(plan.mobilisation.depot).toBeNull()
@@ -182,9 +163,9 @@ describe('settings of a plan', () => {
   })
 
   it('has no margin without a forecast, and says which sections nobody lays', () => {
-    const asked = input()
-    const sizes = CONTENT.sizes.filter(({ from }) => from !== 20)
-    const plan = deploymentPlan({ ...asked, content: { ...CONTENT, sizes }, levels: {} })
+    const asked = ferryQuayInput()
+    const sizes = OPEN_EDGE.sizes.filter(({ from }) => from !== 20)
+    const plan = deploymentPlan({ ...asked, content: { ...OPEN_EDGE, sizes }, levels: {} })
     expect(plan.worst).toEqual({ low: null, expected: null, high: null })
     expect(plan.decideBy.expected).toBeNull()
     expect(plan.unlaid.map(({ from }) => from)).toEqual([20, 30])
