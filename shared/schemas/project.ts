@@ -248,6 +248,20 @@ export const fileChangeSchema = z.strictObject({
 /** `GET /api/desk`: my projects, sheets that wait for me, what changed. */
 export const deskSchema = z.strictObject({
   projects: z.array(projectSchema),
+  /** The longest waiting first. */
+  waiting: z.array(
+    z.strictObject({
+      id: z.string(),
+      number: z.string(),
+      revision: z.string(),
+      place: z.string(),
+      what: z
+        .enum(['check', 'approve', 'submit'])
+        .meta({ description: 'What I can do; submit: it was returned to me' }),
+      since: momentSchema,
+      project: z.strictObject({ id: z.string(), name: z.string() }),
+    }),
+  ),
   changes: z.array(
     z.strictObject({
       at: momentSchema,

@@ -4,6 +4,13 @@ export const deskTexts = {
   what: 'the desk',
   projects: 'My projects',
   all: 'All projects',
+  waiting: 'Sheets that wait for me',
+  wait: {
+    check: 'To check',
+    approve: 'To approve',
+    submit: 'Returned to me',
+  },
+  waitingSince: '{place} · {project}, since {at}',
   changes: 'What changed',
   noChanges: 'Nothing has changed yet.',
   counts: '{lines} lines, {scenarios} scenarios',

@@ -9,7 +9,7 @@ export function deskOperations(db: Db): readonly Operation[] {
       method: 'get',
       path: '/api/desk',
       id: 'readDesk',
-      summary: 'My projects, the last changed first, and what changed in them',
+      summary: 'My projects, the last changed first, sheets that wait for me, and what changed',
       rule: 'signed-in',
       response: deskSchema,
       problems: [],

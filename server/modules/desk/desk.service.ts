@@ -4,6 +4,7 @@ import type { Db } from '../../db/client'
 import type { SignedIn } from '../../http/operation'
 import { listRecentProjects } from '../projects/projects.queries'
 import { shownProject } from '../projects/projects.service'
+import { waitingSheets } from '../sheets/waiting-sheets.service'
 import { findLineOfScenario, listChanges } from './desk.queries'
 
 type Desk = z.output<typeof deskSchema>
@@ -24,6 +25,7 @@ export function readDesk(db: Db, actor: SignedIn): Desk {
     .slice(0, MOST_CHANGES)
   return {
     projects: rows.map((row) => shownProject(row, actor)),
+    waiting: [...waitingSheets(db, actor)],
     changes: changes.map((entry) => shownChange(db, entry)),
   }
 }

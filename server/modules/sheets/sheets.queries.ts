@@ -8,6 +8,7 @@ import type { Db } from '../../db/client'
 import {
   accounts,
   projectMembers,
+  projects,
   sheetComments,
   sheetFiles,
   sheets,
@@ -66,6 +67,24 @@ export function findOwnSheetProject(db: Db, sheetId: string, accountId: string) 
     .innerJoin(projectMembers, eq(projectMembers.projectId, sheets.projectId))
     .where(and(eq(sheets.id, sheetId), eq(projectMembers.accountId, accountId)))
     .get()
+}
+
+/** Sheets on their way in projects of an account that are not archived; the longest waiting first. */
+export function listOnTheirWay(db: Db, accountId: string, statuses: readonly SheetStatus[]) {
+  return db
+    .select({ sheet: sheets, project: { id: projects.id, name: projects.name } })
+    .from(sheets)
+    .innerJoin(projects, eq(projects.id, sheets.projectId))
+    .innerJoin(projectMembers, eq(projectMembers.projectId, sheets.projectId))
+    .where(
+      and(
+        eq(projectMembers.accountId, accountId),
+        isNull(projects.archivedAt),
+        inArray(sheets.status, [...statuses]),
+      ),
+    )
+    .orderBy(asc(sheets.updatedAt), asc(sheets.id))
+    .all()
 }
 
 /** All revisions of a number, the oldest first. */

@@ -3,6 +3,7 @@ import type { AddressInfo } from 'node:net'
 import { sql } from 'drizzle-orm'
 import { describe, expect, it, onTestFinished, vi } from 'vitest'
 import { SHEET_MOVES, type SheetMove } from '../../../../shared/access/sheet-moves'
+import { deskSchema } from '../../../../shared/schemas/project'
 import { SHEET_STATUSES, type SheetStatus } from '../../../../shared/schemas/sheet-status'
 import { DEMO_PEOPLE } from '../../../../server/demo/demo-people'
 import { as, type Person, projectServer } from '../../../support/project-server'
@@ -167,6 +168,34 @@ describe('the table of moves, walked through the API', { timeout: 60_000 }, () =
     const answer = await move('checker', 'return')
     expect(answer.status).toBe(400)
     expect(answer.text).toContain('reason')
+  })
+
+  it('puts a sheet on the desk of whoever can take it on, and of nobody else', async () => {
+    const server = projectServer()
+    const { moved, sheet, projectPath } = await startedSheet(server)
+    const desks = async () => {
+      const waiting = await Promise.all(
+        PEOPLE.map(async (person) => {
+          const { body } = await as(server, person).get('/api/desk').expect(200)
+          return deskSchema.parse(body).waiting.map(({ id, what }) => {
+            expect(id).toBe(sheet.id)
+            return `${person}: ${what}`
+          })
+        }),
+      )
+      return waiting.flat()
+    }
+    expect(await desks()).toEqual([])
+    await moved('engineerA', 'submit')
+    expect(await desks()).toEqual(['checker: check'])
+    await moved('checker', 'return', 'No source')
+    expect(await desks()).toEqual(['engineerA: submit'])
+    await moved('engineerA', 'submit')
+    await moved('checker', 'check')
+    // In category 2 whoever checked does not approve as well.
+    expect(await desks()).toEqual(['approver: approve'])
+    await as(server, 'engineerA').post(`${projectPath}/archive`).expect(200)
+    expect(await desks()).toEqual([])
   })
 
   it('lets nobody move a sheet of an archived project', async () => {
