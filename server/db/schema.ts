@@ -69,6 +69,7 @@ export const meta = sqliteTable('meta', {
 })
 
 export * from './tables/accounts'
+export * from './tables/classes'
 export * from './tables/depots'
 export * from './tables/forecasts'
 export * from './tables/orders'
