@@ -80,27 +80,34 @@ export function offsetText(offset: number): string {
   return `${offset < 0 ? '-' : '+'}${two(Math.floor(minutes / 60))}:${two(minutes % 60)}`
 }
 
+/**
+ * All moments at which calendar and clock of a time zone show a local time [ms since 1970]: none in an
+ * hour that the clock leaves out, two in one that is there twice.
+ *
+ * @param text "2031-03-04T01:41", also with a space, and with seconds.
+ * @returns null for a text that is no local time.
+ */
+export function momentsOfLocal(text: string, timeZone: string): readonly number[] | null {
+  const match = /^(\d{4}-\d{2}-\d{2})[T ](\d{2}:\d{2})(?::(\d{2})(?:\.\d+)?)?$/.exec(text.trim())
+  if (!match) return null
+  const [, date, clock, second = '00'] = match
+  const seconds = parseMoment(`${date}T${clock}:${second}Z`)
+  if (seconds === null) return null
+  const asUtc = seconds * 1000
+  const offsets = [asUtc - DAY, asUtc + DAY].map((near) => wallTime(near, timeZone).offset)
+  return [...new Set(offsets)]
+    .map((offset) => asUtc - offset)
+    .filter((moment) => asUtc - moment === wallTime(moment, timeZone).offset)
+    .sort((a, b) => a - b)
+}
+
 /** Why a local time names no one moment. */
 export type LocalFault = 'no-time' | 'skipped' | 'twice'
 
-/**
- * The moment at which calendar and clock of a time zone show a local time [ms since 1970].
- *
- * @param text "2031-03-04T01:41", also with a space, and with seconds.
- * @returns `skipped` for an hour that the clock leaves out, `twice` for one that is there twice,
- * `no-time` for a text that is none.
- */
+/** The one moment of a local time, or why there is not exactly one; see `momentsOfLocal`. */
 export function momentOfLocal(text: string, timeZone: string): number | LocalFault {
-  const match = /^(\d{4}-\d{2}-\d{2})[T ](\d{2}:\d{2})(?::(\d{2})(?:\.\d+)?)?$/.exec(text.trim())
-  if (!match) return 'no-time'
-  const [, date, clock, second = '00'] = match
-  const seconds = parseMoment(`${date}T${clock}:${second}Z`)
-  if (seconds === null) return 'no-time'
-  const asUtc = seconds * 1000
-  const offsets = [asUtc - DAY, asUtc + DAY].map((near) => wallTime(near, timeZone).offset)
-  const moments = [...new Set(offsets)]
-    .map((offset) => asUtc - offset)
-    .filter((moment) => asUtc - moment === wallTime(moment, timeZone).offset)
+  const moments = momentsOfLocal(text, timeZone)
+  if (!moments) return 'no-time'
   if (moments.length === 0) return 'skipped'
   return moments.length > 1 ? 'twice' : moments[0]!
 }

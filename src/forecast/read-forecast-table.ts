@@ -32,6 +32,7 @@ export type ForecastFaultKind =
   | 'no-time-column'
   | 'no-level-column'
   | 'no-level'
+  | 'no-series'
   | 'no-rows'
   | 'one-column'
   | 'too-many'
