@@ -149,11 +149,10 @@ function slidingTerms(state: SectionState): CheckTerms {
 
 /** The resistance where the undrained strength of soft ground bounds it. */
 function softGroundLimit(state: SectionState, combination: 1 | 2 | null): number | null {
-  const { ground } = state.section
   const pairOf = (of: SectionState) =>
     combination === null ? globalPairs(of).sliding : partialSliding(of, combination)
-  if ((ground.undrainedStrength ?? null) === null) return null
-  const rubbing = { ...state.section, ground: { ...ground, undrainedStrength: null } }
+  if (!isSoft(state.section)) return null
+  const rubbing = withoutSoftGround(state.section)
   const { resistance } = pairOf(state)
   return resistance < pairOf({ ...state, section: rubbing }).resistance ? resistance : null
 }
@@ -203,16 +202,26 @@ function flotationTerms(state: SectionState): CheckTerms {
   }
 }
 
-/** On soft ground the grip already carries its partial factors. */
+/** The grip by friction alone, and what soft ground leaves of it where that is less. */
 function skirtTerms(state: SectionState): CheckTerms {
-  const { basis, grip, gripWith, section, horizontal } = state
+  const { basis, gripWith, section, horizontal } = state
   const factors = basis.format === 'partial' ? COMBINATION_2 : GLOBAL
-  const isSoft = (section.ground.undrainedStrength ?? null) !== null
   const { friction, cohesion = 1 } = factors
+  const rubbing = sectionState(withoutSoftGround(section)).grip
+  const borne = gripWith({ friction, cohesion })
   return {
     ...UNMULTIPLIED,
     demand: termsOf(state, loadDrafts(horizontal, 'force', factors)),
-    resistance: termsOf(state, [['grip', isSoft ? gripWith({ friction, cohesion }) : grip, 1]]),
-    frictionFactor: isSoft ? 1 : friction,
+    resistance: termsOf(state, [['grip', rubbing, 1]]),
+    frictionFactor: friction,
+    softGround: isSoft(section) && borne < rubbing / friction ? borne : null,
   }
+}
+
+function isSoft({ ground }: SectionCase): boolean {
+  return (ground.undrainedStrength ?? null) !== null
+}
+
+function withoutSoftGround(section: SectionCase): SectionCase {
+  return { ...section, ground: { ...section.ground, undrainedStrength: null } }
 }

@@ -43,7 +43,7 @@ export const sectionDetailsTexts = {
     friction: 'times friction {friction}',
     frictionPartial: 'times friction {friction} / {factor}',
     over: 'divided by {factor}',
-    softGround: 'soft ground bears no more than',
+    softGround: 'soft ground bears no more, the less of c_u B and 0.4 N',
   },
 } as const
 

@@ -90,12 +90,14 @@ function multiplied(terms: CheckTerms, kind: QuantityKind): readonly SumRow[] {
     friction: { value: friction, kind: 'ratio' },
     factor: { value: frictionFactor, kind: 'ratio' },
   } as const
-  if (friction === 1 && frictionFactor === 1) return []
-  const soft = terms.softGround
+  const soft =
+    terms.softGround === null
+      ? []
+      : [row('soft', { key: 'sectionDetails.sums.softGround' }, terms.softGround, kind)]
+  if (friction === 1 && frictionFactor === 1) return soft
   const name = friction === 1 ? 'over' : frictionFactor === 1 ? 'friction' : 'frictionPartial'
   const times = row('times', { key: `sectionDetails.sums.${name}`, values }, total, kind)
-  if (soft === null) return [times]
-  return [times, row('soft', { key: 'sectionDetails.sums.softGround' }, soft, kind)]
+  return [times, ...soft]
 }
 
 function notesOf(section: SectionCase, { combination }: CheckTerms, given: Given): Message[] {
