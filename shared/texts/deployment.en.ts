@@ -3,6 +3,7 @@ export const deploymentTexts = {
   title: 'Deployment',
   what: 'the deployment plan',
   working: 'Working out the plan.',
+  field: 'decided {decided}; {pairs} pairs, {blowers} blowers; {order}; by the {band} levels',
 
   answer: {
     finished: 'Finished at {at}',

@@ -4,7 +4,8 @@ import { isSameValue } from './same-value'
 import type { ScenarioState } from './scenario-state'
 
 /** How the value of a field is put into words. */
-export type FieldForm = QuantityKind | 'text' | 'basis' | 'upliftModel' | 'sizes' | 'suitable'
+export type FieldForm =
+  QuantityKind | 'text' | 'basis' | 'upliftModel' | 'sizes' | 'suitable' | 'event' | 'plan'
 
 /** One thing that two versions of a scenario can differ in. */
 export interface ScenarioField {
@@ -44,6 +45,8 @@ const FIXED: readonly ScenarioField[] = [
   shared('content.fall', 'fall', 'percent'),
   shared('content.rateOfRise', 'rateOfRise', 'rate'),
   shared('content.timeToClear', 'clearTime', 'minutes'),
+  own('content.deployment', 'deployment.title', 'plan'),
+  own('content.event', 'eventPage.settings.title', 'event'),
   shared('content.water.currentSpeed', 'currentSpeed', 'speed'),
   shared('content.water.dragCoefficient', 'dragCoefficient', 'ratio'),
   shared('content.water.waveHeight', 'waveHeight', 'length'),
