@@ -99,6 +99,22 @@ export class LabelPlacer {
     this.lines.push(box)
   }
 
+  /** The parts of a level line that meet nothing, each from left to right. */
+  freeParts(y: number, from: number, to: number): readonly (readonly [number, number])[] {
+    const inTheWay = this.taken
+      .filter(
+        ({ top, bottom, right, left }) => top <= y && y <= bottom && right > from && left < to,
+      )
+      .sort((a, b) => a.left - b.left)
+    const parts: (readonly [number, number])[] = []
+    let start = from
+    for (const { left, right } of inTheWay) {
+      if (left - CLEARANCE > start) parts.push([start, left - CLEARANCE])
+      start = Math.max(start, right + CLEARANCE)
+    }
+    return start < to ? [...parts, [start, to]] : parts
+  }
+
   width(label: Label): number {
     return this.measure(label.message, label.size, label.weight ?? 400)
   }

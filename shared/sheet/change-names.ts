@@ -81,7 +81,7 @@ function ofChecks(): Readonly<Record<string, ChangeName>> {
 
 /** Results, by their paths. */
 const RESULTS: Readonly<Record<string, ChangeName>> = {
-  'result.verdict': own('verdict', null, 'checks.verdict'),
+  'result.verdict': own('wholeVerdict', null, 'checks.verdict'),
   'result.governs': own('governs', null, 'checks.name'),
   'result.holdsTo.from': own('holdsFrom', 'length'),
   'result.holdsTo.depth': line('holdsTo', 'length'),

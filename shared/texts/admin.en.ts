@@ -107,7 +107,7 @@ export const adminTexts = {
   letterhead: {
     title: 'Letterhead',
     what: 'the letterhead',
-    lead: 'What calculation sheets and their appendices bear. Sheets that were issued keep theirs.',
+    lead: 'What calculation sheets bear at their head and after the method. Sheets that were issued keep theirs.',
     organisation: 'Organisation',
     name: 'Name on the sheet (empty: {name})',
     address: 'Address',

@@ -242,6 +242,7 @@ export const sheetTexts = {
     required: 'needed',
     utilisation: 'used',
     verdict: 'verdict',
+    wholeVerdict: 'Verdict',
     governs: 'What governs',
     basis: 'Check basis',
     suitable: 'Ground is suitable',

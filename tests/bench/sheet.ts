@@ -33,11 +33,10 @@ function medianFor(pagesWanted: number, of: (one: Taken) => number): number {
   return (sorted[4]! * pagesWanted) / pages
 }
 
-// On a machine that does other things as well, the wall clock says more about those.
 const [wall, processor] = [medianFor(PAGES, (t) => t.wall), medianFor(PAGES, (t) => t.processor)]
 process.stdout.write(
   `${cpus()[0]?.model ?? 'unknown processor'}, load ${loadavg()[0]!.toFixed(1)}\n` +
     `sheet of ${pages} pages, derived, verified, composed and set; medians for ${PAGES} pages:\n` +
-    `processor ${processor.toFixed(0)} ms, wall clock ${wall.toFixed(0)} ms; ${GATE} ms allowed\n`,
+    `wall clock ${wall.toFixed(0)} ms, ${GATE} ms allowed; processor ${processor.toFixed(0)} ms\n`,
 )
-if (Math.min(wall, processor) > GATE) process.exitCode = 1
+if (wall > GATE) process.exitCode = 1

@@ -183,12 +183,13 @@ function drawMark(drawing: Composition, mark: Mark, baseline: number): void {
   if (mark.name !== 'holdsTo' || frame.layout.name === 'narrow') return
   const from = TEXT_X + placer.width(label) + 8
   const to = faceX(drawing, y) - 6
-  if (to <= from) return
-  const line: [Point, Point] = [
-    { x: from, y },
-    { x: to, y },
-  ]
-  addPath(drawing, 'mark-line-holdsTo', 'holdsToLine', segmentsPath([line]))
+  const parts = to <= from ? [] : placer.freeParts(y, from, to)
+  if (parts.length === 0) return
+  const lines = parts.map(([left, right]): [Point, Point] => [
+    { x: left, y },
+    { x: right, y },
+  ])
+  addPath(drawing, 'mark-line-holdsTo', 'holdsToLine', segmentsPath(lines))
   placer.avoid({ left: from, right: to, top: y - 1, bottom: y + 1 })
 }
 
