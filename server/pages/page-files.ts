@@ -23,6 +23,9 @@ export interface PageFiles {
 /** Where the files lie; the service worker knows it too. */
 export const FILES_PATH = '/order-page'
 
+/** At the root, so that its scope is the whole origin. */
+export const WORKER_PATH = '/service-worker.js'
+
 const require = createRequire(import.meta.url)
 const inBrowser = (name: string) => readFileSync(new URL(`browser/${name}`, import.meta.url))
 const inFonts = (name: string) =>

@@ -1,37 +1,49 @@
-import { Router, type Request, type Response } from 'express'
+import type { Request, RequestHandler, Response } from 'express'
 import { orderPageTexts } from '../../shared/texts/order-page.en'
 import { NotFoundError, TooManyRequestsError } from '../errors'
 import { senderOf } from '../http/sender'
-import { pathPart } from '../http/parse-input'
 import { orderOfToken } from '../modules/orders/open-order'
 import { orderStateOf } from '../modules/orders/order-state'
 import type { OrderWork } from '../modules/orders/order-work'
 import { messagePage } from './order/document'
 import { orderPage } from './order/order-page'
-import { FILES_PATH, type PageFiles, readPageFiles } from './page-files'
+import { FILES_PATH, type PageFiles, readPageFiles, WORKER_PATH } from './page-files'
 
 /**
  * Pages that the server writes itself, for phones with little signal: no application, no account. The
- * service worker of the whole origin is served here, at its root.
+ * service worker of the whole origin is served here, at its root. As the built page of the program they
+ * are no part of the API.
  */
-export function pages(work: OrderWork): Router {
+export function pages(work: OrderWork): RequestHandler {
   const files = readPageFiles()
-  const router = Router()
-  router.get('/order/:token', (req, res) => sendOrder(work, files, req, res))
-  router.get(`${FILES_PATH}/:version/:name`, (req, res) => sendPageFile(files, req, res))
-  router.get('/service-worker.js', (_req, res) => {
-    res.set({ 'Cache-Control': 'no-cache', 'Content-Type': 'text/javascript; charset=utf-8' })
-    res.send(files.serviceWorker)
-  })
-  return router
+  return (req, res, next) => {
+    const isRead = req.method === 'GET' || req.method === 'HEAD'
+    const token = /^\/order\/([^/]+)$/.exec(req.path)?.[1]
+    if (!isRead) next()
+    else if (token !== undefined) sendOrder(work, files, { token, req, res })
+    else if (req.path === WORKER_PATH) sendWorker(files, res)
+    else if (req.path.startsWith(`${FILES_PATH}/`)) sendPageFile(files, req, res)
+    else next()
+  }
+}
+
+function sendWorker(files: PageFiles, res: Response): void {
+  res.set({ 'Cache-Control': 'no-cache', 'Content-Type': 'text/javascript; charset=utf-8' })
+  res.send(files.serviceWorker)
+}
+
+interface Opening {
+  readonly token: string
+  readonly req: Request
+  readonly res: Response
 }
 
 /** Whoever opens an order gets a page, whatever is wrong: not everybody reads JSON. */
-function sendOrder(work: OrderWork, files: PageFiles, req: Request, res: Response): void {
+function sendOrder(work: OrderWork, files: PageFiles, { token, req, res }: Opening): void {
   res.set({ 'Cache-Control': 'no-cache', 'Referrer-Policy': 'no-referrer' })
   const { unknownTitle, unknown, slow } = orderPageTexts.page
   try {
-    const row = orderOfToken(work, pathPart(req, 'token'), senderOf(req))
+    const row = orderOfToken(work, token, senderOf(req))
     const state = orderStateOf(work.db, row, work.now())
     res.type('html').send(orderPage({ order: row.content, token: row.token, state }, files))
   } catch (error) {
@@ -51,9 +63,10 @@ function sendOrder(work: OrderWork, files: PageFiles, req: Request, res: Respons
 
 /** Files keep their address only while they stay as they are, so they are kept for ever. */
 function sendPageFile(files: PageFiles, req: Request, res: Response): void {
-  const file = files.find(pathPart(req, 'name'))
+  const [version = '', name = '', ...more] = req.path.slice(FILES_PATH.length + 1).split('/')
+  const file = more.length === 0 ? files.find(name) : undefined
   if (!file) throw new NotFoundError(`${req.path}: there is nothing at this address`)
-  const isThisVersion = pathPart(req, 'version') === files.version
+  const isThisVersion = version === files.version
   const keep = isThisVersion ? 'public, max-age=31536000, immutable' : 'no-cache'
   res.set({ 'Cache-Control': keep, 'Content-Type': file.mediaType })
   res.send(file.bytes)

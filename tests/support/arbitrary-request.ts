@@ -46,6 +46,11 @@ function hintsFor({ ids, visitors }: WholeServer): Hints {
     accountId: fc.constantFrom('engineer-none', 'viewer-none', ...people),
     lineId: fc.constantFrom(ids.lineId, 'nowhere'),
     scenarioId: fc.constantFrom(ids.scenarioId, 'nowhere'),
+    expiresAt: fc.constant(Date.now() + 24 * 3_600_000),
+    ticks: fc.constantFrom(
+      [{ id: 'phone-a-0001', item: 'section-1', isDone: true, at: FIRST_MOMENT }],
+      [{ id: 'phone-a-0002', item: 'section-99', isDone: false, at: FIRST_MOMENT }],
+    ),
     stations: fc.constant(SHORT_STATIONS),
     content: fc.constant(SHORT_CONTENT),
     from: fc.constantFrom('0', '1930000000000'),

@@ -14,6 +14,7 @@ import {
 import { operationsOf } from '../../server/app'
 import type { Db } from '../../server/db/client'
 import { projectMembers } from '../../server/db/schema'
+import type { OrderItem } from '../../shared/schemas/order-api'
 import type { SheetRecord } from '../../shared/schemas/sheet-api'
 import { lowRoadContent, SHORT_STATIONS } from './ferry-quay'
 import { linkFor, tokenOf } from './links'
@@ -70,6 +71,13 @@ async function furnish(server: ReturnType<typeof freshApp>) {
   const scenario = { name: 'As asked', content: SHORT_CONTENT }
   const scenarioId = await post(`${project}/lines/${lineId}/scenarios`, scenario)
   const sheetId = await post(`${project}/sheets`, { lineId, scenarioId })
+  const wanted = { lineId, scenarioId, version: 1, meetAt: 'Slipway head' }
+  const expiresAt = Date.now() + 20 * 24 * 3_600_000
+  const ordered = await agent
+    .post(`${project}/orders`)
+    .send({ ...wanted, expiresAt })
+    .expect(201)
+  const order = ordered.body as OrderItem
   const comment = { text: 'Where is the friction from?' }
   const commented = await agent
     .post(`${project}/sheets/${sheetId}/comments`)
@@ -86,13 +94,16 @@ async function furnish(server: ReturnType<typeof freshApp>) {
     ...{ projectId, gaugeId, forecastId, lineId, scenarioId, sheetId, depotId },
     commentId: (commented.body as SheetRecord).comments[0]!.id,
     line: '2.1',
+    orderId: order.id,
     fileId: (uploaded.body as { id: string }).id,
     version: '1',
     accountId: lead.id,
     organisationId: 'tests',
     invitationId: (invitation.body as { id: string }).id,
     mailId: mailTo(db, invited.email),
-    tokens: [tokenOf(linkFor(db, invited.email)), tokenOf(linkFor(db, lead.email))] as const,
+    tokens: [
+      ...[tokenOf(linkFor(db, invited.email)), tokenOf(linkFor(db, lead.email)), order.token],
+    ] as const,
   }
 }
 

@@ -13,8 +13,10 @@ const mediaSchema = z.strictObject({
   'application/geo+json': z.strictObject({ schema: z.looseObject({}) }).optional(),
   'application/pdf': z.strictObject({ schema: z.looseObject({}) }).optional(),
   'image/png': z.strictObject({ schema: z.looseObject({}) }).optional(),
+  'image/svg+xml': z.strictObject({ schema: z.looseObject({}) }).optional(),
   'application/octet-stream': z.strictObject({ schema: z.looseObject({}) }).optional(),
   'multipart/form-data': z.strictObject({ schema: z.looseObject({}) }).optional(),
+  'text/event-stream': z.strictObject({ schema: z.looseObject({}) }).optional(),
   'message/rfc822': z.strictObject({ schema: z.looseObject({}) }).optional(),
 })
 
