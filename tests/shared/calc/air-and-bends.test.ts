@@ -57,7 +57,15 @@ describe('linked air', () => {
   it('says where a compressor never gets there, and needs none without a leak', () => {
     const weak = { flow: 0.002, startPressure: 12_000, stopPressure: 15_000 }
     expect(compressorDuty(AIR, weak)).toMatchObject({ share: null, onTime: null })
-    expect(compressorDuty({ ...AIR, leak: 0 }, weak).share).toBe(0)
+    const tight = compressorDuty({ ...AIR, leak: 0 }, weak)
+    expect(tight.share).toBe(0)
+    expect(tight.offTime).toBe(Infinity)
+    // Boyle, by hand: V Δp/p_atm of free air at 2 l/s.
+    expectClose(tight.onTime!, (38.48 * 3000) / 101_325 / 0.002, 1e-12)
+    // Just the least flow never gets there.
+    const least = { ...weak, flow: tight.leastFlow }
+    expect(compressorDuty({ ...AIR, leak: 0 }, { ...least, flow: 0 }).share).toBeNull()
+    expect(() => compressorDuty(AIR, { ...weak, startPressure: 15_000 })).toThrow(OutOfRangeError)
   })
 
   it.each([
