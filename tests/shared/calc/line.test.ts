@@ -8,6 +8,7 @@ import {
   pointAt,
 } from '../../../shared/calc/line/line-path'
 import { lineTurns, isDirectionKnown } from '../../../shared/calc/line/line-turns'
+import { lineSections } from '../../../shared/calc/line/line-sections'
 import { lowSpots } from '../../../shared/calc/line/low-spots'
 import { pipeInflow } from '../../../shared/calc/line/pipe-inflow'
 import type { Station } from '../../../shared/schemas/line'
@@ -69,6 +70,17 @@ describe('turns of a line', () => {
     expect(isDirectionKnown(half, 20)).toBe(false)
     expect(isDirectionKnown(half, 25)).toBe(false)
     expect(isDirectionKnown(half, 35)).toBe(false)
+    const hole = surveyed([0, 0], [null, null], [20, 0])
+    expect(isDirectionKnown(hole, 10)).toBe(false)
+    expect(isDirectionKnown(surveyed([0, 0], [10, 0], [20, 0]), 10)).toBe(true)
+    for (const place of [
+      [null, 0],
+      [10, null],
+    ] as const) {
+      expect(isDirectionKnown(surveyed([0, 0], place, [20, 0]), 10)).toBe(false)
+      expect(isDirectionKnown(surveyed([0, 0], [10, 0], place), 15)).toBe(false)
+      expect(isDirectionKnown(surveyed(place, [10, 0], [20, 0]), 5)).toBe(false)
+    }
     // The ends of a line turn nowhere.
     expect(isDirectionKnown(half, 0)).toBe(true)
     expect(isDirectionKnown(half, 50)).toBe(true)
@@ -98,6 +110,24 @@ describe('a line that crosses itself', () => {
     })
   })
 
+  it('is found however far the line strays in between, the earlier stretch first', () => {
+    const stray = surveyed([0, 0], [10, 10], [30, 0], [30, -5], [-2, 6])
+    expect(lineCrossing(stray)).toEqual({ first: 0, second: 3 })
+  })
+
+  it('is none where one coordinate of an end is not known', () => {
+    const leg = [
+      [-5, -5],
+      [10, 10],
+      [10, -5],
+    ] as const
+    expect(lineCrossing(surveyed(...leg, [0, 5]))).toEqual({ first: 0, second: 2 })
+    expect(lineCrossing(surveyed(...leg, [null, 5]))).toBeNull()
+    expect(lineCrossing(surveyed(...leg, [-8, null]))).toBeNull()
+    expect(lineCrossing(surveyed(leg[0], leg[1], [null, 5], leg[2]))).toBeNull()
+    expect(lineCrossing(surveyed(leg[0], leg[1], [-8, null], leg[2]))).toBeNull()
+  })
+
   it('is none where stretches only meet, pass each other or are not known', () => {
     expect(lineCrossing(surveyed([0, 0], [10, 0], [10, 10], [0, 10], [0, 0]))).toBeNull()
     expect(lineCrossing(surveyed([0, 0], [10, 0], [10, 5], [5, 5], [5, 0]))).toBeNull()
@@ -109,14 +139,15 @@ describe('a line that crosses itself', () => {
 })
 
 describe('places along a line', () => {
-  const path = locatedStations(surveyed([0, 0], [8, 6], [null, 3], [8, 26], [3, null]))
+  const stations = surveyed([0, 0], [8, 6], [null, 3], [8, 26], [3, null])
+  const path = [
+    { chainage: 0, x: 0, y: 0 },
+    { chainage: 10, x: 8, y: 6 },
+    { chainage: 30, x: 8, y: 26 },
+  ]
 
   it('are those of stations that have both coordinates', () => {
-    expect(path).toEqual([
-      { chainage: 0, x: 0, y: 0 },
-      { chainage: 10, x: 8, y: 6 },
-      { chainage: 30, x: 8, y: 26 },
-    ])
+    expect(locatedStations(stations)).toEqual(path)
   })
 
   it('lie straight between them, and at the nearest beyond the ends', () => {
@@ -165,6 +196,60 @@ describe('places along a line', () => {
     ]
     expect(offsetPath(back, 2)[1]).toEqual({ x: 10, y: 0 })
     expect(offsetPath([back[0]!, back[0]!], 2)).toEqual([back[0], back[0]])
+  })
+})
+
+describe('sections of a line', () => {
+  const ground = (
+    chainage: number,
+    groundLevel: number,
+    change: Partial<Station> = {},
+  ): Station => ({
+    ...levels(groundLevel)[0]!,
+    chainage,
+    ...change,
+  })
+
+  it('are cut at every surface, each piece with its lowest ground', () => {
+    const line = [
+      ground(0, 3, { clearWidth: 4 }),
+      ground(6, 2.4, { surface: 'gravel', clearWidth: 3 }),
+      ground(8, 2.6, { clearWidth: 5 }),
+      ground(20, 2),
+    ]
+    const [first, second] = lineSections(line, 10)
+    expect(first!.pieces).toEqual([
+      { from: 0, to: 6, surface: 'turf', lowestGround: 2.4, lowestAt: 6 },
+      { from: 6, to: 8, surface: 'gravel', lowestGround: 2.4, lowestAt: 6 },
+      { from: 8, to: 10, surface: 'turf', lowestGround: 2.5, lowestAt: 10 },
+    ])
+    expect(first!.clearWidth).toBe(3)
+    expect(second!.pieces).toEqual([
+      { from: 10, to: 20, surface: 'turf', lowestGround: 2, lowestAt: 20 },
+    ])
+    expect(second!.clearWidth).toBe(5)
+  })
+
+  it('begin and end on stations without a piece of no length, and join pieces of one surface', () => {
+    const line = [ground(0, 3), ground(10, 2.5), ground(15, 2.2), ground(20, 2.9)]
+    const sections = lineSections(line, 10)
+    expect(sections.map(({ pieces }) => pieces.map(({ from, to }) => [from, to]))).toEqual([
+      [[0, 10]],
+      [[10, 20]],
+    ])
+    expect(sections[1]!.pieces[0]).toMatchObject({ lowestGround: 2.2, lowestAt: 15 })
+    expect(sections[0]!.clearWidth).toBeNull()
+  })
+
+  it('are as many as the run needs, the last one as long as is left', () => {
+    const sections = lineSections([ground(5, 3), ground(27, 3)], 10)
+    expect(sections.map(({ from, to }) => [from, to])).toEqual([
+      [5, 15],
+      [15, 25],
+      [25, 27],
+    ])
+    expect(lineSections([ground(0, 3), ground(20 + 1e-7, 3)], 10)).toHaveLength(2)
+    expect(lineSections([ground(0, 3)], 10)).toHaveLength(1)
   })
 })
 
