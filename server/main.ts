@@ -8,9 +8,11 @@ import { openDatabase } from './db/client'
 import { type DemoSeed, seedSlowlyOnce } from './db/demo-seed'
 import { prepareDatabase } from './db/prepare-database'
 import { ferryQuaySeed } from './demo/ferry-quay'
+import { ferryQuayOrdersSeed } from './demo/ferry-quay-orders'
 import { ferryQuaySheetsSeed } from './demo/ferry-quay-sheets'
 import { ferryQuayStoreSeed } from './demo/ferry-quay-store'
 import { type Env, EnvironmentError, readEnv } from './env'
+import { endEventStreams } from './http/event-stream'
 import { createLogger } from './logger'
 import { startMailWorker } from './mail/mail-worker'
 import { createSmtpSender } from './mail/smtp-sender'
@@ -61,6 +63,7 @@ async function start(): Promise<void> {
   const version = readVersion()
   if (env.hasDemoSheets) {
     await seedSlowlyOnce(db, ferryQuaySheetsSeed({ ...parts, software: `Toehold ${version}` }))
+    await seedSlowlyOnce(db, ferryQuayOrdersSeed(parts))
   }
   const app = createApp({ parts, env, logger, version, siteFolder: inProject('dist') })
 
@@ -142,6 +145,7 @@ function stopOnSignal(server: Server, closeAll: () => Promise<void>): void {
       void closeAll().then(() => process.exit(0))
     })
     server.closeIdleConnections()
+    endEventStreams()
     setTimeout(() => {
       server.closeAllConnections()
     }, LAST_ANSWER).unref()

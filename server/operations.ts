@@ -4,6 +4,7 @@ import { accountsOperations } from './modules/accounts/accounts.routes'
 import { demoAccountsOperations, sessionOperations } from './modules/accounts/session.routes'
 import { auditOperations } from './modules/audit/audit.routes'
 import { catalogueOperations } from './modules/catalogue/catalogue.routes'
+import { classesOperations } from './modules/classes/classes.routes'
 import { healthOperations } from './modules/health/health.routes'
 import { invitationsOperations } from './modules/invitations/invitations.routes'
 import { mailsOperations } from './modules/mails/mails.routes'
@@ -48,6 +49,7 @@ export function allOperations(
     ...sheetsOperations(sheetWork),
     ...verificationOperations(sheetWork),
     ...ordersOperations(parts),
+    ...classesOperations(parts),
   ]
   return [...operations, ...openapiOperations(version, operations)]
 }

@@ -1,5 +1,6 @@
 import type { Logger } from 'pino'
 import type { Db } from '../db/client'
+import { deleteExpiredClasses } from '../modules/classes/classes.queries'
 import { ATTEMPTS_FORGOTTEN_AFTER } from './attempts/attempts'
 import { deleteAttemptsBefore } from './attempts/attempts.queries'
 import { deleteExpiredSessions } from './sessions.queries'
@@ -11,9 +12,10 @@ export interface HousekeepingParts {
   readonly now: () => number
 }
 
-/** Deletes what counts no longer: sessions that ended, attempts that are forgotten. */
+/** Deletes what counts no longer: sessions that ended, attempts that are forgotten, classes. */
 export function forgetExpired({ db, now }: HousekeepingParts): void {
   deleteExpiredSessions(db, now())
+  deleteExpiredClasses(db, now())
   deleteAttemptsBefore(db, now() - ATTEMPTS_FORGOTTEN_AFTER)
 }
 
@@ -26,7 +28,7 @@ export function startHousekeeping(
     try {
       forgetExpired(parts)
     } catch (error) {
-      logger.error({ err: error }, 'expired sessions could not be deleted; tried again in an hour')
+      logger.error({ err: error }, 'what has expired could not be deleted; tried again in an hour')
     }
   }
   run()

@@ -41,6 +41,7 @@ export const ACCESS_RULES = {
     account: ['admin', 'engineer'],
     meaning: 'Administrators and engineers keep the depots of their organisation',
   },
+  'run-classes': { account: ['trainer'], meaning: 'Trainers open classes and lead their own' },
   administer: {
     account: ['admin'],
     meaning: 'Administrators: people, organisations, audit trail, mail',

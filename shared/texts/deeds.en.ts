@@ -12,6 +12,7 @@ export const deedsTexts = {
       'signed-in': 'signed in',
       'signed-out-everywhere': 'signed out everywhere',
     },
+    class: { closed: 'closed the class', opened: 'opened the class' },
     depot: {
       changed: 'changed the depot',
       created: 'added the depot',

@@ -34,7 +34,7 @@ export interface AttemptParts {
 
 /** What is attempted, on which address or link, and from which address of the network. */
 export interface AttemptOn {
-  readonly purpose: 'sign-in' | 'password' | 'reset' | 'link' | 'verify' | 'order'
+  readonly purpose: 'sign-in' | 'password' | 'reset' | 'link' | 'verify' | 'order' | 'class'
   readonly target: string
   readonly sender: string
 }

@@ -91,6 +91,7 @@ const SAID: Readonly<
     role !== null && role !== 'viewer' && (member === 'lead' || member === 'editor'),
   'lead-project': (role, member) => role !== null && role !== 'viewer' && member === 'lead',
   'keep-store': (role) => role === 'admin' || role === 'engineer',
+  'run-classes': (role) => role === 'trainer',
   administer: (role) => role === 'admin',
 }
 
