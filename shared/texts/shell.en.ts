@@ -6,6 +6,7 @@ export const shellTexts = {
   menu: 'Places',
   desk: 'Desk',
   method: 'Method',
+  demonstrator: 'Demonstrator',
   signIn: 'Sign in',
   signOut: 'Sign out',
   notSignedOut: 'Not signed out: the server did not answer. Try again.',

@@ -1,5 +1,6 @@
 import { createRouter, createWebHistory, type RouteRecordRaw } from 'vue-router'
 import QuickCheckView from '@/views/QuickCheckView.vue'
+import { demonstratorRoutes } from './demonstrator-routes'
 import { memberRoutes } from './member-routes'
 import { methodRoute } from './method-route'
 import { verifyRoute } from './verify-route'
@@ -8,6 +9,8 @@ declare module 'vue-router' {
   interface RouteMeta {
     /** Text key of the page's name in the title of the window. */
     readonly titleKey: string
+    /** The page takes the whole window: no header, no footer. */
+    readonly isBare?: boolean
   }
 }
 
@@ -20,6 +23,7 @@ export const routes: RouteRecordRaw[] = [
   },
   methodRoute,
   verifyRoute,
+  ...demonstratorRoutes,
   ...memberRoutes,
   {
     path: '/:path(.*)*',
