@@ -16,10 +16,14 @@ export function currentVerification(): Promise<string> {
   return format(text, { parser: 'markdown', printWidth: 100 })
 }
 
-/** Every folder of shared/calc, and shared/checks. */
+/** Every folder of shared/calc, and shared/checks with those below it. */
 function engineFolders(): readonly string[] {
-  const topics = readdirSync('shared/calc', { withFileTypes: true })
+  return [...foldersIn('calc'), 'checks', ...foldersIn('checks')]
+}
+
+function foldersIn(part: string): readonly string[] {
+  return readdirSync(`shared/${part}`, { withFileTypes: true })
     .filter((entry) => entry.isDirectory())
-    .map(({ name }) => `calc/${name}`)
-  return [...topics.sort(), 'checks']
+    .map(({ name }) => `${part}/${name}`)
+    .sort()
 }

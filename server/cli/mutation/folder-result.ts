@@ -32,6 +32,8 @@ export interface Survivor {
 
 export interface FolderResult {
   readonly measured: string
+  /** Tests that ran, as a pattern of their paths; left out: all of the engine. */
+  readonly tests?: string
   /** Noticed by a failing test, or by one that never ended. */
   readonly killed: number
   readonly survived: number
@@ -49,6 +51,7 @@ interface Measurement {
   readonly measured: string
   /** The result before, whose reasons are carried over. */
   readonly before: FolderResult | undefined
+  readonly tests?: string | undefined
 }
 
 const KILLED = ['Killed', 'Timeout']
@@ -67,6 +70,7 @@ export function folderResult(report: MutationReport, of: Measurement): FolderRes
     .map((survivor) => ({ ...survivor, reason: reasonBefore(survivor, of.before) }))
   return {
     measured: of.measured,
+    ...(of.tests ? { tests: of.tests } : {}),
     killed: countOf(KILLED),
     survived: survivors.length,
     survivors,

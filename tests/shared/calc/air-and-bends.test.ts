@@ -5,6 +5,7 @@ import {
   leakedPressure,
   timeToPressure,
 } from '../../../shared/calc/air/linked-air'
+import { minimumAirPressure } from '../../../shared/calc/air/minimum-air-pressure'
 import { bend, stepArea } from '../../../shared/calc/line/bend'
 import { edgeBallast } from '../../../shared/calc/moving-water/edge-ballast'
 import { OutOfRangeError } from '../../../shared/errors'
@@ -75,6 +76,15 @@ describe('linked air', () => {
   ])('refuses %s', (_what, drop) => {
     expect(() => leakCoefficient(drop)).toThrow(OutOfRangeError)
   })
+})
+
+it('has no air pressure that is enough where water and freeboard reach over the tube', () => {
+  // The crest of a tube of 0.70 m never stands higher than 0.70 m.
+  const tube = { diameter: 0.7, wettedSkirt: 2.2, depth: 0.65, unitWeight: 9810 }
+  const { forCrest, forSeal, least } = minimumAirPressure({ ...tube, freeboard: 0.1 })
+  expect([forCrest, least]).toEqual([null, null])
+  expectClose(forSeal, 9810 * 0.65, 1e-12)
+  expect(minimumAirPressure({ ...tube, depth: 0.3, freeboard: 0.1 }).least).toBe(9810 * 0.3)
 })
 
 describe('bends and edges', () => {
