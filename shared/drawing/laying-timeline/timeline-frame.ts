@@ -30,7 +30,7 @@ const STEPS = [0.25, 0.5, 1, 2, 3, 6, 12, 24, 48, 96].map((hours) => hours * HOU
 /** Room for the margins at the right, in heights of letters. */
 const MARGIN_COLUMN = 4.6
 /** Room for one tick [px]. */
-const TICK = 58
+const TICK = 48
 /** Water that comes later than this share of the whole work after its end is not drawn. */
 const BEYOND = 0.45
 
@@ -42,7 +42,7 @@ export function timelineFrame(input: TimelineInput): TimelineFrame {
   const right = width - 10 - font * MARGIN_COLUMN
   const { from, to } = spanOf(plan)
   const row = rowHeight(plan.sections.length)
-  const lanesTop = font + 12
+  const lanesTop = 8
   const sectionsTop = lanesTop + plan.pairs.length * LANE + font + 20
   const bottom = sectionsTop + plan.sections.length * row
   const sorted = [...plan.sections].sort((a, b) => a.from - b.from)

@@ -26,11 +26,11 @@ export function labelTimeline(
     const y = frame.laneY(number) + size * 0.35
     placer.place({ ...label, size, weight: 600 }, [{ x: frame.left - 8, y, anchor: 'end' }])
   }
+  labelMargins(input, frame, placer)
   const heading = { id: 'sections', role: 'labelQuiet', message: own('sections') } as const
   placer.place({ ...heading, size: size - 1 }, [
     { x: frame.left, y: frame.sectionsTop - 7, anchor: 'start' },
   ])
-  labelMargins(input, frame, placer)
   labelRows(frame, placer)
   labelBars(input, frame, placer)
 }
