@@ -23,17 +23,17 @@ export const eventTexts = {
 
   verdict: {
     title: 'Through the forecast',
-    holds: 'Holds through the crest of {level}, {time}.',
-    narrow: 'Holds narrowly through the crest of {level}, {time}.',
-    fails: 'Does not hold: first at ch {place}, {time}, water at {level}. {check}.',
-    failsDry: 'Does not hold, though the water does not come to the places that fail.',
-    notChecked: 'Not checked everywhere: {count} sections have no answer.',
+    holds: 'Through the crest of {level}, {time}.',
+    narrow: 'Through the crest of {level}, {time}.',
+    fails: 'First at ch {place}, {time}, water at {level}. {check}.',
+    failsDry: 'The water does not come to the places that fail.',
+    notChecked: '{count} sections have no answer.',
     unended:
       'The forecast ends while the water still rises. What comes after its end is not known.',
     gap: 'Nothing is known from {from} to {to}: nothing was computed there.',
     sketch: 'A sketch from a telephone call, not a forecast by the hour.',
     rests: 'Rests on {gauge}, issued {issued}.',
-    observed: 'Observed until {time}; later hours moved by as much.',
+    observed: 'Observed until {time}; later hours moved by {shift}.',
     old: 'Something changed since: this answer is old.',
     'newer-issue': 'A newer issue is there, of {issued}: this verdict is old.',
     'newer-observed': 'A newer observed level is there: this verdict is old.',

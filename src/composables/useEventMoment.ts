@@ -1,5 +1,10 @@
 import { computed, ref, watch } from 'vue'
-import { crestMoment, eventTimes, waterAt } from '@shared/checks/line-event/event-times'
+import {
+  crestMoment,
+  eventTimes,
+  waterAt,
+  type WaterAtMoment,
+} from '@shared/checks/line-event/event-times'
 import { sectionsAt, traceAt } from '@shared/checks/line-event/line-at-moment'
 import type { LineEventAnswer } from '@shared/checks/line-event/line-event-answer'
 import type { LineEventInput } from '@shared/checks/line-event/line-event-input'
@@ -12,13 +17,26 @@ export interface ComputedEvent {
   readonly answer: LineEventAnswer
 }
 
+/** Hours that are shown before the water comes and after it has gone [s]. */
+const AROUND = 6 * 3600
+
+/** Moments around the time in which water stands at the line; all of them where none ever does. */
+function timesAround({ input, answer }: ComputedEvent): readonly WaterAtMoment[] {
+  const all = eventTimes(input.water, input.settings.step)
+  const ground = Math.min(...answer.sections.map(({ lowest }) => lowest.groundLevel))
+  const wet = all.filter(({ high, expected }) => (high ?? expected ?? -Infinity) > ground)
+  const [first, last] = [wet[0], wet.at(-1)]
+  if (!first || !last) return all
+  return all.filter(({ time }) => time >= first.time - AROUND && time <= last.time + AROUND)
+}
+
 /** The moment that all drawings of an event show. */
 export function useEventMoment(
   event: () => ComputedEvent,
   section: () => number,
   asAt: () => number,
 ) {
-  const times = computed(() => eventTimes(event().input.water, event().input.settings.step))
+  const times = computed(() => timesAround(event()))
   const index = ref(0)
   const time = computed(() => times.value[Math.min(index.value, times.value.length - 1)]!.time)
 

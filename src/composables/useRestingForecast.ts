@@ -1,6 +1,5 @@
 import { useQuery } from '@tanstack/vue-query'
 import { computed, toValue, type MaybeRefOrGetter } from 'vue'
-import { newestObserved } from '@shared/forecast/observed-shift'
 import { restState } from '@shared/forecast/rests-on'
 import { wholeSeries } from '@shared/forecast/whole-series'
 import { bandsFrom } from '@shared/checks/line-event/event-of-scenario'
@@ -35,7 +34,6 @@ export function useRestingForecast(
     const forecast = issue.data.value
     return forecast ? bandsFrom((band) => wholeSeries(forecast, band)) : null
   })
-  const observed = computed(() => newestObserved(issue.data.value?.observed ?? []) ?? null)
 
-  return { issue, newest, state, water, observed }
+  return { issue, newest, state, water }
 }

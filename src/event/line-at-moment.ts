@@ -32,9 +32,7 @@ export function lineAtMoment({
     waterLevel: expected,
     runs: drawnRuns(content, sections),
     sections,
-    weakest: isComputed
-      ? { chainage: (worst.from + worst.to) / 2, holdsToLevel: worst.holdsToLevel }
-      : null,
+    weakest: isComputed ? { chainage: worst.place, holdsToLevel: worst.holdsToLevel } : null,
     place,
   }
 }

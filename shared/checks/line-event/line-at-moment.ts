@@ -57,6 +57,8 @@ function grownFor(section: SectionCase, uplift: number): number {
 export interface SectionAtMoment {
   readonly from: number
   readonly to: number
+  /** Chainage of the ground that is used furthest. */
+  readonly place: number
   readonly verdict: Verdict
   readonly utilisation: number | null
   readonly holdsToLevel: number | null
@@ -73,6 +75,7 @@ export function sectionsAt(answer: LineEventAnswer, time: number): readonly Sect
     return {
       from,
       to,
+      place: shown?.place ?? section.lowest.place,
       verdict: moment ? moment.verdict : 'notChecked',
       utilisation: moment?.utilisation ?? null,
       holdsToLevel: outcomes?.expected.holdsToLevel ?? null,
