@@ -20,12 +20,17 @@ const ANSWERS: Readonly<Record<Topic, Answer>> = {
   unroll: (setting) => evaluateAt(setting).anchoringMassPerSection / setting.tube.sectionLength,
   grip: (setting) => crossingDepth(setting),
   creep: (setting) => gripLost(setting),
-  grounds: (setting) => holdsToOf(setting).depth,
+  grounds: (setting) => wholeMillimetres(holdsToOf(setting).depth),
   night: (setting, start) => crestSunk(setting, start),
   puncture: (setting) => throughOneSection(setting).steady,
   wind: (setting) => slidingGust(setting),
-  pond: (setting) => pondLimit(sectionOf(setting))?.dryDepth ?? null,
-  leave: (setting) => leaveOf(setting).depth,
+  pond: (setting) => wholeMillimetres(pondLimit(sectionOf(setting))?.dryDepth ?? null),
+  leave: (setting) => wholeMillimetres(leaveOf(setting).depth),
+}
+
+/** Limits are rounded down to 1 mm, so that the water stops where the figure says, on the safe side. */
+function wholeMillimetres(depth: number | null): number | null {
+  return depth === null ? null : Math.floor(depth * 1000 + 1e-9) / 1000
 }
 
 /**

@@ -109,7 +109,9 @@ export const STANDARD_SCENES: readonly CourseScene[] = [
   scene('puncture', start({ depth: WATER }), guess.other('flowRate', 8, 0.1), [
     leg('airPressure', 1, 7),
   ]),
-  scene('wind', start({}), guess.other('speed', 30, 0.5), [leg('gust', 'answer', 5)]),
+  scene('wind', start({}), { ...guess.other('speed', 30, 0.5), decimals: 1 }, [
+    leg('gust', 'answer', 5),
+  ]),
   scene('pond', start({ depth: WATER }), guess.level('dryLevel', 0.3), [
     leg('dryDepth', 'answer', 6),
   ]),

@@ -154,7 +154,12 @@ function labelMarks(
 ): void {
   const depth = (value: number) => ({ depth: { value, kind: 'length', rounding: 'down' } as const })
   if (crossing !== null) {
-    const at = label(frame, 'crossing-value', 'label', demoText('crossing', depth(crossing)))
+    const at = label(
+      frame,
+      'crossing-value',
+      'label',
+      demoText('crossing', { depth: { value: crossing, kind: 'length' } }),
+    )
     placer.placeSurely(at, [{ x: frame.toX(crossing) + 12, y: frame.bottom - 10, anchor: 'start' }])
   }
   if (stop !== null) {

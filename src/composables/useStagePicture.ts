@@ -70,7 +70,7 @@ export function usePushGripPicture(stage: () => OnStage, size: Readonly<Ref<View
 }
 
 /** The picture is composed for this width and height, and then enlarged. */
-const COMPOSED = { width: 860, height: 330 } as const
+const COMPOSED = { width: 560, height: 330 } as const
 const LARGEST = 2.4
 
 /** A smaller view of the same proportions: everything in it comes out larger. */

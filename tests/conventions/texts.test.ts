@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest'
 import { texts } from '../../shared/texts'
+import { demonstratorAreaTexts } from '../../shared/texts/demonstrator-area'
 import { areaTexts } from '../../shared/texts/member-area'
 import { methodAreaTexts } from '../../shared/texts/method-area'
 import { orderTexts } from '../../shared/texts/order.en'
@@ -24,6 +25,7 @@ const all = {
   ...areaTexts.en,
   ...sectionDetails.en,
   ...methodAreaTexts.en,
+  ...demonstratorAreaTexts.en,
   ...verifyAreaTexts.en,
   // Words of documents and pages that the server writes.
   deploymentOrder: orderTexts,
@@ -75,9 +77,9 @@ function isComposed(part: string): boolean {
   return words.has(stem) && allText.includes(`}${ending}`)
 }
 
-/** Scenes name their texts without the area, through helpers of their own. */
+/** Drawings and the demonstrator name their texts without the area, through helpers of their own. */
 function isNamedInScene(key: string): boolean {
-  return key.startsWith('drawing.') && key.split('.').every(isComposed)
+  return /^(drawing|demonstrator)\./.test(key) && key.split('.').every(isComposed)
 }
 
 const templates = sourceFiles('server/typesetting/templates', /\.typ$/)

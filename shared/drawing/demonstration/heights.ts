@@ -1,8 +1,8 @@
-import { segmentsPath } from '../path-data'
+import { reversed, segmentsPath } from '../path-data'
 import { crossing } from '../cross-section/body-shape'
 import { addPath, type Composition } from '../cross-section/composition'
 import { levelY } from '../cross-section/section-frame'
-import type { Spot } from '../label-placer'
+import { spreadColumn, type Label } from '../label-placer'
 import type { ShapeRole } from '../scene'
 import type { DemonstrationInput } from './demonstration-input'
 import { demoText, largeLabel, smallLabel } from './demo-text'
@@ -13,17 +13,49 @@ const OVER = 6
 /** Lines at heights, the depth of the water and the guess where it is a height. */
 export function drawHeights(drawing: Composition, input: DemonstrationInput): void {
   const { guess } = input
-  labelDepth(drawing, input)
+  const named: Named[] = input.levels.map(({ id, depth, line, text, message }) => {
+    drawLine(drawing, { id: `level-${id}`, role: line, depth, side: 'wet' })
+    return { depth, label: largeLabel(drawing, `level-${id}-value`, text, message) }
+  })
   if (guess && guess.place !== 'bar') {
     const side = guess.place === 'dryLevel' ? 'dry' : 'wet'
     const label = largeLabel(drawing, 'guess-value', 'label', guess.message)
     drawLine(drawing, { id: 'guess', role: 'guess', depth: guess.value, side })
-    placeOn(drawing, label, guess.value, side)
+    if (side === 'wet') named.push({ depth: guess.value, label })
+    else nameDry(drawing, label, guess.value)
   }
-  for (const { id, depth, line, text, message } of input.levels) {
-    drawLine(drawing, { id: `level-${id}`, role: line, depth, side: 'wet' })
-    placeOn(drawing, largeLabel(drawing, `level-${id}-value`, text, message), depth, 'wet')
-  }
+  nameWet(drawing, named)
+  labelDepth(drawing, input)
+}
+
+/** A height and its name. */
+interface Named {
+  readonly depth: number
+  readonly label: Label
+}
+
+/** Names at the left edge, in the order of their heights, so far apart that each can be read. */
+function nameWet({ frame, placer }: Composition, named: readonly Named[]): void {
+  const sorted = [...named].sort((a, b) => b.depth - a.depth)
+  const { font, top } = frame.layout
+  const heights = spreadColumn(
+    sorted.map(({ depth }) => levelY(frame, depth) - OVER),
+    font + 4,
+    { top: top + font, bottom: frame.groundY - 4 },
+  )
+  sorted.forEach(({ label }, index) => {
+    placer.placeOverLines(label, [{ x: 10, y: heights[index] ?? top, anchor: 'start' }])
+  })
+}
+
+/** The name of a height on the dry side. */
+function nameDry({ frame, placer }: Composition, label: Label, depth: number): void {
+  const y = levelY(frame, depth) - OVER
+  const x = frame.width - 8
+  placer.placeSurely(label, [
+    { x, y, anchor: 'end' },
+    { x, y: y - label.size, anchor: 'end' },
+  ])
 }
 
 interface Line {
@@ -52,35 +84,16 @@ function drawLine(drawing: Composition, { id, role, depth, side }: Line): void {
 
 function endsOf({ frame, body }: Composition, y: number, side: Line['side']): [number, number] {
   const { centre, radius } = body.unloaded
-  if (side === 'dry') return [centre.x + radius, frame.width - 4]
+  if (side === 'dry') {
+    const face = crossing(reversed(body.dryFace), y)?.x ?? centre.x + radius
+    return [face, frame.width - 4]
+  }
   const face = crossing(body.wetFace, y)?.x ?? centre.x - radius
   return [4, face]
 }
 
-function placeOn(
-  drawing: Composition,
-  label: ReturnType<typeof largeLabel>,
-  depth: number,
-  side: Line['side'],
-): void {
-  const { frame, placer } = drawing
-  const y = levelY(frame, depth)
-  const under = y + label.size + 2
-  const across = frame.width * 0.3
-  const spots: readonly Spot[] =
-    side === 'dry'
-      ? [
-          { x: frame.width - 8, y: y - OVER, anchor: 'end' },
-          { x: frame.width - 8, y: y - OVER - label.size, anchor: 'end' },
-        ]
-      : [
-          { x: 10, y: y - OVER, anchor: 'start' },
-          { x: across, y: y - OVER, anchor: 'start' },
-          { x: 10, y: under, anchor: 'start' },
-          { x: across, y: under, anchor: 'start' },
-        ]
-  placer.placeSurely(label, spots)
-}
+/** Where the depth may stand, as shares of the width. */
+const DEPTH_AT = [0.16, 0.3, 0.42] as const
 
 /** The depth of the water at its left end, and that of the dry side at the right one. */
 function labelDepth(drawing: Composition, input: DemonstrationInput): void {
@@ -90,11 +103,13 @@ function labelDepth(drawing: Composition, input: DemonstrationInput): void {
   if (depth > 0) {
     const y = levelY(frame, depth)
     const label = largeLabel(drawing, 'depth-value', 'labelWater', shown(depth))
-    const x = frame.width * 0.16
-    placer.placeSurely(label, [
-      { x, y: y + label.size + 3, anchor: 'start' },
-      { x, y: y - OVER, anchor: 'start' },
-    ])
+    placer.placeSurely(
+      label,
+      DEPTH_AT.flatMap((share) => [
+        { x: frame.width * share, y: y + label.size + 3, anchor: 'start' as const },
+        { x: frame.width * share, y: y - OVER, anchor: 'start' as const },
+      ]),
+    )
   }
   if (dryDepth > 0) {
     const label = largeLabel(drawing, 'dry-depth-value', 'labelWater', shown(dryDepth))

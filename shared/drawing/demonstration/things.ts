@@ -16,7 +16,8 @@ export function drawPush(drawing: Composition): void {
 export function drawWind(drawing: Composition, force: number): void {
   if (force <= 0) return
   const { frame, body } = drawing
-  const { centre, radius } = body.unloaded
+  const { centre } = body
+  const radius = body.right - centre.x
   const to = { x: centre.x - radius - 4, y: centre.y }
   const arrow: Arrow = { from: { x: to.x - frame.forceScale * force, y: to.y }, to }
   addArrows(drawing, 'wind', 'force', [arrow])

@@ -54,30 +54,37 @@ export function drawCollapsedTube(drawing: Composition, collapse: number): void 
   addPath(drawing, 'skirt', 'skirt', linePath([edge, weld]))
 }
 
-/** Share of the depth that stands over the crest of a weir: critical depth. */
-const CRITICAL = 2 / 3
+/** Where the surface begins and ceases to fall, in diameters from the sill. */
+const FALL = { from: -1.2, to: 1.6 } as const
 
-/** Water that runs through where nothing holds it: down to critical depth, then a thin fast sheet. */
+/** Share of the depth that is left behind it. */
+const LEFT = 0.2
+
+/**
+ * Water that runs through where nothing holds it: about two thirds of its depth over the sill (critical
+ * depth), then a thin fast sheet. A picture; the flow itself is the engine's.
+ */
 export function drawThroughWater(drawing: Composition, sillX: number, openness: number): void {
   const { frame, input } = drawing
   const { depth } = input.case.water
   if (depth <= 0) return
   const reach = frame.scale * input.case.barrier.diameter
-  const at = (x: number, height: number): Point => ({ x, y: levelY(frame, height) })
-  const over = depth * (1 - (1 - CRITICAL) * openness)
-  const surface = [
-    at(0, depth),
-    at(Math.max(0, sillX - 1.4 * reach), depth),
-    at(sillX - 0.5 * reach, depth * (1 - 0.12 * openness)),
-    at(sillX, over),
-    at(sillX + 0.5 * reach, over * (1 - 0.4 * openness)),
-    at(sillX + reach, over * (1 - 0.6 * openness)),
-    at(frame.width, over * (1 - 0.7 * openness)),
+  const from = sillX + FALL.from * reach
+  const length = (FALL.to - FALL.from) * reach
+  const surface = Array.from({ length: POINTS + 1 }, (_, index): Point => {
+    const share = index / POINTS
+    const fallen = share * share * (3 - 2 * share) * (1 - LEFT) * openness
+    return { x: from + share * length, y: levelY(frame, depth * (1 - fallen)) }
+  })
+  const whole = [
+    { x: Math.min(0, from), y: levelY(frame, depth) },
+    ...surface,
+    { x: Math.max(frame.width, from + length), y: surface.at(-1)?.y ?? frame.groundY },
   ]
   const bed = [
-    { x: frame.width, y: frame.groundY },
-    { x: 0, y: frame.groundY },
+    { x: Math.max(frame.width, from + length), y: frame.groundY },
+    { x: Math.min(0, from), y: frame.groundY },
   ]
-  addPath(drawing, 'water', 'water', areaPath([...surface, ...bed]))
-  addPath(drawing, 'water-line', 'waterLine', linePath(surface))
+  addPath(drawing, 'water', 'water', areaPath([...whole, ...bed]))
+  addPath(drawing, 'water-line', 'waterLine', linePath(whole))
 }
