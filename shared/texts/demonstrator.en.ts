@@ -2,7 +2,6 @@
 export const demonstratorTexts = {
   title: 'Demonstrator',
   presenterTitle: 'Presenter view',
-  lead: 'Why the water holds the wall',
   stage: 'Scene {number} of {count}',
   verbatim: '{text}',
 
@@ -16,7 +15,6 @@ export const demonstratorTexts = {
     back: 'Back',
     show: 'Show',
     next: 'Next',
-    again: 'From the start',
     controls: 'Change something',
     script: 'Back to the script',
     black: 'Black',
@@ -66,7 +64,6 @@ export const demonstratorTexts = {
 
   verdict: {
     label: 'This section',
-    unsuitable: 'Not a ground to stand on',
   },
   cautions:
     'A design check, not a guarantee. Local codes, the barrier’s own instructions and a licensed engineer come first. Leave before the water reaches the leave level. Nobody on the wet side.',
@@ -201,7 +198,6 @@ export const demonstratorTexts = {
     notes: 'Notes',
     see: 'What you should see',
     clock: 'Clock',
-    elapsed: 'elapsed',
     of: 'of {minutes}',
     start: 'Start the clock',
     stop: 'Stop',
