@@ -28,7 +28,10 @@ function textOf(pdf: Buffer): string {
   const file = join(folder, 'order.pdf')
   writeFileSync(file, pdf)
   // Spaces that do not break come out of some readers as they are.
-  return execFileSync('pdftotext', ['-layout', file, '-'], { encoding: 'utf8' }).replaceAll('\u00a0', ' ')
+  return execFileSync('pdftotext', ['-layout', file, '-'], { encoding: 'utf8' }).replaceAll(
+    '\u00a0',
+    ' ',
+  )
 }
 
 describe('orders of a project', () => {
@@ -116,13 +119,16 @@ describe('orders of a project', () => {
     expect(answer.body).toMatchObject({ fields: [{ path: 'expiresAt' }] })
   })
 
-  it('keep their project from being deleted while they are in force', async () => {
+  it('keep their archived project from being deleted until they have run out', async () => {
     const server = projectServer()
-    const { lead, projectPath, project, issue } = await startedOrders(server)
+    const { lead, projectPath, issue } = await startedOrders(server)
     await issue()
-    const deletion = () => lead.delete(`${projectPath}?name=${encodeURIComponent(project.name)}`)
-    const refused = await deletion()
-    expect(refused.status).toBeGreaterThanOrEqual(400)
+    await lead.post(`${projectPath}/archive`).expect(200)
+    const refused = await lead.delete(projectPath)
+    expect(refused.status).toBe(409)
+    expect(refused.body).toMatchObject({ message: expect.stringContaining('in force') })
+    server.clock.now += 13 * HOUR
+    await lead.delete(projectPath).expect(204)
   })
 })
 
