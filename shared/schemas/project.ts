@@ -2,6 +2,7 @@ import { z } from 'zod'
 import { MEMBER_ROLES } from '../access/roles'
 import { VERDICTS } from './section-result'
 import { timeZoneSchema } from './account'
+import { restingForecastSchema } from './forecast'
 import { stationsSchema, stationSchema } from './line'
 import { backgroundSchema, DEFAULT_ENDS, lineEndsSchema, marksSchema } from './mark'
 import {
@@ -185,6 +186,7 @@ export type Scenario = z.output<typeof scenarioSchema>
 export const scenarioListItemSchema = scenarioSchema.omit({ content: true }).extend({
   basis: z.string(),
   upliftModel: z.string(),
+  forecast: restingForecastSchema.nullable(),
   /** The edges along the line: 0 sealed, 1 open; a run may have its own. */
   edges: z.strictObject({ least: z.number(), most: z.number() }),
 })

@@ -5,8 +5,6 @@ export const forecastTexts = {
   crumbs: 'Way here',
   missing: 'The gauge is not here',
   summary: 'Zero {zero}, correction to the site {correction}. Levels in {datum}, times in {zone}.',
-  open: 'Forecasts',
-  openOf: 'Forecasts of {name}',
 
   issues: {
     title: 'Forecast issues',
@@ -18,7 +16,7 @@ export const forecastTexts = {
     issued: 'Issued',
     origin: 'Origin',
     crest: 'Crest',
-    at: 'at',
+    at: 'Crest on',
     observed: 'Observed',
     actions: 'Actions',
     show: 'Show the issue of {at}',
@@ -32,8 +30,8 @@ export const forecastTexts = {
     file: 'From a file',
   },
   origin: {
-    call: 'call, a sketch',
-    typed: 'typed',
+    call: 'Call, a sketch',
+    typed: 'Typed',
     csv: 'CSV file',
     waterml: 'WaterML file',
   },
@@ -127,7 +125,6 @@ export const forecastTexts = {
     typedLead:
       'One row per time: time, level, and if there are some low, high and observed. Parted by tab, semicolon or comma.',
     area: 'Rows',
-    example: 'time;level;low;high',
     issued: 'Issued on',
     zone: 'Times without an offset are in',
     zoneAsk: 'say which',
@@ -208,14 +205,16 @@ export const forecastTexts = {
   },
 
   rests: {
-    line: 'Rests on the issue of {at}',
-    band: { low: 'its low crest', expected: 'its crest', high: 'its high crest' },
+    title: 'The forecast that the level rests on',
+    which: 'Which crest',
+    current: 'Rests on the issue of {at}: {band}.',
+    band: { low: 'low crest', expected: 'expected crest', high: 'high crest' },
     entered: 'The level was entered; it rests on no forecast.',
     'newer-issue': 'Rests on the issue of {at}; a newer one of {newer} is there.',
     'newer-observed': 'Rests on the issue of {at}; what was observed since moved its crest.',
     gone: 'Rested on the issue of {at}, which is no longer there.',
-    differs: 'The level checked is not the crest of the issue, {crest}.',
-    take: 'Take over: {level}',
+    differs: 'The level checked is not its crest, {crest}.',
+    take: 'Take over {level}',
     takeLabel: 'Take over the crest {level} of the issue of {at}',
   },
 } as const

@@ -1,5 +1,6 @@
 import { and, asc, count, desc, eq, isNotNull, isNull, sql } from 'drizzle-orm'
 import type { z } from 'zod'
+import type { RestingForecast } from '../../../shared/schemas/forecast'
 import { PAGE_SIZE } from '../../../shared/schemas/paging'
 import type { scenariosQuerySchema } from '../../../shared/schemas/project'
 import type { Db } from '../../db/client'
@@ -52,6 +53,9 @@ const listSelection = {
   basis: sql<string>`json_extract(${scenarios.content}, '$.basis')`,
   edges: { least: edge('min'), most: edge('max') },
   upliftModel: sql<string>`json_extract(${scenarios.content}, '$.uplift.model')`,
+  forecast: sql<RestingForecast | null>`json_extract(${scenarios.content}, '$.forecast')`.mapWith(
+    (text: string) => JSON.parse(text) as RestingForecast,
+  ),
 }
 
 /** Only columns of the index `scenarios_in_table`: then no content is read to find a page. */

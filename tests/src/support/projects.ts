@@ -76,6 +76,7 @@ export function listItem(change: Partial<Scenario> = {}): ScenarioListItem {
     basis: content.basis,
     edges: { least: Math.min(...edges), most: Math.max(...edges) },
     upliftModel: content.uplift.model,
+    forecast: content.forecast ?? null,
   }
 }
 
@@ -91,6 +92,7 @@ export function projectRoutes(role: Project['myRole'] = 'lead') {
   return {
     'GET /api/session': () => ({ account: account() }),
     'GET /api/projects/p': () => project({ myRole: role }),
+    'GET /api/projects/p/forecasts': () => ({ forecasts: [] }),
     'GET /api/projects/p/gauges': () => ({
       gauges: [{ id: 'g', name: 'Lock', zero: 0.6, correction: -0.04, note: '', ...kept }],
     }),
