@@ -148,7 +148,6 @@ export const forecastTexts = {
     leftOut: 'left out',
     columnOf: 'Column {number}',
     columns: 'Which column is what',
-    series: 'Which series is what',
     seriesOf: '{name}, {count} points, unit {uom}',
     noUom: 'not given',
     preview: 'As it will be kept',
