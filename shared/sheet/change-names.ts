@@ -1,13 +1,22 @@
 import type { FigureKind } from '../derivation/sheet-units'
 import { CHECK_IDS } from '../schemas/check-ids'
 
+type WordsOf = (value: string) => string
+
+const BASIS: WordsOf = (value) => `checks.basis.${value}`
+const UPLIFT: WordsOf = (value) => `checks.upliftModel.${value}`
+const VERDICT: WordsOf = (value) => `checks.verdict.${value}`
+const CHECK: WordsOf = (value) => `checks.name.${value}`
+const YES_NO: WordsOf = (value) => `sheet.change.yesNo.${value}`
+const SHAPE: WordsOf = (value) => `sheet.change.shapeReason.${value}`
+
 /** How a changed field is called, and what its figure is; null: a word. */
 export interface ChangeName {
   /** Keys of the texts that make its name, one after the other. */
   readonly keys: readonly string[]
   readonly kind: FigureKind | 'percent' | null
-  /** Where the words of its values stand. */
-  readonly words?: string
+  /** Key of the word of a value. */
+  readonly words?: WordsOf
 }
 
 const given = (symbol: string, kind: FigureKind): ChangeName => ({
@@ -18,10 +27,10 @@ const line = (id: string, kind: FigureKind): ChangeName => ({
   keys: [`derivation.line.${id}`],
   kind,
 })
-const own = (id: string, kind: ChangeName['kind'] = null, words = ''): ChangeName => ({
+const own = (id: string, kind: ChangeName['kind'] = null, words?: WordsOf): ChangeName => ({
   keys: [`sheet.change.${id}`],
   kind,
-  ...(words === '' ? {} : { words }),
+  ...(words ? { words } : {}),
 })
 
 /** Inputs of a case and of a place, by their paths. */
@@ -31,7 +40,7 @@ const INPUTS: Readonly<Record<string, ChangeName>> = {
   'leave.rateOfRise': given('c_r', 'rate'),
   'leave.timeToClear': given('t_c', 'minutes'),
   'case.gravity': given('g', 'acceleration'),
-  'case.basis': own('basis', null, 'checks.basis'),
+  'case.basis': own('basis', null, BASIS),
   'case.requiredFreeboard': given('f_r', 'length'),
   'case.barrier.diameter': given('D', 'length'),
   'case.barrier.skirtLength': given('L', 'length'),
@@ -45,8 +54,8 @@ const INPUTS: Readonly<Record<string, ChangeName>> = {
   'case.ground.permeability': given('k_g', 'speed'),
   'case.ground.layerThickness': given('T_l', 'length'),
   'case.ground.undrainedStrength': given('c_u', 'pressure'),
-  'case.ground.suitable': own('suitable', null, 'sheet.change.yesNo'),
-  'case.uplift.model': own('upliftModel', null, 'checks.upliftModel'),
+  'case.ground.suitable': own('suitable', null, YES_NO),
+  'case.uplift.model': own('upliftModel', null, UPLIFT),
   'case.uplift.edgeFactor': given('eta', 'ratio'),
   'case.uplift.diffusivity': given('c_v', 'flowPerLength'),
   'case.uplift.time': given('t_u', 'seconds'),
@@ -72,7 +81,7 @@ function ofChecks(): Readonly<Record<string, ChangeName>> {
     const verdict: ChangeName = {
       keys: [name, 'sheet.change.verdict'],
       kind: null,
-      words: 'checks.verdict',
+      words: VERDICT,
     }
     return [...figures, [`result.${id}.verdict`, verdict] as [string, ChangeName]]
   })
@@ -81,11 +90,11 @@ function ofChecks(): Readonly<Record<string, ChangeName>> {
 
 /** Results, by their paths. */
 const RESULTS: Readonly<Record<string, ChangeName>> = {
-  'result.verdict': own('wholeVerdict', null, 'checks.verdict'),
-  'result.governs': own('governs', null, 'checks.name'),
+  'result.verdict': own('wholeVerdict', null, VERDICT),
+  'result.governs': own('governs', null, CHECK),
   'result.holdsTo.from': own('holdsFrom', 'length'),
   'result.holdsTo.depth': line('holdsTo', 'length'),
-  'result.holdsTo.check': own('limitedBy', null, 'checks.name'),
+  'result.holdsTo.check': own('limitedBy', null, CHECK),
   ...ofChecks(),
   'result.freeboard.available': line('freeboard', 'length'),
   'result.thrust.still': line('stillThrust', 'forcePerLength'),
@@ -104,8 +113,8 @@ const RESULTS: Readonly<Record<string, ChangeName>> = {
   'result.overturningGross': line('grossRatio', 'ratio'),
   'result.resultant.x': own('resultantPlace', 'length'),
   'result.resultant.share': own('resultantShare', 'percent'),
-  'result.loadedShape.solved': own('solved', null, 'sheet.change.yesNo'),
-  'result.loadedShape.reason': own('unsolved', null, 'sheet.change.shapeReason'),
+  'result.loadedShape.solved': own('solved', null, YES_NO),
+  'result.loadedShape.reason': own('unsolved', null, SHAPE),
   'result.loadedShape.crest': line('crest', 'length'),
   'result.loadedShape.contact': line('contact', 'length'),
   'result.loadedShape.skinTension': line('skinTension', 'forcePerLength'),

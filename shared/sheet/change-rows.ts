@@ -55,7 +55,7 @@ function withinList({ say }: SheetWords) {
 
 function valueWords(
   value: Difference['before'],
-  { kind, words: key, isInput }: ChangeName & { readonly isInput: boolean },
+  { kind, words: keyOf, isInput }: ChangeName & { readonly isInput: boolean },
   { say, show, system }: SheetWords,
 ): string {
   if (value === null || value === '') return say('sheet.change.none')
@@ -69,5 +69,5 @@ function valueWords(
     return label === '' ? shown : `${shown}\u00a0${label}`
   }
   // "global-1.5" is a key with a dot in it.
-  return key === undefined ? String(value) : say(`${key}.${String(value).replace('.', '-')}`)
+  return keyOf ? say(keyOf(String(value).replace('.', '-'))) : String(value)
 }

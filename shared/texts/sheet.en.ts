@@ -212,8 +212,19 @@ export const sheetTexts = {
   line: {
     title: 'The line: {name}',
     layout: 'Sections as laid. Each is its weakest piece at its lowest ground.',
-    stretches: 'One check for each distinct stretch, at its lowest ground.',
-    place: 'At ch',
+    stretches:
+      'One check for each distinct stretch, at its lowest ground: demand and resistance as the derivation has them, with the tube, ground and bends of the stretch. The factor is one divided by the other.',
+    stretch: 'Chainage {place}: {tube} on {surface}, ground {ground}, {depth} of water',
+    besideBend: '{caption}; bends leave {share} of the friction',
+    column: {
+      check: 'Check',
+      demand: 'Demand',
+      resistance: 'Resistance',
+      factor: 'Found',
+      needed: 'Needed',
+      used: 'Used',
+      verdict: 'Verdict',
+    },
     from: 'From',
     to: 'To',
     tube: 'Tube',
@@ -222,7 +233,6 @@ export const sheetTexts = {
     depth: 'Depth',
     used: 'Used',
     holdsTo: 'Holds to',
-    governs: 'Governs',
     verdict: 'Verdict',
     none: '–',
     gap: {
