@@ -63,6 +63,10 @@ function hintsFor({ ids, visitors }: WholeServer): Hints {
       LEVELS.map(({ time, expected }) => ({ time, level: expected })),
     ),
     issuedAt: fc.constant(FIRST_MOMENT),
+    participant: fc.constantFrom('a-phone-of-the-tests', 'another-phone-of-them', 'short'),
+    scene: fc.constantFrom('grip', 'grip', 'leave'),
+    unit: fc.constantFrom('–', '–', 'm'),
+    guess: fc.constantFrom({ kind: 'length', min: 0, max: 0.7, step: 0.01 }),
     page: fc.constantFrom('1', '2', '100000'),
   }
 }

@@ -17,6 +17,7 @@ import { projectMembers } from '../../server/db/schema'
 import type { OrderItem } from '../../shared/schemas/order-api'
 import type { SheetRecord } from '../../shared/schemas/sheet-api'
 import { lowRoadContent, SHORT_STATIONS } from './ferry-quay'
+import { insertClass } from '../../server/modules/classes/classes.queries'
 import { linkFor, tokenOf } from './links'
 import { browser, makePerson, ORIGIN, PASSWORD, signedIn, type TestPerson } from './people'
 import { type AtEnd, freshApp } from './server-app'
@@ -128,6 +129,20 @@ async function visitorsOf({ app, db, parts }: ReturnType<typeof freshApp>, proje
   return visitors
 }
 
+/** A class that asks, on a scale that most figures lie on. */
+function classOf(db: Db, trainer: string): string {
+  const code = 'CDF347'
+  const guess = { kind: 'count', min: -1e9, max: 1e9, step: 1 } as const
+  insertClass(db, {
+    ...{ id: 'the-class', code, openedBy: trainer, openedAt: 0, expiresAt: 4_102_444_800_000 },
+    scene: {
+      ...{ course: 'short', scene: 'grip', phase: 'question', title: '', question: 'How many?' },
+      ...{ units: 'metric', guess, answer: null },
+    },
+  })
+  return code
+}
+
 /** The whole server, furnished and listening, with somebody of each kind at its door. */
 export async function wholeServer(atEnd: AtEnd = onTestFinished) {
   const folder = temporaryFolder(atEnd)
@@ -140,9 +155,10 @@ export async function wholeServer(atEnd: AtEnd = onTestFinished) {
       MAIL_FROM: 'toehold@mail.test',
     },
   })
-  const ids = await furnish(server)
+  const furnished = await furnish(server)
   cpSync(join(folder, 'data'), join(folder, 'kept'), { recursive: true })
-  const visitors = await visitorsOf(server, ids.projectId)
+  const visitors = await visitorsOf(server, furnished.projectId)
+  const ids = { ...furnished, code: classOf(server.db, 'trainer-none') }
   const listener = createServer(server.app)
   await new Promise<void>((resolve) => listener.listen(0, '127.0.0.1', resolve))
   atEnd(() => {
