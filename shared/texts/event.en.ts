@@ -33,6 +33,7 @@ export const eventTexts = {
     gap: 'Nothing is known from {from} to {to}: nothing was computed there.',
     sketch: 'A sketch from a telephone call, not a forecast by the hour.',
     rests: 'Rests on {gauge}, issued {issued}.',
+    seen: 'Observed until {time}, as forecast.',
     observed: 'Observed until {time}; later hours moved by {shift}.',
     old: 'Something changed since: this answer is old.',
     'newer-issue': 'A newer issue is there, of {issued}: this verdict is old.',
