@@ -40,6 +40,7 @@ describe('the table of scenarios', { timeout: 30_000 }, () => {
     expect(item).toEqual({
       ...rest,
       basis: 'extreme',
+      forecast: null,
       edges: { least: kept.uplift.edgeFactor, most: kept.uplift.edgeFactor },
       upliftModel: 'linear',
     })
