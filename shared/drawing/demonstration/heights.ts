@@ -34,6 +34,9 @@ interface Named {
   readonly label: Label
 }
 
+/** Where names of heights may begin, as shares of the width: clear of the mark on the water. */
+const NAMES_AT = [0, 0.28, 0.42] as const
+
 /** Names at the left edge, in the order of their heights, so far apart that each can be read. */
 function nameWet({ frame, placer }: Composition, named: readonly Named[]): void {
   const sorted = [...named].sort((a, b) => b.depth - a.depth)
@@ -44,7 +47,13 @@ function nameWet({ frame, placer }: Composition, named: readonly Named[]): void 
     { top: top + font, bottom: frame.groundY - 4 },
   )
   sorted.forEach(({ label }, index) => {
-    placer.placeOverLines(label, [{ x: 10, y: heights[index] ?? top, anchor: 'start' }])
+    const y = heights[index] ?? top
+    const spots = NAMES_AT.map((share) => ({
+      x: 10 + frame.width * share,
+      y,
+      anchor: 'start' as const,
+    }))
+    if (!placer.placeOverLines(label, spots)) placer.placeSurely(label, spots)
   })
 }
 
@@ -93,7 +102,7 @@ function endsOf({ frame, body }: Composition, y: number, side: Line['side']): [n
 }
 
 /** Where the depth may stand, as shares of the width. */
-const DEPTH_AT = [0.16, 0.3, 0.42] as const
+const DEPTH_AT = [0.14, 0.45, 0.5] as const
 
 /** The depth of the water at its left end, and that of the dry side at the right one. */
 function labelDepth(drawing: Composition, input: DemonstrationInput): void {
