@@ -22,14 +22,10 @@ export const eventSettingsSchema = z
       .enum(['soaked', 'dry'])
       .default('soaked')
       .meta({ description: 'What the ground has seen where the series begins in water' }),
-    filledAt: z
-      .number()
-      .nullable()
-      .default(null)
-      .meta({
-        unit: '°C',
-        description: 'Air temperature when filled; null: the first of the night',
-      }),
+    filledAt: z.number().nullable().default(null).meta({
+      unit: '°C',
+      description: 'Air temperature when filled; null: the first of the night',
+    }),
     air: z
       .array(airTemperatureSchema)
       .max(MOST_TEMPERATURES)
