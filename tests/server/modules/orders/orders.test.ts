@@ -2,9 +2,9 @@ import { execFileSync } from 'node:child_process'
 import { mkdtempSync, rmSync, writeFileSync } from 'node:fs'
 import { tmpdir } from 'node:os'
 import { join } from 'node:path'
-import type { Response } from 'supertest'
 import { describe, expect, it, onTestFinished } from 'vitest'
 import type { OrderItem, OrderState } from '../../../../shared/schemas/order-api'
+import { bodyBytes } from '../../../support/body-bytes'
 import { HOUR, keptOrder, startedOrders } from '../../../support/orders'
 import { as, projectServer } from '../../../support/project-server'
 
@@ -12,15 +12,6 @@ const tick = (id: string, changes: object = {}) => ({
   ...{ id, item: 'section-1', isDone: true, at: 1_930_000_000_000 },
   ...changes,
 })
-
-function binary(
-  res: Response & { on: NodeJS.ReadableStream['on'] },
-  done: (e: null, b: Buffer) => void,
-) {
-  const parts: Buffer[] = []
-  res.on('data', (part: Buffer) => parts.push(part))
-  res.on('end', () => done(null, Buffer.concat(parts)))
-}
 
 function textOf(pdf: Buffer): string {
   const folder = mkdtempSync(join(tmpdir(), 'toehold-order-'))
@@ -76,9 +67,7 @@ describe('orders of a project', () => {
     const { lead, scenarioPath, scenario, issue, path } = await startedOrders(server)
     const order = await issue()
     const before = keptOrder(server, order.id)
-    const pdf = async () =>
-      (await lead.get(`${path}/${order.id}/order.pdf`).buffer().parse(binary).expect(200))
-        .body as Buffer
+    const pdf = () => bodyBytes(lead.get(`${path}/${order.id}/order.pdf`))
     const bytes = await pdf()
     const content = { ...scenario.content, waterLevel: 3.3 }
     await lead.put(scenarioPath, { name: scenario.name, note: '', content, version: 1 }).expect(200)
@@ -191,8 +180,7 @@ describe('the file of an order', () => {
     const server = projectServer()
     const { issue, crew } = await startedOrders(server)
     const order = await issue({ contact: 'Duty desk, channel 4' })
-    const pdf = (await crew.get(`/api/orders/${order.token}/order.pdf`).buffer().parse(binary))
-      .body as Buffer
+    const pdf = await bodyBytes(crew.get(`/api/orders/${order.token}/order.pdf`))
     const text = textOf(pdf)
     expect(text).toContain('Deployment order 1')
     expect(text).toContain('Slipway head')

@@ -9,23 +9,14 @@ import { verifiedSheetSchema } from '../../../../shared/schemas/verification'
 import { digestText } from '../../../../shared/sheet/sheet-digest'
 import { readAttachment } from '../../../../server/typesetting/read-attachment'
 import { frozenDocument } from '../../../../server/modules/sheets/composing'
+import { bodyBytes } from '../../../support/body-bytes'
 import { as, type Person, projectServer, type ProjectServer } from '../../../support/project-server'
 import { startedSheet, stepsOf } from '../../../support/sheets'
 
 const sha256 = (bytes: string | Buffer) => createHash('sha256').update(bytes).digest('hex')
 
-async function pdfOf(server: ProjectServer, path: string, person: Person = 'viewer') {
-  const answer = await as(server, person)
-    .get(`${path}/sheet.pdf`)
-    .buffer()
-    .parse((res, done) => {
-      const parts: Buffer[] = []
-      res.on('data', (part: Buffer) => parts.push(part))
-      res.on('end', () => done(null, Buffer.concat(parts)))
-    })
-    .expect(200)
-  return answer.body as Buffer
-}
+const pdfOf = (server: ProjectServer, path: string, person: Person = 'viewer') =>
+  bodyBytes(as(server, person).get(`${path}/sheet.pdf`))
 
 const recipients = ({ db }: ProjectServer, subject: string) =>
   db
