@@ -100,9 +100,9 @@ describe('verdicts on the stage', () => {
       const facts = sceneFacts(scene, scene.start)
       for (const share of SHARES) {
         for (const ground of DEMO_GROUNDS) {
-          const setting = { ...playedScene(scene, share), ground }
+          const setting = { ...playedScene(scene, share, facts), ground }
           const { verdict } = demoEvaluation(setting)
-          if (checkSection(sectionOf(setting)).verdict === 'fails') expect(verdict).toBe('fails')
+          if (evaluateSection(sectionOf(setting)).verdict === 'fails') expect(verdict).toBe('fails')
         }
       }
     },
