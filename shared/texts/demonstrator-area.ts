@@ -1,4 +1,7 @@
+import { classTexts } from './class.en'
 import { demonstratorTexts } from './demonstrator.en'
 
-/** Texts of the demonstrator; they are loaded with it. */
-export const demonstratorAreaTexts = { en: { demonstrator: demonstratorTexts } } as const
+/** Texts of the demonstrator and of its class; they are loaded with it. */
+export const demonstratorAreaTexts = {
+  en: { demonstrator: demonstratorTexts, classroom: classTexts },
+} as const

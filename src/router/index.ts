@@ -1,5 +1,6 @@
 import { createRouter, createWebHistory, type RouteRecordRaw } from 'vue-router'
 import QuickCheckView from '@/views/QuickCheckView.vue'
+import { classRoute } from './class-route'
 import { demonstratorRoutes } from './demonstrator-routes'
 import { memberRoutes } from './member-routes'
 import { methodRoute } from './method-route'
@@ -23,6 +24,7 @@ export const routes: RouteRecordRaw[] = [
   },
   methodRoute,
   verifyRoute,
+  classRoute,
   ...demonstratorRoutes,
   ...memberRoutes,
   {

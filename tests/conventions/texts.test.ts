@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest'
 import { texts } from '../../shared/texts'
+import { classAreaTexts } from '../../shared/texts/class-area'
 import { demonstratorAreaTexts } from '../../shared/texts/demonstrator-area'
 import { areaTexts } from '../../shared/texts/member-area'
 import { methodAreaTexts } from '../../shared/texts/method-area'
@@ -25,6 +26,7 @@ const all = {
   ...areaTexts.en,
   ...sectionDetails.en,
   ...methodAreaTexts.en,
+  ...classAreaTexts.en,
   ...demonstratorAreaTexts.en,
   ...verifyAreaTexts.en,
   // Words of documents and pages that the server writes.
