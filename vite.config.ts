@@ -30,6 +30,29 @@ function proxied(paths: readonly string[]): Record<string, string> {
   return Object.fromEntries(paths.map((path) => [path, address]))
 }
 
+/** Asks a bundler for the modules that a module imports at once. */
+interface ModuleGraph {
+  readonly getModuleInfo: (id: string) => { readonly importedIds: readonly string[] } | null
+}
+
+let firstPage: ReadonlySet<string> | undefined
+
+/** Everything that the first page loads at once. */
+function modulesOfFirstPage(graph: ModuleGraph): ReadonlySet<string> {
+  if (firstPage) return firstPage
+  const found = new Set([folder('./src/main.ts')])
+  for (const id of found) {
+    for (const imported of graph.getModuleInfo(id)?.importedIds ?? []) found.add(imported)
+  }
+  firstPage = found
+  return found
+}
+
+/** In one file, not in one for every set of later pages that share a part: that packs better. */
+const FIRST_PAGE_GROUP = {
+  name: (id: string, graph: ModuleGraph) => (modulesOfFirstPage(graph).has(id) ? 'first' : null),
+}
+
 const ENGINE_TESTS = ['tests/shared/**/*.test.ts']
 
 /** Parts of vue-i18n that are not used: options API, global components, message compiler. */
@@ -54,6 +77,7 @@ export default defineConfig({
   // check-bundle reads manifest and modules to learn what the first page loads.
   build: {
     manifest: true,
+    rolldownOptions: { output: { codeSplitting: { groups: [FIRST_PAGE_GROUP] } } },
     // Fonts come as files: the content security policy refuses them inline.
     assetsInlineLimit: (file) => (/\.(woff2?|ttf)$/.test(file) ? false : undefined),
   },

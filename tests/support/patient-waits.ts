@@ -8,3 +8,5 @@ if (typeof document !== 'undefined') {
   const { configure } = await import('@testing-library/vue')
   configure({ asyncUtilTimeout: PATIENCE })
 }
+
+export {}

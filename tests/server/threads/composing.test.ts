@@ -37,7 +37,7 @@ describe('sheets in a thread of their own', { timeout: 120_000 }, () => {
     await expect(refused).rejects.toThrow(ConflictError)
     await expect(refused).rejects.toThrow(/There is no sheet: line \d+\.\d+ \(uplift\)/)
     const picture = { mediaType: 'image/png' as const, base64: 'AAAA' }
-    const broken = { ...sheet, photographs: [{ caption: 'none', picture }] }
+    const broken = { ...sheet, photographs: [{ caption: 'none', picture, fileId: 'none' }] }
     await expect(frozenDocument(broken)).rejects.toThrow(TypesettingError)
   })
 

@@ -98,7 +98,12 @@ describe('a project', () => {
 })
 
 describe('the desk', () => {
-  const desk = (change: Partial<Desk> = {}): Desk => ({ projects: [], waiting: [], changes: [], ...change })
+  const desk = (change: Partial<Desk> = {}): Desk => ({
+    projects: [],
+    waiting: [],
+    changes: [],
+    ...change,
+  })
 
   it('leads on where there is no project: an engineer makes one, others are added', async () => {
     fakeApi({ ...projectRoutes(), 'GET /api/desk': () => desk() })
