@@ -25,14 +25,14 @@ export const classTexts = {
   youSaid: 'You said {guess}.',
   closed: 'The class is over. Thank you.',
   expired: 'The class has ended: four hours have gone by.',
-  follow: '{participants} phones · {guesses} guesses',
+  follow: 'Phones: {participants} · guesses: {guesses}',
 
   plot: {
     label: 'Guesses of the room',
     none: 'No guess yet.',
     describe: '{guesses} guesses from {least} to {most}, the middle one {middle}.',
     answer: 'it is {answer}',
-    yours: 'yours',
+    yours: 'Yours: {guess}.',
   },
 
   panel: {

@@ -211,7 +211,7 @@ describe('the desk', { timeout: 30_000 }, () => {
     await startedProject(server)
     for (const person of ['engineerB', 'administrator', 'viewer'] as const) {
       const { body } = await as(server, person).get('/api/desk').expect(200)
-      expect(deskSchema.parse(body)).toEqual({ projects: [], changes: [] })
+      expect(deskSchema.parse(body)).toEqual({ projects: [], waiting: [], changes: [] })
     }
     await as(server, null).get('/api/desk').expect(401)
   })
