@@ -21,7 +21,7 @@ for (const [width, colorScheme] of [
 
     // What is entered on the wet side is one press away, also where the side is folded.
     await parts.getByRole('button', { name: 'Enter height and period' }).click()
-    await expect(page.getByLabel('Wave height')).toBeFocused()
+    await expect(check.field('Wave height')).toBeFocused()
 
     // With the keyboard: fold it, open the air, type into it.
     const air = parts.getByRole('button', { name: /^Air/ })
