@@ -52,6 +52,8 @@ export default defineConfig({
   testDir: 'tests/e2e',
   // Pictures for the documents: `PICTURES=1 npx playwright test pictures`.
   timeout: 120_000,
+  // On a machine that others use at the same time a test may come too late; it is named as flaky.
+  retries: 1,
   // Two browsers and two servers share the cores.
   expect: { timeout: 15_000 },
   workers: WORKERS,
