@@ -34,6 +34,17 @@ export interface SeatCheck {
  * @returns null where no shape stands or there is no water.
  */
 export function seatCheck(section: SectionCase): SeatCheck | null {
+  const known = answered.get(section)
+  if (known !== undefined) return known
+  const answer = searched(section)
+  answered.set(section, answer)
+  return answer
+}
+
+/** Several places of one page ask about the same case. */
+const answered = new WeakMap<SectionCase, SeatCheck | null>()
+
+function searched(section: SectionCase): SeatCheck | null {
   const { shape, geometry, vertical } = sectionState(section)
   const { depth, unitWeight, wettedSkirt, base } = geometry
   if (!shape.solved || depth < FILM || section.barrier.skirtLength === 0) return null
